@@ -1,0 +1,77 @@
+export default defineNuxtConfig({
+  modules: ['@nuxtjs/tailwindcss', '@pinia/nuxt', '@sidebase/nuxt-auth', 'nuxt-security', '@nuxt/eslint'],
+  // Domain code is imported by path; only framework glue is automatic.
+  imports: { dirs: ['composables', 'stores'] },
+  components: [{ path: '~/components', pathPrefix: true }],
+  devtools: { enabled: false },
+  app: {
+    head: {
+      htmlAttrs: { lang: 'en' },
+      title: 'Torquill',
+      meta: [
+        { name: 'viewport', content: 'width=device-width, initial-scale=1' },
+        { name: 'description', content: 'Torsion substantiation notes: written, checked, released and kept true.' },
+        { name: 'color-scheme', content: 'light dark' },
+      ],
+      link: [{ rel: 'icon', type: 'image/svg+xml', href: '/favicon.svg' }],
+    },
+  },
+  css: ['~/assets/css/fonts.css', '~/assets/css/tokens.css', '~/assets/css/base.css'],
+  runtimeConfig: {
+    authSecret: '',
+    databaseUrl: '',
+    baseUrl: 'http://127.0.0.1:3000',
+    dataDir: '',
+    smtpUrl: '',
+    mailFrom: 'Torquill <torquill@localhost>',
+    demonstration: '',
+    caughtMailDir: '',
+    public: { demonstration: false },
+  },
+  future: { compatibilityVersion: 4 },
+  experimental: { payloadExtraction: false },
+  compatibilityDate: '2026-01-01',
+  nitro: {
+    esbuild: { options: { target: 'node20' } },
+    externals: { external: ['pdfmake', 'mathjax-full', '@node-rs/argon2'] },
+    experimental: { asyncContext: true },
+  },
+  vite: {
+    build: { assetsInlineLimit: 0 },
+    resolve: { dedupe: ['prosemirror-model', 'prosemirror-state', 'prosemirror-transform', 'prosemirror-view'] },
+  },
+  telemetry: false,
+  auth: {
+    originEnvKey: 'AUTH_ORIGIN',
+    baseURL: '/api/auth',
+    provider: { type: 'authjs', trustHost: false, defaultProvider: 'credentials' },
+    sessionRefresh: { enableOnWindowFocus: true, enablePeriodically: false },
+  },
+  eslint: { config: { stylistic: { indent: 2, quotes: 'single', semi: false, braceStyle: '1tbs' } } },
+  security: {
+    nonce: true,
+    rateLimiter: false,
+    corsHandler: false,
+    requestSizeLimiter: false,
+    xssValidator: false,
+    allowedMethodsRestricter: false,
+    headers: {
+      crossOriginEmbedderPolicy: false,
+      referrerPolicy: 'same-origin',
+      contentSecurityPolicy: {
+        'default-src': ['\'self\''],
+        'base-uri': ['\'none\''],
+        'object-src': ['\'none\''],
+        'frame-ancestors': ['\'none\''],
+        'form-action': ['\'self\''],
+        'img-src': ['\'self\'', 'data:', 'blob:'],
+        'font-src': ['\'self\''],
+        'script-src': ['\'self\'', '\'nonce-{{nonce}}\'', '\'strict-dynamic\''],
+        // KaTeX and the editor place glyphs with style attributes; no style element is allowed without the nonce.
+        'style-src': ['\'self\'', '\'nonce-{{nonce}}\''],
+        'style-src-attr': ['\'unsafe-inline\''],
+        'upgrade-insecure-requests': false,
+      },
+    },
+  },
+})

@@ -1,0 +1,30 @@
+import { fileURLToPath } from 'node:url'
+import vue from '@vitejs/plugin-vue'
+import { defineConfig } from 'vitest/config'
+
+const root = fileURLToPath(new URL('.', import.meta.url))
+const alias = { '~': `${root}app`, '@': `${root}app` }
+
+// Three projects: pure and component tests, tests against the built server and PostgreSQL, and the browser story.
+export default defineConfig({
+  test: {
+    projects: [
+      { plugins: [vue()], resolve: { alias }, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], testTimeout: 60_000 } },
+      {
+        resolve: { alias },
+        test: {
+          name: 'api', include: ['tests/api/**/*.test.ts'], globalSetup: ['tests/api/global-setup.ts'],
+          testTimeout: 60_000, hookTimeout: 120_000, fileParallelism: false,
+        },
+      },
+      {
+        resolve: { alias },
+        test: {
+          name: 'browser', include: ['tests/browser/**/*.test.ts'], globalSetup: ['tests/api/global-setup.ts'],
+          testTimeout: 300_000, hookTimeout: 120_000, fileParallelism: false,
+        },
+      },
+      { resolve: { alias }, test: { name: 'deep', include: ['tests/deep/**/*.test.ts'], testTimeout: 600_000, fileParallelism: false } },
+    ],
+  },
+})
