@@ -6,6 +6,8 @@ import { init, type EmailInfo, type MailServer } from 'smtp-tester'
 /** A message as the catcher keeps it, one JSON file each. */
 export interface CaughtMail { id: string, at: string, messageId: string, from: string, to: string, subject: string, text: string, html: string }
 
+export interface CatcherOptions { port: number, folder?: string, clock: () => Date, onCaught?: (mail: CaughtMail) => void }
+
 export interface MailCatcher {
   /** `smtp://127.0.0.1:<port>` */
   url: string
@@ -40,9 +42,7 @@ async function keep(folder: string, mail: CaughtMail): Promise<void> {
  * `folder` (nowhere when none is given). Port 0 chooses a free one. Rejects when
  * the port is taken.
  */
-export async function startMailCatcher({ port, folder, clock, onCaught }: {
-  port: number, folder?: string, clock: () => Date, onCaught?: (mail: CaughtMail) => void
-}): Promise<MailCatcher> {
+export async function startMailCatcher({ port, folder, clock, onCaught }: CatcherOptions): Promise<MailCatcher> {
   if (folder !== undefined) await mkdir(folder, { recursive: true, mode: 0o700 })
   const caught: CaughtMail[] = []
   const server = listenAt({ host: '127.0.0.1', port })
