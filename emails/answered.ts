@@ -14,7 +14,7 @@ export function answeredMail(props: AnsweredMailProps): MailContent {
     heading: `Remark ${props.remark.number} on ${issueName(props)} is answered`,
     paragraphs: [`${props.by} has answered your remark. Close it if the answer serves, or write again.`],
     quotes: [{ label: 'Your remark', text: props.remark.text }, { label: `${props.by} writes`, text: props.answer }],
-    action: { label: 'Open the remark', url: props.link },
+    action: { label: 'Open the remark', url: props.url },
     reason: 'You get this message because you made this remark.',
   }))
 }

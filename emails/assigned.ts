@@ -25,7 +25,7 @@ export function assignedMail(props: AssignedMailProps): MailContent {
         : `${props.by} has named ${props.other} in your place. Nothing more is asked of you; what you wrote stays in the record.`,
     ],
     quotes: [{ label: `Reason given by ${props.by}`, text: props.reason }],
-    action: { label: 'Open the note', url: props.link },
+    action: { label: 'Open the note', url: props.url },
     reason: named ? `You get this message because you are named as the ${props.role} of this issue.` : `You get this message because you were the ${props.role} of this issue.`,
   }))
 }

@@ -3,9 +3,9 @@ import { composeMail, type MailContent } from '#emails/layout'
 export interface ForgottenPasswordMailProps {
   name: string
   /** One-time address where the password is set. */
-  link: string
-  /** How long the link holds, in words: `30 minutes`. */
-  validFor: string
+  url: string
+  /** How many hours the link holds. */
+  hours: number
   demonstration?: boolean
 }
 
@@ -15,10 +15,10 @@ export function forgottenPasswordMail(props: ForgottenPasswordMailProps): MailCo
     subject: 'Torquill: set a new password',
     heading: 'Set a new password',
     paragraphs: [
-      `${props.name}, someone asked for a new password for your address. If it was you, open the link once; it holds for ${props.validFor}.`,
+      `${props.name}, someone asked for a new password for your address. If it was you, open the link once; it holds for ${props.hours} hours.`,
       'If it was not you, do nothing: your present password stays in force. Tell your administrator if this happens again.',
     ],
-    action: { label: 'Set new password', url: props.link },
+    action: { label: 'Set new password', url: props.url },
     reason: 'You get this message because a new password was asked for with your address.',
     demonstration: props.demonstration,
   })

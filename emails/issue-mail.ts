@@ -11,7 +11,7 @@ export interface IssueMailProps {
   part: string
   drawingIssue: string
   /** Absolute address of the note. */
-  link: string
+  url: string
   demonstration?: boolean
 }
 

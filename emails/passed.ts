@@ -20,7 +20,7 @@ export function passedMail(props: PassedMailProps): MailContent {
     heading: `${issueName(props)} waits for your approval`,
     paragraphs: [`${props.checker} has completed the check and signed. ${deviations}`],
     facts: [['Analyst', props.analyst], ['Least margin', props.leastMargin], ['Accepted cautions', String(props.cautions)]],
-    action: { label: 'Open for approval', url: props.link },
+    action: { label: 'Open for approval', url: props.url },
     reason: 'You get this message because you are named as the approver of this issue.',
   }))
 }

@@ -25,7 +25,7 @@ export function releasedMail(props: ReleasedMailProps): MailContent {
       ...(props.adequate ? [] : ['The note concludes that the part is not adequate. Read its conclusion before you use it.']),
     ],
     facts: [['Released on', props.releasedOn], ['Least margin', props.leastMargin], ['Content SHA-256', props.contentHash]],
-    action: { label: 'Open the note', url: props.link },
+    action: { label: 'Open the note', url: props.url },
     reason: 'You get this message because you took part in this issue.',
   }))
 }

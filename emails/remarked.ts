@@ -17,7 +17,7 @@ export function remarkedMail(props: RemarkedMailProps): MailContent {
       ...(quote.trim() === '' ? [] : [{ label: 'On', text: quote }]),
       { label: `${props.checker} writes`, text },
     ],
-    action: { label: 'Open the remark', url: props.link },
+    action: { label: 'Open the remark', url: props.url },
     reason: 'You get this message because you are the analyst of this issue.',
   }))
 }

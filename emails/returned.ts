@@ -16,7 +16,7 @@ export function returnedMail(props: ReturnedMailProps): MailContent {
     heading: `${issueName(props)} is a draft again`,
     paragraphs: [`${props.by}, its ${props.role}, has returned it. ${remarks}`],
     quotes: [{ label: `Reason given by ${props.by}`, text: props.reason }],
-    action: { label: 'Open the draft', url: props.link },
+    action: { label: 'Open the draft', url: props.url },
     reason: 'You get this message because you take part in this issue.',
   }))
 }

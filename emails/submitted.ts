@@ -25,7 +25,7 @@ export function submittedMail(props: SubmittedMailProps): MailContent {
       open.length === 0 ? 'No guard needs your judgement.' : `To judge: ${open.join(' and ')}.`,
     ],
     facts: [['Least margin', props.leastMargin]],
-    action: { label: 'Open the check', url: props.link },
+    action: { label: 'Open the check', url: props.url },
     reason: 'You get this message because you are named as the checker of this issue.',
   }))
 }

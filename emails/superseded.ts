@@ -15,7 +15,7 @@ export function supersededMail(props: SupersededMailProps): MailContent {
     heading: `${issueName(props)} is superseded`,
     paragraphs: [`${props.approver} has released issue ${props.byLetter}, which takes its place. Use issue ${props.byLetter} from now on; the earlier PDF stays on record.`],
     quotes: props.changeNote.trim() === '' ? [] : [{ label: `What changed in issue ${props.byLetter}`, text: props.changeNote }],
-    action: { label: `Open issue ${props.byLetter}`, url: props.link },
+    action: { label: `Open issue ${props.byLetter}`, url: props.url },
     reason: 'You get this message because you took part in the superseded issue.',
   }))
 }

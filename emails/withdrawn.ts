@@ -13,7 +13,7 @@ export function withdrawnMail(props: WithdrawnMailProps): MailContent {
     heading: `${issueName(props)} is withdrawn`,
     paragraphs: [`${props.approver} has withdrawn it. Do not use it any longer, and tell those to whom you passed the PDF.`],
     quotes: [{ label: `Reason given by ${props.approver}`, text: props.reason }],
-    action: { label: 'Open the note', url: props.link },
+    action: { label: 'Open the note', url: props.url },
     reason: 'You get this message because you took part in this issue.',
   }))
 }

@@ -6,13 +6,13 @@ export const LINK = 'https://torquill.example/notes/QSN-19-0031?issue=B'
 /** An issue as every message about it sees it; invented. */
 export const ISSUE: IssueMailProps = {
   number: 'QSN-19-0031', letter: 'B', title: 'Flap inner hat stiffener', project: 'QW-19 Ondrell', part: 'QW19-5721-14',
-  drawingIssue: 'D', link: LINK, demonstration: true,
+  drawingIssue: 'D', url: LINK, demonstration: true,
 }
 
 /** One set of props per template: a new template without a sample does not compile. */
 export const SAMPLES: { [Template in MailTemplate]: MailProps<Template> } = {
-  'invited': { name: 'Koji Hatamori', email: 'koji.hatamori@quellmark.example', invitedBy: 'Yusuf Karatepeli', link: LINK, validFor: '48 hours' },
-  'forgotten-password': { name: 'Koji Hatamori', link: LINK, validFor: '30 minutes' },
+  'invited': { name: 'Koji Hatamori', url: LINK, hours: 72 },
+  'forgotten-password': { name: 'Koji Hatamori', url: LINK, hours: 2 },
   'submitted': { ...ISSUE, analyst: 'Ilse Tveråmo', approver: 'Catalina Ferreyrón', save: 9, leastMargin: '+1.41', cautions: 2, deviations: 0 },
   'assigned': { ...ISSUE, role: 'checker', change: 'named', by: 'Yusuf Karatepeli', reason: 'Meera is on leave.', other: 'Meera Ranganekar' },
   'remarked': { ...ISSUE, checker: 'Koji Hatamori', remark: { number: 1, text: 'Say why it is open.', quote: 'riveted through its crown' } },

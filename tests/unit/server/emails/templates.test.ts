@@ -62,7 +62,7 @@ describe('the registry', () => {
   })
 
   it('refuses a link that is not http or https', () => {
-    expect(() => renderMail('returned', { ...SAMPLES.returned, link: 'javascript:alert(1)' })).toThrow('http')
+    expect(() => renderMail('returned', { ...SAMPLES.returned, url: 'javascript:alert(1)' })).toThrow('http')
   })
 })
 
