@@ -32,6 +32,7 @@ export default defineNuxtConfig({
   experimental: { payloadExtraction: false },
   compatibilityDate: '2026-01-01',
   nitro: {
+    output: process.env.TORQUILL_OUTPUT_DIR ? { dir: process.env.TORQUILL_OUTPUT_DIR } : undefined,
     esbuild: { options: { target: 'node20' } },
     externals: { external: ['pdfmake', 'mathjax-full', '@node-rs/argon2'] },
     experimental: { asyncContext: true },
@@ -41,6 +42,8 @@ export default defineNuxtConfig({
     resolve: { dedupe: ['prosemirror-model', 'prosemirror-state', 'prosemirror-transform', 'prosemirror-view'] },
   },
   telemetry: false,
+  // A build goes to a folder of its own, so that it never overwrites one that is running.
+  buildDir: process.env.TORQUILL_WORK_DIR ?? '.nuxt',
   auth: {
     originEnvKey: 'AUTH_ORIGIN',
     baseURL: '/api/auth',

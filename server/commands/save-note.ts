@@ -1,0 +1,80 @@
+import { createHash, randomUUID } from 'node:crypto'
+import { ENGINE_VERSION } from '#shared/calc/registry'
+import { canonicalJson } from '#shared/note/canonical'
+import { calculationsOf } from '#shared/note/calculations'
+import { checkDocument } from '#shared/note/check-document'
+import { applySteps } from '#shared/note/steps'
+import type { SaveContent } from '#shared/schemas/notes'
+import { noteChain, recordAct } from '#server/audit/record'
+import type { Issue } from '#server/database/entities/issue'
+import { SaveSchema } from '#server/database/entities/save'
+import { evaluateDocument, summaryOf, type Results } from '#server/notes/evaluate-document'
+import { requireAbility } from '#server/notes/facts'
+import { findIssue, lockIssue } from '#server/notes/find-issue'
+import { mapRemarks } from '#server/notes/map-remarks'
+import { addPart } from '#server/notes/parts'
+import { takePen } from '#server/notes/pen'
+import { runCommand, type CommandContext } from '#server/utils/command-context'
+import { DomainError } from '#server/utils/domain-error'
+
+/** A full snapshot this often; in between a save is rebuilt from its steps. */
+const snapshotEvery = 50
+
+const sha256 = (text: string) => createHash('sha256').update(text).digest('hex')
+
+/** The document after the steps, checked against schema and limits. */
+function nextDocument(issue: Issue, input: SaveContent) {
+  const before: unknown = JSON.parse(issue.document)
+  const applied = applySteps(before, input.steps)
+  if (!applied.ok) throw new DomainError('invalid-document', applied.message, { details: { code: applied.code } })
+  const checked = checkDocument(applied.document)
+  if (!checked.ok) throw new DomainError('invalid-document', checked.message, { details: { code: checked.code, path: checked.path } })
+  const hash = sha256(checked.canonical)
+  if (hash !== input.docHash) throw new DomainError('invalid-document', 'The steps do not lead to the document your browser shows. Copy your last words and load the page again.', { details: { code: 'hash-differs' } })
+  return { before, document: checked.canonical, hash }
+}
+
+function recompute(issue: Issue, before: unknown, document: string) {
+  return evaluateDocument(calculationsOf(JSON.parse(document)), {
+    calculations: calculationsOf(before), results: JSON.parse(issue.results) as Results, engineVersion: issue.engineVersion,
+  })
+}
+
+async function refuseConflict(context: CommandContext, issue: Issue, baseSave: number) {
+  if (issue.saveNumber === baseSave) return
+  throw new DomainError('save-conflict', `${issue.savedBy.name} saved a newer version. Your words are kept here; look at theirs, then put yours on top.`, {
+    details: { save: issue.saveNumber, savedBy: issue.savedBy.name, savedAt: issue.savedAt.toISOString(), yours: issue.savedBy.id === context.actor.id },
+  })
+}
+
+/** One save: steps on a base save, checked, recomputed and stored in one transaction. A repeated key answers again and changes nothing. */
+export async function saveNote(context: CommandContext, issueId: string, input: SaveContent): Promise<Issue> {
+  const { note, letter } = await findIssue(context.em, issueId)
+  const name = { chain: noteChain(note.id), act: 'save', subject: { type: 'issue', id: issueId, label: `${note.number} ${letter}` } }
+  return runCommand(context, name, async (inside) => {
+    const { em, actor, clock } = inside
+    const issue = await lockIssue(em, issueId)
+    if (await em.count(SaveSchema, { issue, idempotencyKey: input.key })) return issue
+    await requireAbility(inside, issue, ['write'])
+    await takePen(inside, issue)
+    await refuseConflict(inside, issue, input.baseSave)
+    const { before, document, hash } = nextDocument(issue, input)
+    const { results, changed } = recompute(issue, before, document)
+    const number = issue.saveNumber + 1
+    const old = { save: issue.saveNumber, documentHash: issue.documentHash }
+    em.create(SaveSchema, {
+      id: randomUUID(), issue, number, author: actor, at: clock(), steps: JSON.stringify(input.steps),
+      snapshot: number % snapshotEvery === 0 ? document : null, documentHash: hash, changedResults: canonicalJson(changed),
+      engineVersion: ENGINE_VERSION, label: null, idempotencyKey: input.key,
+    })
+    Object.assign(issue, {
+      document, documentHash: hash, results: canonicalJson(results), engineVersion: ENGINE_VERSION, saveNumber: number,
+      savedAt: clock(), savedBy: actor, lastChangeAt: clock(), ...summaryOf(results),
+    })
+    await em.flush()
+    await addPart(inside, issue, 'contributor')
+    await mapRemarks(inside, issue, before, input.steps)
+    await recordAct(inside, { ...name, old, new: { save: number, documentHash: hash, recomputed: Object.keys(changed) } })
+    return issue
+  })
+}

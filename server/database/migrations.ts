@@ -1,0 +1,21 @@
+import { Migration } from '@mikro-orm/migrations'
+import { tables } from './migrations/001-tables'
+import { refusals } from './migrations/002-refusals'
+
+class Tables extends Migration {
+  override up() {
+    this.addSql(tables)
+  }
+}
+
+class Refusals extends Migration {
+  override up() {
+    this.addSql(refusals)
+  }
+}
+
+/** Migrations in order, listed by hand so that they are bundled. A migration that has run is never edited. */
+export const migrations = [
+  { name: '001-tables', class: Tables },
+  { name: '002-refusals', class: Refusals },
+]

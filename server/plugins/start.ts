@@ -1,0 +1,16 @@
+import { closeQueue, useQueue } from '#server/jobs/queue'
+import { environment } from '#server/utils/environment'
+import { closeOrm, useOrm } from '#server/utils/orm'
+import { ENGINE_VERSION } from '#shared/calc/registry'
+
+/** Checks the environment at start, connects before the first request, and lets go in order at the end. */
+export default defineNitroPlugin((nitro) => {
+  const { databaseUrl } = environment()
+  useQueue(databaseUrl)
+  useOrm().catch(error => console.error('database', error.message))
+  console.info(`engine ${ENGINE_VERSION}`)
+  nitro.hooks.hook('close', async () => {
+    await closeQueue()
+    await closeOrm()
+  })
+})
