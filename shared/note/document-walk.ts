@@ -72,8 +72,8 @@ function nodeFault({ value: node, path, depth }: Item, tally: Tally): DocumentFa
   if (node.type === 'calculation' && ++tally.calculations > DOCUMENT_LIMITS.calculations) {
     return documentFault('document.too-many-calculations', `A note holds at most ${DOCUMENT_LIMITS.calculations} calculations. Move some into another note.`, path)
   }
-  return attributesFault(node.attrs, rules, `${path}.attrs`)
-    ?? (rules.id ? idFault(node.attrs, tally, `${path}.attrs.id`) : null)
+  return (rules.id ? idFault(node.attrs, tally, `${path}.attrs.id`) : null)
+    ?? attributesFault(node.attrs, rules, `${path}.attrs`)
     ?? marksFault(node.marks, `${path}.marks`)
     ?? textFault(node, tally, path)
 }
