@@ -6,6 +6,12 @@ export default withNuxt(
   {
     rules: {
       '@typescript-eslint/no-explicit-any': 'error',
+      '@stylistic/member-delimiter-style': 'off',
+      '@stylistic/quote-props': 'off',
+      '@stylistic/max-statements-per-line': 'off',
+      '@stylistic/operator-linebreak': 'off',
+      '@stylistic/multiline-ternary': 'off',
+      '@stylistic/arrow-parens': 'off',
       'max-lines': ['error', { max: 400, skipBlankLines: true, skipComments: true }],
       'vue/multi-word-component-names': 'off',
       'vue/max-attributes-per-line': 'off',

@@ -1,3 +1,4 @@
+import { LockMode } from '@mikro-orm/core'
 import type { ChangePerson } from '#shared/schemas/people'
 import { recordAct, systemChain } from '#server/audit/record'
 import { PersonSchema, type Person } from '#server/database/entities/person'
@@ -12,7 +13,7 @@ export function changePerson(context: CommandContext, personId: string, change: 
   return runCommand(context, name, async (inside) => {
     const { em, actor, clock } = inside
     // All administrators are locked, so that two of them cannot disable each other at once.
-    const administrators = await em.find(PersonSchema, { administrator: true, disabledAt: null }, { lockMode: 4 })
+    const administrators = await em.find(PersonSchema, { administrator: true, disabledAt: null }, { lockMode: LockMode.PESSIMISTIC_WRITE })
     const person = await em.findOne(PersonSchema, { id: personId }, { refresh: true })
     if (!person) throw new DomainError('not-found', 'There is no such person.')
     const roles = change.auditor !== undefined || change.administrator !== undefined || change.disabled !== undefined

@@ -41,3 +41,9 @@ export async function closeQueue() {
   sender = undefined
   await started?.stop({ graceful: false })
 }
+
+/** A job by its id, with what it has come to. */
+export async function queuedJob<Name extends QueueName>(name: Name, id: string): Promise<{ data: JobData[Name], state: string, output: { fileId?: string } | null } | null> {
+  const job = await (await boss()).getJobById<JobData[Name]>(name, id)
+  return job && { data: job.data, state: job.state, output: job.output as { fileId?: string } | null }
+}

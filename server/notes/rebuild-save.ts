@@ -1,6 +1,5 @@
 import { createHash } from 'node:crypto'
 import type { EntityManager } from '@mikro-orm/postgresql'
-import { checkDocument } from '#shared/note/check-document'
 import { applySteps } from '#shared/note/steps'
 import { SaveSchema, type Save } from '#server/database/entities/save'
 import { DomainError } from '#server/utils/domain-error'
@@ -17,9 +16,8 @@ export async function rebuildSave(em: EntityManager, issueId: string, number: nu
   let document = saves[from]?.snapshot ?? ''
   for (const later of saves.slice(from + 1)) {
     const applied = applySteps(JSON.parse(document), JSON.parse(later.steps))
-    const checked = applied.ok ? checkDocument(applied.document) : null
-    if (!checked?.ok) throw new Error(`save ${later.number} of ${issueId} cannot be rebuilt`)
-    document = checked.canonical
+    if (!applied.ok) throw new Error(`save ${later.number} of ${issueId} cannot be rebuilt: ${applied.message}`)
+    document = applied.canonical
   }
   const results: Results = {}
   for (const s of saves) Object.assign(results, JSON.parse(s.changedResults))

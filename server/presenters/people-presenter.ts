@@ -43,4 +43,3 @@ export async function presentProjects(em: EntityManager, person: Person) {
     }
   })
 }
-
