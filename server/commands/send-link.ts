@@ -1,13 +1,12 @@
-import { createHash, randomBytes, randomUUID } from 'node:crypto'
+import { randomBytes, randomUUID } from 'node:crypto'
 import type { EntityManager } from '@mikro-orm/postgresql'
+import { tokenHash } from '#server/access/one-time-links'
 import { OneTimeLinkSchema } from '#server/database/entities/one-time-link'
 import type { Person } from '#server/database/entities/person'
 import { queueMail } from '#server/mail/queue-mail'
 import { environment } from '#server/utils/environment'
 
 const hours = { invitation: 72, forgotten: 2 } as const
-
-export const tokenHash = (token: string) => createHash('sha256').update(token).digest('hex')
 
 /** Makes a one-time link and voids earlier ones of the same person. Only the token's hash is stored. */
 export async function makeLink({ em, clock }: { em: EntityManager, clock: () => Date }, person: Person, purpose: keyof typeof hours): Promise<string> {

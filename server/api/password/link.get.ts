@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { usableLink } from '#server/commands/set-password'
+import { usableLink } from '#server/access/one-time-links'
 import { defineApi } from '#server/utils/define-api'
 
 export default defineApi({ can: 'public', query: z.object({ token: z.string().max(200) }) }, async ({ em, clock, query }) => {
