@@ -5,6 +5,7 @@ import { isMailTemplate, renderMail, type MailProps, type MailTemplate } from '#
 import type { MailContent } from '#emails/layout'
 import { MailSchema } from '#server/database/entities/mail'
 import { PersonSchema } from '#server/database/entities/person'
+import { environment } from '#server/utils/environment'
 
 /** One message on its way: `id` is the mail row's, so that a message sent twice is known as one by its Message-ID. */
 export interface Letter { id: string, to: { name: string, address: string }, content: MailContent }
@@ -37,10 +38,10 @@ export function openMailer({ smtpUrl, from }: { smtpUrl: string, from: string })
   }
 }
 
-function contentOf(template: string, props: unknown): MailContent {
+function contentOf(template: string, props: Record<string, unknown>): MailContent {
   if (!isMailTemplate(template)) throw new Error(`No message is called ${template}`)
   // The row was written by queueMail, whose types tie the props to the template.
-  return renderMail(template, props as MailProps<MailTemplate>)
+  return renderMail(template, { ...props, demonstration: environment().demonstration } as unknown as MailProps<MailTemplate>)
 }
 
 export type Delivery = 'sent' | 'already sent' | 'not sent: recipient disabled' | 'unknown'

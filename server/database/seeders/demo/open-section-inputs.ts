@@ -63,6 +63,8 @@ export interface SectionWords {
   twistAllowed?: string
   twistOrigin?: string
   fitting?: string
+  /** The basis works with partial factors; `factorReason` then quotes its paragraph. */
+  partial?: boolean
   factorReason: string
   repeated?: boolean
 }
@@ -77,7 +79,7 @@ export function openSection(words: SectionWords): OpenSectionInputs {
     twistOrigin: words.twistOrigin ?? '',
     factors: {
       ultimate: '1.5', fitting: words.fitting ?? '', casting: '', bearing: '', onLimit: words.fitting !== undefined,
-      divideUltimate: false, partial: false, reason: words.factorReason,
+      divideUltimate: false, partial: words.partial ?? false, reason: words.factorReason,
     },
     ends: 'free',
     declarations: { fitting: words.fitting !== undefined, repeated: words.repeated ?? false, cutOut: 'none', taper: null, layered: false, welded: false, builtIn: false },

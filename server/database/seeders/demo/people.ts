@@ -19,7 +19,7 @@ export const PROJECTS: DemoProject[] = [
   {
     code: 'QL-8', name: 'Torvane', notePattern: 'QSN-40-{0000}',
     basis: 'EN 1915-2 and EN 1993-1-1',
-    criteria: 'QL8-SC-001 issue 1: 1.5 on variable loads; grade minima (S basis) accepted (paragraph 3); roller rotation at most 2.4° (paragraph 7). Demonstration data.',
+    criteria: 'QL8-SC-001 issue 1: 1.5 on variable loads and 1.00 on yield, partial factors of EN 1993-1-1 (paragraph 4); grade minima (S basis) accepted (paragraph 3); roller rotation at most 2.4° (paragraph 7). Demonstration data.',
   },
 ]
 

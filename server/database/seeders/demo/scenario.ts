@@ -115,7 +115,10 @@ export const RAIL_NOTE: DemoNote = {
     acts: [
       { act: 'save', by: 'ilse', at: '2026-08-31 11:30', sections: only(channelRail(), ...SET_UP, ...DATA) },
       { act: 'save', by: 'ilse', at: '2026-09-17 16:05', sections: channelRail() },
-      { act: 'answer', by: 'ilse', at: '2026-09-18 08:30', answers: [{ calc: '*', guard: 'G-25', text: 'Paragraph 3 of QL8-SC-001 accepts the minima of the grade for the loader.' }] },
+      { act: 'answer', by: 'ilse', at: '2026-09-18 08:30', answers: [
+        { calc: '*', guard: 'G-25', text: 'Paragraph 3 of QL8-SC-001 accepts the minima of the grade for the loader.' },
+        { calc: '*', guard: 'G-10', text: 'The drawing bends both corners; they are taken to the intersection of the mid-lines to keep the section simple. S355J2 is ductile and the load of this note is static, so a local peak yields without harm. Fatigue is treated in QSN-40-0010 with the bend as drawn.' },
+      ] },
       { act: 'explain', by: 'ilse', at: '2026-09-18 08:50', reasons: REASONS.rail },
       { act: 'submit', by: 'ilse', at: '2026-09-18 09:05', checker: 'noemie', approver: 'catalina' },
       { act: 'remark', remark: {

@@ -22,13 +22,13 @@ const tee = (): SectionWords['geometry'] => {
 
 const trial = () => openSection({
   units: 'SI', geometry: tee(), junctions: [{ node: '2', radius: { text: '8', unit: 'mm' }, make: 'machined' }], material: QM_106,
-  loading: torqueCases(guess, 'N·m', '°C'), length: '940', factorReason: 'QL8-SC-001 issue 1: 1.5 on variable loads.',
+  loading: torqueCases(guess, 'N·m', '°C'), length: '940', partial: true, factorReason: 'QL8-SC-001 issue 1, paragraph 4: 1.5 on variable loads, 1.00 on yield; the ultimate strength is not used.',
 })
 
 export function crossBar(): DemoSection[] {
   return [
     section('scope', p('Cross bar of the tilt frame, QL8-3340-01.')),
     section('references', ol('Drawing QL8-3340-01, preliminary.', 'QL8-SC-001 issue 1, Structural criteria of the loader.', 'QM-MD-106 issue 2, material record QM-106.')),
-    section('section-analysis', calc('C1', 'First trial: tee', trial()), p('First trial: torsion constant ⟦C1 J⟧, twist ⟦C1 twist@X01⟧. The torque is a guess until the loads are known.')),
+    section('section-analysis', calc('C1', 'First trial: tee', trial()), p('First trial: torsion constant ⟦C1 J⟧, twist ⟦C1 twist_deg@X01⟧. The torque is a guess until the loads are known.')),
   ]
 }

@@ -68,16 +68,19 @@ const geometry = (sheet: Sheet) => section('geometry',
   table(['Wall', 'From', 'To', 'What it is'],
     ['a', '1', '2', 'inboard brim, free edge at node 1'], ['b', '2', '3', 'inboard web'], ['c', '3', '4', 'crown, riveted'],
     ['d', '4', '5', 'outboard web'], ['e', '5', '6', 'outboard brim, free edge at node 6']),
-  p('Slenderness is judged between the intersections of the mid-lines. The shear centre stands outside the crown, as it must for a hat.'))
+  p('Slenderness is judged between the intersections of the mid-lines; the brims have ⟦C1 slenderness:a⟧. The shear centre stands outside the crown, as it must for a hat.'))
 
 const materials = () => section('materials',
   p('QM-101 issue 2, aluminium alloy 2024-T3 in bare sheet, B basis. Seven stiffeners lie side by side and any one may fail without loss of the flap: the load path is redundant, so a B basis suits it (25.613).'),
-  p('Shear yield is not published. It is taken as the tension yield divided by the square root of three, as the calculations state. At the hot-day temperature all strengths are multiplied by the factor of table 3 of the record; between its points the factor is linear. Demonstration data: these values may not be used for a real part.'))
+  table(['Property', 'Value', 'Where from'],
+    ['shear modulus', '⟦C1 G:QM-101⟧', 'record'], ['ultimate shear strength', '⟦C1 Fsu:QM-101⟧', 'record'],
+    ['tension yield', '⟦C1 Fty:QM-101⟧', 'record'], ['shear yield', '⟦C1 Fsy:QM-101⟧', 'tension yield over the square root of three']),
+  p('Shear yield is not published. It is taken as the tension yield divided by the square root of three, as the calculations state. At the temperature of the hot day all strengths are multiplied by ⟦C1 k:QM-101@S07⟧ (table 3 of the record). Demonstration data: these values may not be used for a real part.'))
 
 const loads = (sheet: Sheet) => section('loads',
   p('All cases are given at limit level and all of them are solved; nothing was screened out beforehand.'),
-  ul('S01 to S12 impose a rate of twist. S10, the jammed outboard carriage, has the largest rate; S07 is the largest on a hot day. S11 turns the other way.',
-    'W01 to W04 are torques of the sensor link in bay 5. W03 drives the iced link, W04 drives it back.'),
+  ul('S01 to S12 impose a rate of twist. S10, the jammed outboard carriage, has the largest rate, ⟦C1 theta_deg@S10⟧; S07 is the largest on a hot day, ⟦C1 theta_deg@S07⟧. S11 turns the other way.',
+    'W01 to W04 are torques of the sensor link in bay 5. W03 drives the iced link with ⟦C2 T@W03⟧, W04 drives it back with ⟦C2 T@W04⟧.'),
   p('Imposed displacements are factored like loads, as the criteria require; no special factor pertains, since no fitting lies in the path of the torque.'),
   p(`The sensor's torques are those of issue ${sheet.sensor} of its installation data${sheet.letter === 'A' ? '.' : ', which belongs to the larger sensor.'}`))
 
@@ -85,7 +88,7 @@ const sectionAnalysis = (sheet: Sheet) => section('section-analysis',
   p('C1 solves the hat for the twelve imposed rates of twist. The stress follows from the rate alone:'),
   tex('\\tau = K_c\\,G\\,t\\,\\theta\''),
   calc('C1', 'Hat section, rate of twist imposed by the flap', imposedTwist(sheet)),
-  p('The torsion constant is ⟦C1 J⟧ after the deduction for the two free edges. The shear centre lies at y = ⟦C1 yS⟧ and the warping constant is ⟦C1 Gamma⟧; with the ends free it is stated for those who model the stiffener as a bar.'),
+  p('The torsion constant is ⟦C1 J⟧ after the deduction for the two free edges. The shear centre lies at y = ⟦C1 y_S⟧ and the warping constant is ⟦C1 Gamma⟧; with the ends free it is stated for those who model the stiffener as a bar.'),
   p('The bay of the position sensor has the same section and carries a torque instead. C2 solves it, C3 repeats it with the least sheet.'),
   calc('C2', 'Sensor bay, torque of the sensor link', sensorBay(sheet, sheet.t)),
   calc('C3', 'Sensor bay at the least sheet of the drawing', sensorBay(sheet, sheet.least)),
@@ -93,18 +96,18 @@ const sectionAnalysis = (sheet: Sheet) => section('section-analysis',
 
 const span = () => section('span-analysis',
   p('Where the twist is imposed there is no span to solve: the rate is prescribed at every station. In case S10 the stiffener carries a torque of ⟦C1 T@S10⟧, which it returns to the flap.'),
-  p('In the sensor bay the torque is constant from clip to clip. The largest, W03, turns at ⟦C2 theta@W03⟧ and so twists the bay by ⟦C2 twist@W03⟧, which is ⟦C2 twist@W03|rad⟧. The torques at the two clips are equal and opposite.'))
+  p('In the sensor bay the torque is constant from clip to clip. The largest, W03, turns at ⟦C2 theta@W03⟧ and so twists the bay by ⟦C2 twist_deg@W03⟧ over ⟦C2 length⟧, which is ⟦C2 twist@W03⟧. The torques at the two clips are equal and opposite.'))
 
 const stresses = () => section('stresses',
   p('The largest shear of the imposed twist occurs in S10: ⟦C1 tau_max@S10⟧ on the flats and ⟦C1 tau_corner@S10⟧ on the inside of the bends. In the sensor bay W03 gives ⟦C2 tau_max@W03⟧ on the flats and ⟦C2 tau_corner@W03⟧ at the bends.'),
   p('Where both are present they are added by magnitude. Each alone has a margin above ten at limit and at ultimate, so their sum has a margin above four. This is enough to leave shear out of the decision, and the exact sum is not used further.'))
 
 const deflections = (sheet: Sheet) => section('deflections',
-  p(`The sensor tolerates a misalignment of 1.95° in its bay, measured against the flap (reference 3, paragraph 6); the twist of the flap itself moves sensor and link together and does not count. At limit load W03 twists the bay by ⟦C2 twist@W03⟧, a margin of ⟦C2 MS:twist@W03⟧. W04 follows with ⟦C2 MS:twist@W04⟧.`),
+  p(`The sensor tolerates a misalignment of ⟦C2 twist_allowed⟧ in its bay, measured against the flap (reference 3, paragraph 6); the twist of the flap itself moves sensor and link together and does not count. At limit load W03 twists the bay by ⟦C2 twist_deg@W03⟧, a margin of ⟦C2 MS:twist@W03⟧. W04 follows with ⟦C2 MS:twist@W04⟧.`),
   ...(sheet.letter === 'A' ? [] : [p('The larger sensor would have twisted the thinner sheet of issue A beyond its limit; this is one of the two reasons for the thicker sheet.')]))
 
 const sensitivity = (sheet: Sheet) => section('sensitivity',
-  p(`With the least sheet of the drawing, ${sheet.least} mm, the margin of W03 becomes ⟦C3 MS:twist@W03⟧ (C3). Thickness therefore matters: it enters the twist by its cube.`),
+  p(`With the least sheet of the drawing, ⟦C3 t:a⟧, the margin of W03 becomes ⟦C3 MS:twist@W03⟧ (C3). Thickness therefore matters: it enters the twist by its cube.`),
   p('In shear under the imposed twist the tendency is the opposite. There the stress grows with the thickness, because the rate is given and not the torque. Both margins were looked at for this reason.'),
   p('The bend radius moves the developed length a little and the corner factor less. If a clip were lost, the bay would be twice as long and twist twice as much: the clips are on the list of the inspection card.'))
 
