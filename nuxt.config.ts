@@ -1,8 +1,10 @@
+import { fileURLToPath } from 'node:url'
+
 export default defineNuxtConfig({
   modules: ['@nuxtjs/tailwindcss', '@pinia/nuxt', '@sidebase/nuxt-auth', 'nuxt-security', '@nuxt/eslint'],
+  components: [{ path: '~/components', pathPrefix: true }],
   // Domain code is imported by path; only framework glue is automatic.
   imports: { dirs: ['composables', 'stores'] },
-  components: [{ path: '~/components', pathPrefix: true }],
   devtools: { enabled: false },
   app: {
     head: {
@@ -28,13 +30,19 @@ export default defineNuxtConfig({
     caughtMailDir: '',
     public: { demonstration: false },
   },
+  // A build goes to a folder of its own, so that it never overwrites one that is running.
+  buildDir: process.env.TORQUILL_WORK_DIR ?? '.nuxt',
   future: { compatibilityVersion: 4 },
   experimental: { payloadExtraction: false },
   compatibilityDate: '2026-01-01',
   nitro: {
     output: process.env.TORQUILL_OUTPUT_DIR ? { dir: process.env.TORQUILL_OUTPUT_DIR } : undefined,
     esbuild: { options: { target: 'node20' } },
-    externals: { external: ['pdfmake', 'mathjax-full', '@node-rs/argon2'] },
+    alias: { 'next-auth/core': fileURLToPath(new URL('./server/access/next-auth-core.ts', import.meta.url)) },
+    externals: {
+      external: ['@node-rs/argon2'],
+      traceInclude: [fileURLToPath(new URL('./node_modules/next-auth/core/index.js', import.meta.url))],
+    },
     experimental: { asyncContext: true },
   },
   vite: {
@@ -42,8 +50,6 @@ export default defineNuxtConfig({
     resolve: { dedupe: ['prosemirror-model', 'prosemirror-state', 'prosemirror-transform', 'prosemirror-view'] },
   },
   telemetry: false,
-  // A build goes to a folder of its own, so that it never overwrites one that is running.
-  buildDir: process.env.TORQUILL_WORK_DIR ?? '.nuxt',
   auth: {
     originEnvKey: 'AUTH_ORIGIN',
     baseURL: '/api/auth',

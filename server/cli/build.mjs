@@ -2,6 +2,7 @@
 import { createHash } from 'node:crypto'
 import { existsSync, mkdirSync, readFileSync, readdirSync, renameSync, rmSync, statSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
+import { ensurePrepared } from './packages.mjs'
 import { root, run, say } from './shell.mjs'
 
 const sources = ['app', 'server', 'shared', 'emails', 'public', 'nuxt.config.ts', 'tailwind.config.ts', 'mikro-orm.config.ts', 'package.json', 'package-lock.json']
@@ -34,6 +35,7 @@ export function ensureBuild() {
   const folder = join(root, '.build')
   const target = join(folder, sourceHash())
   if (existsSync(join(target, 'complete'))) return target
+  ensurePrepared()
   say('Building (a minute or two)')
   const part = join(folder, `part-${process.pid}`)
   const work = join(folder, `work-${process.pid}`)

@@ -15,5 +15,4 @@ const env = {
   DATABASE_URL: own('torquill_app', secrets.appPassword), DATABASE_OWNER_URL: own('torquill_owner', secrets.ownerPassword),
   NUXT_AUTH_SECRET: secrets.authSecret, ...process.env,
 }
-const [node, ...args] = commandOf(build, ...process.argv.slice(2))
-process.exit(spawnSync(node, args, { cwd: root, stdio: 'inherit', env }).status ?? 1)
+process.exit(spawnSync(process.execPath, commandOf(build, ...process.argv.slice(2)), { cwd: root, stdio: 'inherit', env }).status ?? 1)

@@ -57,5 +57,5 @@ export async function startCatcher(build, { port, folder, onLine = () => {} }) {
   return { stop: () => stop(child) }
 }
 
-/** One command of the terminal, from the build, with its environment. */
-export const commandOf = (build, ...args) => [process.execPath, [join(build, 'command.mjs'), ...args]]
+/** Arguments for Node.js that run one of the terminal's commands from a build. */
+export const commandOf = (build, ...args) => [join(build, 'command.mjs'), ...args]

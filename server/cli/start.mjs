@@ -57,9 +57,7 @@ async function main() {
     DATABASE_OWNER_URL: owner,
   }
   const say1 = text => text.trim() && say(text.trim())
-  const [node, ...migrate] = commandOf(build, 'migrate')
-  say1(run(node, migrate, { env }))
-  say1(run(node, commandOf(build, 'seed').slice(1), { env }))
+  for (const step of ['migrate', 'seed']) say1(run(process.execPath, commandOf(build, step), { env }))
   const catcher = await startCatcher(build, { port: mailPort, folder: caughtMailDir })
   stops.push(catcher.stop)
   delete env.DATABASE_OWNER_URL
@@ -72,7 +70,7 @@ async function main() {
   writeFileSync(pidFile, String(process.pid))
   stops.push(() => rmSync(pidFile, { force: true }))
   say(`\nTorquill is at ${baseUrl}   (ready after ${Math.round((Date.now() - began) / 1000)} s; Ctrl-C stops it)\n`)
-  say(run(node, commandOf(build, 'sign-ins').slice(1), { env }).trim())
+  say(run(process.execPath, commandOf(build, 'sign-ins'), { env }).trim())
 }
 
 main().catch((error) => {

@@ -25,8 +25,7 @@ export default async function setup(project: TestProject) {
     authSecret: 'a-secret-for-tests-only-0123456789', dataDir, mailPort, build,
   }
   const env = environmentOf({ ...running, smtpUrl: `smtp://127.0.0.1:${mailPort}` })
-  const [node, ...migrate] = commandOf(build, 'migrate')
-  run(node!, migrate, { env: { ...env, DATABASE_OWNER_URL: database.owner } })
+  run(process.execPath, commandOf(build, 'migrate'), { env: { ...env, DATABASE_OWNER_URL: database.owner } })
   const lines: string[] = []
   const services = await startServices(build, env, { port, onLine: (line: string) => {
     lines.push(line)
