@@ -2,7 +2,7 @@ import { createHash, randomUUID } from 'node:crypto'
 import { ENGINE_VERSION } from '#shared/calc/registry'
 import { canonicalJson } from '#shared/note/canonical'
 import { calculationsOf } from '#shared/note/calculations'
-import { applySteps } from '#shared/note/steps'
+import { applySteps, type AppliedSteps } from '#shared/note/steps'
 import type { SaveContent } from '#shared/schemas/notes'
 import { noteChain, recordAct } from '#server/audit/record'
 import type { Issue } from '#server/database/entities/issue'
@@ -21,18 +21,17 @@ const snapshotEvery = 50
 
 const sha256 = (text: string) => createHash('sha256').update(text).digest('hex')
 
-/** The document after the steps, checked against schema and limits. */
+/** The steps applied to the stored document, checked against schema and limits, leading to what the browser shows. */
 function nextDocument(issue: Issue, input: SaveContent) {
-  const before: unknown = JSON.parse(issue.document)
-  const applied = applySteps(before, input.steps)
+  const applied = applySteps(JSON.parse(issue.document), input.steps)
   if (!applied.ok) throw new DomainError('invalid-document', applied.message, { details: { code: applied.code } })
   const hash = sha256(applied.canonical)
   if (hash !== input.docHash) throw new DomainError('invalid-document', 'The steps do not lead to the document your browser shows. Copy your last words and load the page again.', { details: { code: 'hash-differs' } })
-  return { before, document: applied.canonical, hash }
+  return { applied, hash }
 }
 
-function recompute(issue: Issue, before: unknown, document: string) {
-  return evaluateDocument(calculationsOf(JSON.parse(document)), {
+function recompute(issue: Issue, { before, doc }: AppliedSteps) {
+  return evaluateDocument(calculationsOf(doc), {
     calculations: calculationsOf(before), results: JSON.parse(issue.results) as Results, engineVersion: issue.engineVersion,
   })
 }
@@ -55,22 +54,22 @@ export async function saveNote(context: CommandContext, issueId: string, input: 
     await requireAbility(inside, issue, ['write'])
     await takePen(inside, issue)
     await refuseConflict(inside, issue, input.baseSave)
-    const { before, document, hash } = nextDocument(issue, input)
-    const { results, changed } = recompute(issue, before, document)
+    const { applied, hash } = nextDocument(issue, input)
+    const { results, changed } = recompute(issue, applied)
     const number = issue.saveNumber + 1
     const old = { save: issue.saveNumber, documentHash: issue.documentHash }
     em.create(SaveSchema, {
       id: randomUUID(), issue, number, author: actor, at: clock(), steps: JSON.stringify(input.steps),
-      snapshot: number % snapshotEvery === 0 ? document : null, documentHash: hash, changedResults: canonicalJson(changed),
+      snapshot: number % snapshotEvery === 0 ? applied.canonical : null, documentHash: hash, changedResults: canonicalJson(changed),
       engineVersion: ENGINE_VERSION, label: null, idempotencyKey: input.key,
     })
     Object.assign(issue, {
-      document, documentHash: hash, results: canonicalJson(results), engineVersion: ENGINE_VERSION, saveNumber: number,
+      document: applied.canonical, documentHash: hash, results: canonicalJson(results), engineVersion: ENGINE_VERSION, saveNumber: number,
       savedAt: clock(), savedBy: actor, lastChangeAt: clock(), ...summaryOf(results),
     })
     await em.flush()
     await addPart(inside, issue, 'contributor')
-    await mapRemarks(inside, issue, before, input.steps)
+    await mapRemarks(inside, issue, applied)
     await recordAct(inside, { ...name, old, new: { save: number, documentHash: hash, recomputed: Object.keys(changed) } })
     return issue
   })

@@ -1,17 +1,17 @@
 import type { Evaluation } from '#shared/calc/types'
 import { ENGINE_VERSION, evaluateCalculation } from '#shared/calc/registry'
 import { canonicalJson } from '#shared/note/canonical'
-import type { CalculationInDocument } from '#shared/note/calculations'
+import type { NoteCalculation } from '#shared/note/calculations'
 
 export type Results = Record<string, Evaluation>
 
-interface Before { calculations: CalculationInDocument[], results: Results, engineVersion: string }
+interface Before { calculations: NoteCalculation[], results: Results, engineVersion: string }
 
-const sameInputs = (a: CalculationInDocument, b: CalculationInDocument | undefined) =>
+const sameInputs = (a: NoteCalculation, b: NoteCalculation | undefined) =>
   b !== undefined && a.kind === b.kind && a.kindVersion === b.kindVersion && canonicalJson(a.inputs) === canonicalJson(b.inputs)
 
 /** Recomputes the calculations of a document; what has the same inputs under the same engine keeps its result. */
-export function evaluateDocument(calculations: CalculationInDocument[], before?: Before): { results: Results, changed: Results } {
+export function evaluateDocument(calculations: NoteCalculation[], before?: Before): { results: Results, changed: Results } {
   const results: Results = {}
   const changed: Results = {}
   const earlier = new Map(before?.calculations.map(c => [c.id, c]))

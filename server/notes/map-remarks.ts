@@ -1,13 +1,14 @@
 import { mapAnchors } from '#shared/note/anchors'
-import { RemarkSchema } from '#server/database/entities/remark'
+import type { AppliedSteps } from '#shared/note/steps'
 import type { Issue } from '#server/database/entities/issue'
+import { RemarkSchema } from '#server/database/entities/remark'
 import type { CommandContext } from '#server/utils/command-context'
 
 /** Carries the anchors of remarks over the author's steps; what cannot be carried stays as an orphan and is looked for again at each save. */
-export async function mapRemarks({ em }: CommandContext, issue: Issue, before: unknown, steps: Record<string, unknown>[]): Promise<void> {
+export async function mapRemarks({ em }: CommandContext, issue: Issue, applied: AppliedSteps): Promise<void> {
   const remarks = await em.find(RemarkSchema, { issue })
   if (!remarks.length) return
-  const mapped = mapAnchors(remarks.map(r => ({ anchor: r.anchor, state: r.anchorState })), before, steps)
+  const mapped = mapAnchors(remarks.map(r => ({ anchor: r.anchor, state: r.anchorState })), applied.before, applied.steps, applied.doc)
   remarks.forEach((remark, i) => {
     const now = mapped[i]
     if (!now) return
