@@ -1,0 +1,104 @@
+/** Guards on materials and factors: basis, source, temperature, elastic constants, factors in force. */
+import type { Guard } from '#shared/calc/types'
+import { fired } from '#shared/calc/kinds/open-section/guard-catalogue'
+import type { CaseModel, MaterialModel } from '#shared/calc/kinds/open-section/model'
+import { figure } from '#shared/calc/kinds/open-section/say'
+import type { Solution } from '#shared/calc/kinds/open-section/solution'
+
+const HOT_ALUMINIUM = 70
+const USUAL_FACTOR = 1.5
+const FITTING_FACTOR = 1.15
+/** Typed factors are compared a hair below, so that 1.15 is not below 1.15. */
+const HAIR = 1e-12
+
+export function materialGuards(s: Solution): Guard[] {
+  const used = s.model.materials.filter(m => s.model.walls.some(w => w.material === m))
+  return [...used.flatMap(m => [...record(s, m), ...constants(m), ...temperatures(s, m)]), ...factorGuards(s)]
+}
+
+function record(s: Solution, m: MaterialModel): Guard[] {
+  const guards: Guard[] = []
+  const missing = [
+    ...(m.basis === 'none' ? ['a basis'] : []),
+    ...(m.specification.trim() === '' ? ['a specification'] : []),
+    ...(m.source.trim() === '' ? ['a source'] : []),
+    ...(m.edition.trim() === '' ? ['an edition'] : []),
+  ]
+  if (missing.length > 0) guards.push(fired('G-23', { of: m.id, values: { missing: missing.length }, message: `Material ${m.id} has no ${missing.map(w => w.replace(/^an? /, '')).join(', no ')}.` }))
+  const strengths = missingStrengths(s, m)
+  if (strengths.length > 0) {
+    guards.push(fired('G-23', {
+      of: `strength:${m.id}`, title: 'Strength missing', values: { missing: strengths.length },
+      message: `Material ${m.id} has no ${strengths.join(' and no ')}; the margins that need it are not given.`,
+      ask: 'Give the strength with its source.',
+    }))
+  }
+  if (m.basis === 'B' && m.loadPath === 'single') guards.push(fired('G-24', { of: m.id, values: { declared: 1 }, message: `Material ${m.id} has B-basis values and the load path is declared single.` }))
+  if (m.basis === 'S') guards.push(fired('G-25', { of: m.id, values: { declared: 1 }, message: `Material ${m.id} has S-basis values: specification minima whose statistical assurance is unknown.` }))
+  return guards
+}
+
+/** With partial factors the basis may be checked on yield alone. */
+function missingStrengths(s: Solution, m: MaterialModel): string[] {
+  return [
+    ...(m.Fsu === null && !s.model.factors.partial ? ['ultimate shear strength'] : []),
+    ...(m.Fsy === null ? ['yield strength'] : []),
+  ]
+}
+
+function constants(m: MaterialModel): Guard[] {
+  if (m.E === null || m.nu === null) return []
+  const apart = Math.abs(m.G - m.E / (2 * (1 + m.nu))) / m.G
+  if (apart <= 0.03) return []
+  return [fired('G-31', {
+    of: m.id, severity: apart > 0.08 ? 'caution' : 'information', values: { apart },
+    message: `G of material ${m.id} is ${figure(apart * 100)} % away from E / 2(1 + ν); ${apart > 0.08 ? '8' : '3'} % is the limit.`,
+  })]
+}
+
+function temperatures(s: Solution, m: MaterialModel): Guard[] {
+  return s.model.cases.flatMap((c): Guard[] => {
+    const reason = temperatureFault(m, c)
+    return reason === null || !c.temperature
+      ? []
+      : [fired('G-30', { of: `${m.id}:${c.id}`, caseId: c.id, values: { 'T, °C': c.temperature.value }, message: `Case ${c.id} is at ${figure(c.temperature.value)} °C: ${reason}.` })]
+  })
+}
+
+function temperatureFault(m: MaterialModel, c: CaseModel): string | null {
+  const T = c.temperature?.value
+  if (T === undefined) return null
+  const first = m.knockdown[0]?.temperature
+  const last = m.knockdown[m.knockdown.length - 1]?.temperature
+  const from = m.temperatureFrom ?? first ?? null
+  const to = m.temperatureTo ?? last ?? null
+  if (from !== null && T < from - 1e-9) return `below the range of material ${m.id}, which begins at ${figure(from)} °C`
+  if (to !== null && T > to + 1e-9) return `above the range of material ${m.id}, which ends at ${figure(to)} °C`
+  if (m.family === 'aluminium' && T > HOT_ALUMINIUM && (last === undefined || last < T)) return `above ${HOT_ALUMINIUM} °C, where material ${m.id} (aluminium) has no knock-down factor`
+  return null
+}
+
+function factorGuards(s: Solution): Guard[] {
+  const { factors, declarations } = s.model
+  const guards: Guard[] = []
+  if (factors.partial) {
+    if (factors.reason === '') {
+      guards.push(fired('G-35', {
+        of: 'partial', values: { 'factor of safety': factors.ultimate }, title: 'Partial factors without their paragraph',
+        message: `The basis is declared to work with partial factors (${figure(factors.ultimate)} on loads), and its paragraph is not quoted.`,
+      }))
+    }
+  }
+  else {
+    if (factors.ultimate < USUAL_FACTOR - HAIR) guards.push(fired('G-35', { of: 'safety', values: { 'factor of safety': factors.ultimate }, message: `The factor of safety is ${figure(factors.ultimate)}, below ${USUAL_FACTOR}.` }))
+    if (declarations.fitting && factors.special < FITTING_FACTOR - HAIR) guards.push(fired('G-35', { of: 'fitting', values: { 'special factor': factors.special }, message: `The part is declared a fitting and the special factor in force is ${figure(factors.special)}, below ${FITTING_FACTOR}.` }))
+  }
+  const applied = factors.specials.filter(f => f.value > 1)
+  if (applied.length > 1) {
+    guards.push(fired('G-36', {
+      values: Object.fromEntries(applied.map(f => [f.name, f.value])),
+      message: `Two or more special factors are given (${applied.map(f => `${f.name} ${figure(f.value)}`).join(', ')}); the highest, ${figure(factors.special)}, is used.`,
+    }))
+  }
+  return guards
+}

@@ -1,0 +1,16 @@
+import { blankOpenSection } from '#shared/calc/kinds/open-section/blank'
+import { evaluateOpenSection } from '#shared/calc/kinds/open-section/evaluate'
+import { METHOD_REVISION } from '#shared/calc/kinds/open-section/method'
+import { openSectionSchema, type OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import type { CalcKind } from '#shared/calc/types'
+
+/** Open section: straight and arc walls of differing thickness and shear modulus, junctions and branches. */
+export const openSection: CalcKind<OpenSectionInputs> = {
+  kind: 'open-section',
+  version: 1,
+  title: 'Open section',
+  methodRevision: METHOD_REVISION,
+  schema: openSectionSchema,
+  blank: () => blankOpenSection(),
+  evaluate: evaluateOpenSection,
+}

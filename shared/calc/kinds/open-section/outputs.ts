@@ -1,0 +1,164 @@
+/**
+ * Everything a text may be tied to, under keys that stay the same when a calculation is edited:
+ * `J`, `tau:a@L04` (wall a, case L04), `MS:twist@L04`, `Fsu:QM-107`. Values are in engine units.
+ */
+import type { LoadLevel, MarginRow, Output } from '#shared/calc/types'
+import type { CaseSolution, Solution, WagnerState } from '#shared/calc/kinds/open-section/solution'
+import { MODES, type Mode } from '#shared/calc/kinds/open-section/margins'
+import { shownUnits, type ShownUnits } from '#shared/calc/kinds/open-section/shown-units'
+import type { Dimension, UnitId } from '#shared/units/units'
+
+type Extra = Partial<Pick<Output, 'caseId' | 'wall' | 'primary'>>
+
+/** An output, or nothing where the value does not exist. */
+function output(key: string, symbol: string, label: string, value: number | null, dimension: Dimension, unit: UnitId, method: string, extra: Extra = {}): Output[] {
+  return value === null || !Number.isFinite(value) ? [] : [{ key, symbol, label, value, dimension, unit, method, ...extra }]
+}
+
+export function openSectionOutputs(s: Solution): Output[] {
+  const units = shownUnits(s.model)
+  return [
+    ...sectionOutputs(s, units), ...sectorialOutputs(s, units), ...wallOutputs(s, units), ...cornerOutputs(s),
+    ...materialOutputs(s), ...s.cases.flatMap(c => caseOutputs(s, c, units)), ...envelope(s, units), ...marginOutputs(s),
+  ]
+}
+
+function sectionOutputs(s: Solution, u: ShownUnits): Output[] {
+  return [
+    ...output('J', 'J', 'Torsion constant', s.J, 'inertia', u.inertia, '§1.9, §1.10', { primary: true }),
+    ...output('J_plain', 'J_0', 'Torsion constant before end and junction terms', s.Jplain, 'inertia', u.inertia, '§1.9'),
+    ...output('J_bulge', '\\Delta J_b', 'Junction bulges in J', s.bulge, 'inertia', u.inertia, '§1.10'),
+    ...output('J_ends', '\\Delta J_e', 'Free-end terms in J', s.ends, 'inertia', u.inertia, '§1.9'),
+    ...output('GJ', 'GJ', 'Torsional stiffness', s.GJ, 'torsionalStiffness', u.stiffness, '§1.9'),
+    ...output('developed', 'L_d', 'Developed mid-line length', s.developed, 'length', u.length, '§1.9'),
+    ...output('length', 'L', 'Length of the bar', s.model.length?.value ?? null, 'length', s.model.length?.unit ?? u.length, '§5.1'),
+    ...output('twist_allowed', '\\varphi_{a}', 'Twist allowed', s.model.twistAllowed?.value ?? null, 'angle', s.model.twistAllowed?.unit ?? '°', '§7.8'),
+    ...output('f_FS', 'f_{FS}', 'Factor of safety', s.model.factors.ultimate, 'number', '', '§7.1'),
+    ...output('f_sp', 'f_{sp}', 'Special factor in force', s.model.factors.special, 'number', '', '§7.1'),
+  ]
+}
+
+function sectorialOutputs(s: Solution, u: ShownUnits): Output[] {
+  const p = s.sectorial
+  if (!p) return []
+  const m = '§3.1'
+  return [
+    ...output('A', 'A', 'Area', p.A, 'area', u.area, m),
+    ...output('x_C', 'x_C', 'Centroid, x', p.centroid.x, 'length', u.length, m),
+    ...output('y_C', 'y_C', 'Centroid, y', p.centroid.y, 'length', u.length, m),
+    ...output('Ixx', 'I_{xx}', 'Second moment about the centroidal x axis', p.Ixx, 'inertia', u.inertia, m),
+    ...output('Iyy', 'I_{yy}', 'Second moment about the centroidal y axis', p.Iyy, 'inertia', u.inertia, m),
+    ...output('Ixy', 'I_{xy}', 'Product moment about the centroid', p.Ixy, 'inertia', u.inertia, m),
+    ...output('x_S', 'x_S', 'Shear centre, x', p.shearCentre.x, 'length', u.length, m),
+    ...output('y_S', 'y_S', 'Shear centre, y', p.shearCentre.y, 'length', u.length, m),
+    ...output('Gamma', '\\Gamma', 'Warping constant', p.Gamma, 'warping', u.warping, m),
+    ...output('omega_max', '\\omega_{max}', 'Largest sectorial coordinate', p.omegaMax, 'sectorial', u.area, m),
+    ...output('kL', 'kL', 'Decay parameter times length', s.kL, 'number', '', '§3.6'),
+  ]
+}
+
+function wallOutputs(s: Solution, u: ShownUnits): Output[] {
+  return s.walls.flatMap(({ wall, J, share, slenderness }) => [
+    ...output(`t:${wall.id}`, `t_{${sub(wall.id)}}`, `Thickness, wall ${wall.id}`, wall.t.value, 'length', wall.t.unit, '§1.9', { wall: wall.id }),
+    ...output(`L:${wall.id}`, `L_{${sub(wall.id)}}`, `Mid-line length between nodes, wall ${wall.id}`, wall.length, 'length', u.length, '§1.9', { wall: wall.id }),
+    ...output(`J:${wall.id}`, `J_{${sub(wall.id)}}`, `Part of J, wall ${wall.id}`, J, 'inertia', u.inertia, '§1.9', { wall: wall.id }),
+    ...output(`share:${wall.id}`, `T_{${sub(wall.id)}}/T`, `Torque share, wall ${wall.id}`, share, 'ratio', '%', '§1.9', { wall: wall.id }),
+    ...output(`slenderness:${wall.id}`, `(L/t)_{${sub(wall.id)}}`, `Slenderness, wall ${wall.id}`, slenderness, 'number', '', '§1.9', { wall: wall.id }),
+  ])
+}
+
+function cornerOutputs(s: Solution): Output[] {
+  return s.corners.flatMap(c => c.factor.ok ? output(`Kc:${c.node}`, `K_{c,${sub(c.node)}}`, `Corner factor, node ${c.node}`, c.factor.K, 'number', '', '§1.10') : [])
+}
+
+function materialOutputs(s: Solution): Output[] {
+  return s.model.materials.flatMap((m) => {
+    const strength = (name: 'Fsu' | 'Fsy' | 'Ftu' | 'Fty', index: string, label: string) =>
+      output(`${name}:${m.id}`, `F_{${index}}`, `${label}, ${m.id}`, m[name], 'stress', m.units.strength, '§7.2')
+    return [
+      ...output(`E:${m.id}`, 'E', `Modulus of elasticity, ${m.id}`, m.E, 'stress', m.units.E, '§9'),
+      ...output(`G:${m.id}`, 'G', `Shear modulus, ${m.id}`, m.G, 'stress', m.units.G, '§9'),
+      ...output(`nu:${m.id}`, '\\nu', `Poisson’s ratio, ${m.id}`, m.nu, 'number', '', '§9'),
+      ...strength('Ftu', 'tu', 'Ultimate tension strength'),
+      ...strength('Fty', 'ty', 'Yield strength in tension'),
+      ...strength('Fsu', 'su', 'Ultimate shear strength'),
+      ...strength('Fsy', 'sy', m.FsyGiven ? 'Yield strength in shear' : 'Yield strength in shear, Fty/√3'),
+    ]
+  })
+}
+
+function caseOutputs(s: Solution, c: CaseSolution, u: ShownUnits): Output[] {
+  const id = c.model.id
+  const of = caseLabel(s, c)
+  const extra = { caseId: id }
+  const torque = c.model.torque?.unit ?? u.torque
+  const on = (key: string, symbol: string, label: string, value: number | null, dimension: Dimension, unit: UnitId, method: string, more: Extra = {}) =>
+    output(`${key}@${id}`, symbol, `${label}${of}`, value, dimension, unit, method, { ...extra, ...more })
+  return [
+    ...on('T', 'T', 'Torque', c.torque, 'torque', torque, s.model.by === 'rate' ? '§6' : '§8', { primary: s.cases.length === 1 }),
+    ...on('theta', '\\theta\'', 'Rate of twist', c.rate, 'rateOfTwist', u.rate, s.model.by === 'rate' ? '§6' : '§1.9', { primary: s.cases.length === 1 }),
+    ...on('theta_deg', '\\theta\'', 'Rate of twist', c.rate, 'rateOfTwist', u.rateDegrees, s.model.by === 'rate' ? '§6' : '§1.9'),
+    ...on('twist', '\\varphi', 'Twist over the length', c.twist, 'angle', 'rad', '§5.1'),
+    ...on('twist_deg', '\\varphi', 'Twist over the length', c.twist, 'angle', '°', '§5.1', { primary: s.cases.length === 1 }),
+    ...s.walls.flatMap(w => [
+      ...on(`T:${w.wall.id}`, `T_{${sub(w.wall.id)}}`, `Torque in wall ${w.wall.id}`, c.torque * w.share, 'torque', torque, '§1.9', { wall: w.wall.id }),
+      ...on(`tau:${w.wall.id}`, `\\tau_{${sub(w.wall.id)}}`, `Face stress, wall ${w.wall.id}`, c.tau.get(w.wall.id) ?? null, 'stress', u.stress, '§1.9', { wall: w.wall.id }),
+    ]),
+    ...[...c.corner].flatMap(([node, tau]) => on(`tau_corner:${node}`, `\\tau_{${sub(node)}}`, `Corner stress, node ${node}`, tau, 'stress', u.stress, '§1.10')),
+    ...on('tau_max', '\\tau_{max}', 'Largest face stress', c.tauMax, 'stress', u.stress, '§1.9'),
+    ...on('tau_corner', '\\tau_{c,max}', 'Largest corner stress', c.tauCorner, 'stress', u.stress, '§1.10'),
+    ...wagnerOutputs(c.wagnerLimit, 'limit', '', on),
+    ...wagnerOutputs(c.wagnerUltimate, 'ultimate', '_ultimate', on),
+    ...[...c.knockdown].filter(([, k]) => k !== 1).flatMap(([material, k]) => on(`k:${material}`, 'k', `Knock-down on strength, ${material}`, k, 'number', '', '§7.2')),
+  ]
+}
+
+type OnCase = (key: string, symbol: string, label: string, value: number | null, dimension: Dimension, unit: UnitId, method: string) => Output[]
+
+function wagnerOutputs(w: WagnerState | null, level: LoadLevel, suffix: string, on: OnCase): Output[] {
+  if (!w) return []
+  return [
+    ...on(`wagner${suffix}`, 'r_W', `Wagner ratio at ${level}`, w.ratio, 'number', '', '§7.7'),
+    ...on(`T_wagner${suffix}`, 'T_{nl}', `Torque with the Wagner term at ${level}`, w.torque, 'torque', 'N·mm', '§7.7'),
+  ]
+}
+
+/** Single torques need no case in their label; a case given at ultimate says so. */
+function caseLabel(s: Solution, c: CaseSolution): string {
+  const level = c.model.level === 'ultimate' ? ', given at ultimate' : ''
+  return s.cases.length === 1 && c.model.id === 'T' ? level : `, case ${c.model.id}${level}`
+}
+
+/** Largest of all cases, at the level each was given. */
+function envelope(s: Solution, u: ShownUnits): Output[] {
+  const worst = s.cases.reduce<CaseSolution | null>((top, c) => top === null || c.tauMax > top.tauMax ? c : top, null)
+  if (!worst) return []
+  const corner = s.cases.reduce<CaseSolution | null>((top, c) => c.tauCorner !== null && c.tauCorner > (top?.tauCorner ?? -1) ? c : top, null)
+  return [
+    ...output('tau_max', '\\tau_{max}', `Largest face stress of all cases (${worst.model.id})`, worst.tauMax, 'stress', u.stress, '§1.9', { wall: worst.tauMaxWall, primary: true }),
+    ...output('tau_corner', '\\tau_{c,max}', `Largest corner stress of all cases (${corner?.model.id ?? ''})`, corner?.tauCorner ?? null, 'stress', u.stress, '§1.10', { primary: true }),
+  ]
+}
+
+function marginOutputs(s: Solution): Output[] {
+  const least = new Map<string, MarginRow>()
+  const lower = (key: string, row: MarginRow) => {
+    const held = least.get(key)
+    if (row.rf !== null && (held?.rf === undefined || held.rf === null || row.rf < held.rf)) least.set(key, row)
+  }
+  for (const row of s.margins) {
+    lower(`MS:${row.mode}@${row.caseId}`, row)
+    lower(`MS:${row.mode}`, row)
+    lower(`MS@${row.caseId}`, row)
+  }
+  const rows = [...least].flatMap(([key, row]) => marginOutput(key, row, key.includes('@') ? {} : { primary: true }))
+  return s.governing ? [...rows, ...marginOutput('MS', s.governing, { primary: true })] : rows
+}
+
+function marginOutput(key: string, row: MarginRow, extra: Extra): Output[] {
+  const label = key === 'MS' ? `Least margin (${MODES[row.mode as Mode].label.toLowerCase()}, case ${row.caseId})` : `Margin, ${row.modeLabel.toLowerCase()}, case ${row.caseId}`
+  return output(key, 'MS', label, row.ms, 'margin', '', '§7.3', { caseId: row.caseId, ...(row.wall === undefined ? {} : { wall: row.wall }), ...extra })
+}
+
+/** Names inside TeX indices; ids hold only letters, digits and . _ + / -. */
+export const sub = (id: string): string => `\\text{${id.replaceAll('_', '\\_')}}`

@@ -1,0 +1,47 @@
+import type { LoadingInput, OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import type { CaseModel, FactorModel } from '#shared/calc/kinds/open-section/model'
+import type { TypedReader } from '#shared/calc/kinds/open-section/typed-reader'
+
+/** The id under which results of a single torque stand. */
+export const SINGLE_CASE = 'T'
+
+export function parseCases(loading: LoadingInput, read: TypedReader): CaseModel[] {
+  if (loading.by === 'torque') {
+    const torque = read.number(loading.torque, 'loading.torque', { label: 'the torque', dimension: 'torque', typical: 'torque' })
+    const temperature = read.optional(loading.temperature, 'loading.temperature', { label: 'the temperature', dimension: 'temperature' })
+    return torque ? [{ id: SINGLE_CASE, title: 'Applied torque', source: loading.source, level: loading.level, torque, rate: null, temperature }] : []
+  }
+  if (loading.cases.length === 0) read.fault('loading.cases', 'Add at least one load case.')
+  const ids = new Set<string>()
+  return loading.cases.flatMap((row, i): CaseModel[] => {
+    const at = `loading.cases.${i}`
+    if (ids.has(row.id)) read.fault(`${at}.id`, `Case ${row.id} is listed twice; case names stay unique.`)
+    ids.add(row.id)
+    const temperature = read.optional(row.temperature, `${at}.temperature`, { label: `the temperature of case ${row.id}`, dimension: 'temperature' })
+    const head = { id: row.id, title: row.title, source: row.source, level: row.level, temperature }
+    if ('torque' in row) {
+      const torque = read.number(row.torque, `${at}.torque`, { label: `the torque of case ${row.id}`, dimension: 'torque', typical: 'torque' })
+      return torque ? [{ ...head, torque, rate: null }] : []
+    }
+    const rate = read.number(row.rate, `${at}.rate`, { label: `the rate of twist of case ${row.id}`, dimension: 'rateOfTwist', typical: 'rate' })
+    return rate ? [{ ...head, torque: null, rate }] : []
+  })
+}
+
+const SPECIALS = ['fitting', 'casting', 'bearing'] as const
+
+/** Factors in force: the highest special factor, never a product of two (methods §7.1). */
+export function parseFactors(input: OpenSectionInputs['factors'], read: TypedReader): FactorModel | null {
+  const ultimate = read.positive({ text: input.ultimate, unit: '' }, 'factors.ultimate', { label: 'the factor of safety', dimension: 'ratio' })
+  const specials = SPECIALS.flatMap((name) => {
+    const factor = read.optionalPositive({ text: input[name], unit: '' }, `factors.${name}`, { label: `the ${name} factor`, dimension: 'ratio' })
+    return factor ? [{ name, value: factor.value }] : []
+  })
+  if (ultimate && ultimate.value < 1) read.fault('factors.ultimate', 'The factor of safety must be at least 1.')
+  if (!ultimate) return null
+  const special = Math.max(1, ...specials.map(s => s.value))
+  return {
+    ultimate: ultimate.value, specials, special, specialAtLimit: input.onLimit ? special : 1,
+    onLimit: input.onLimit, divideUltimate: input.divideUltimate, partial: input.partial, reason: input.reason.trim(),
+  }
+}

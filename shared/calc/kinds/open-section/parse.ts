@@ -1,0 +1,48 @@
+/** From typed inputs to numbers in N, mm, MPa, rad, °C; or every fault, each with the path of its field. */
+import type { Fault } from '#shared/calc/types'
+import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import { parseGeometry } from '#shared/calc/kinds/open-section/parse-geometry'
+import { parseCases, parseFactors } from '#shared/calc/kinds/open-section/parse-loading'
+import { parseMaterial } from '#shared/calc/kinds/open-section/parse-material'
+import { openSectionSchema, type OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import { typedReader } from '#shared/calc/kinds/open-section/typed-reader'
+
+export type Parsed = { ok: true, model: OpenSectionModel } | { ok: false, faults: Fault[] }
+
+export function parseOpenSection(value: unknown): Parsed {
+  const checked = openSectionSchema.safeParse(value)
+  if (!checked.success) {
+    return { ok: false, faults: checked.error.issues.slice(0, 50).map(issue => ({ path: issue.path.join('.'), message: issue.message })) }
+  }
+  return parseChecked(checked.data)
+}
+
+function parseChecked(inputs: OpenSectionInputs): Parsed {
+  const read = typedReader()
+  checkMaterialNames(inputs, read.fault)
+  const materials = inputs.materials.flatMap((m, i) => parseMaterial(m, i, read) ?? [])
+  const cases = parseCases(inputs.loading, read)
+  const factors = parseFactors(inputs.factors, read)
+  const length = read.optionalPositive(inputs.length, 'length', { label: 'the length of the bar', dimension: 'length', typical: 'bar length' })
+  const twistAllowed = read.optionalPositive(inputs.twistAllowed, 'twistAllowed', { label: 'the twist allowed', dimension: 'angle', typical: 'twist' })
+  const taper = read.optional(inputs.declarations.taper, 'declarations.taper', { label: 'the half-angle of taper', dimension: 'angle' })
+  const geometry = parseGeometry(inputs, materials, read)
+  if (!geometry || !factors || read.faults.length > 0) return { ok: false, faults: read.faults }
+  return {
+    ok: true,
+    model: {
+      units: inputs.units, ...geometry, materials, by: inputs.loading.by === 'rate' ? 'rate' : 'torque', cases,
+      length, twistAllowed, twistOrigin: inputs.twistOrigin.trim(), factors, ends: inputs.ends,
+      declarations: { ...inputs.declarations, taper: taper?.value ?? null },
+      refused: read.refused, unusual: read.unusual,
+    },
+  }
+}
+
+function checkMaterialNames(inputs: OpenSectionInputs, fault: (path: string, message: string) => void) {
+  const ids = new Set<string>()
+  inputs.materials.forEach((m, i) => {
+    if (ids.has(m.id)) fault(`materials.${i}.id`, `Material ${m.id} is listed twice; keep one record of each name.`)
+    ids.add(m.id)
+  })
+}

@@ -1,0 +1,11 @@
+/** Numbers inside sentences. */
+import type { Solution } from '#shared/calc/kinds/open-section/solution'
+import { significant, showQuantity } from '#shared/units/display'
+
+/** Four significant figures, enough to recognise a value in a sentence. */
+export const figure = (value: number): string => significant(value, 4)
+
+export const degrees = (radians: number): number => radians * 180 / Math.PI
+
+/** A length in the unit system of the calculation. */
+export const lengthShown = (solution: Solution, mm: number): string => showQuantity(mm, 'length', solution.model.units === 'SI' ? 'mm' : 'in')

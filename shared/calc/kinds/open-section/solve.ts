@@ -1,0 +1,154 @@
+/** From the section as numbers to its solution: torsion, sectorial properties, corners, every case. Pure; failures are values. */
+import type { Fault } from '#shared/calc/types'
+import { marginRows } from '#shared/calc/kinds/open-section/margins'
+import type { CaseModel, MaterialModel, ModelWall, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import { cornersOf } from '#shared/calc/kinds/open-section/solve-corners'
+import type { CaseSolution, CornerSolution, Sectorial, Solution, WagnerState, WallSolution } from '#shared/calc/kinds/open-section/solution'
+import { knockDownAt } from '#shared/torsion/allowables'
+import { stripFactor } from '#shared/torsion/corner-factor'
+import { torsionOfOpenSection, type OpenSection, type OpenTorsion } from '#shared/torsion/open-section'
+import { checkSection } from '#shared/torsion/section-check'
+import { sectorialProperties, type SectorialProperties } from '#shared/torsion/sectorial'
+import { wagner } from '#shared/torsion/wagner'
+
+export type Solved = { ok: true, solution: Solution } | { ok: false, faults: Fault[] }
+
+export function solveOpenSection(model: OpenSectionModel): Solved {
+  const section = engineSection(model)
+  const torsion = torsionOfOpenSection(section)
+  if (!torsion.ok) return { ok: false, faults: engineFaults(section, model, torsion.reason) }
+  const walls = wallSolutions(model, torsion)
+  const corners = cornersOf(model, torsion)
+  const properties = sectorialProperties(section)
+  const sectorial = properties.ok ? toSectorial(properties) : null
+  const G = model.walls.every(w => w.G === model.walls[0]?.G) ? model.walls[0]?.G ?? null : null
+  const cases = model.cases.map(c => solveCase(model, c, torsion, walls, corners, properties.ok ? properties : null))
+  const base = {
+    model, G, GJ: torsion.GJ, walls, corners, sectorial, cases,
+    J: sum(walls.map(w => w.J)), Jplain: sum(walls.map(w => w.Jplain)),
+    ...corrections(model, torsion), developed: torsion.developed, kL: decay(model, torsion, sectorial, properties.ok ? properties.referenceE : null),
+  }
+  const { rows, governing } = marginRows(base)
+  return { ok: true, solution: { ...base, margins: rows, governing } }
+}
+
+const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0)
+
+/** The engine takes moduli of elasticity for all walls or for none. */
+function engineSection(model: OpenSectionModel): OpenSection {
+  const withE = model.walls.every(w => w.E !== null)
+  return {
+    nodes: model.nodes,
+    walls: model.walls.map(w => ({
+      id: w.id, from: w.from, to: w.to, t: w.t.value, G: w.G,
+      ...(withE && w.E !== null ? { E: w.E } : {}),
+      ...(w.arc ? { arc: { radius: w.arc.radius, sweep: w.arc.sweep, startDirection: w.arc.direction } } : {}),
+    })),
+    junctions: model.junctions.map(j => ({ node: j.node, radius: j.radius.value, make: j.make })),
+  }
+}
+
+const GUARD_OF_FAULT: Record<string, string> = { 'crossing': 'G-06: ', 'zero-length': 'G-06: ', 'bad-number': 'G-01: ' }
+
+/** The engine's reasons, each at the wall or corner it speaks of. */
+function engineFaults(section: OpenSection, model: OpenSectionModel, reason: string): Fault[] {
+  const check = checkSection(section)
+  if (check.ok) return [{ path: 'walls', message: reason }]
+  return check.faults.map((fault) => {
+    const wall = model.walls.findIndex(w => fault.walls.includes(w.id))
+    const corner = model.junctions.findIndex(j => fault.nodes.includes(j.node))
+    const path = (fault.code === 'bend' || fault.code === 'junction') && corner >= 0 ? `junctions.${corner}.radius` : wall >= 0 ? `walls.${wall}.end` : 'walls'
+    return { path, message: `${GUARD_OF_FAULT[fault.code] ?? ''}${fault.message}` }
+  })
+}
+
+function wallSolutions(model: OpenSectionModel, torsion: OpenTorsion): WallSolution[] {
+  return torsion.perWall.flatMap((w): WallSolution[] => {
+    const wall = model.walls.find(m => m.id === w.id)
+    if (!wall) return []
+    const strip = wall.arc ? stripFactor({ radius: wall.arc.radius, t: wall.t.value }) : null
+    return [{
+      wall, freeEnds: w.freeEnds, cornerEnds: w.cornerEnds, developed: w.developed, effective: w.effective,
+      Jplain: w.plainGJ / w.G, J: w.GJ / w.G, GJ: w.GJ, share: w.share, slenderness: w.slenderness,
+      faceFactor: strip?.ok ? strip.K : 1,
+    }]
+  })
+}
+
+function corrections(model: OpenSectionModel, torsion: OpenTorsion) {
+  const bulges = torsion.bulges.flatMap(({ node, bulge }) => {
+    if (!bulge.ok) return []
+    const through = model.walls.find(w => w.id === bulge.through[0])
+    const abutting = model.walls.find(w => w.id === bulge.abutting)
+    const r = model.junctions.find(j => j.node === node)?.radius.value ?? 0
+    return [{ node, form: bulge.form, alpha: bulge.alpha, D: bulge.D, J: bulge.J, r, t1: through?.t.value ?? 0, t2: abutting?.t.value ?? 0 }]
+  })
+  return {
+    bulges, noBulge: torsion.bulges.flatMap(({ node, bulge }) => bulge.ok ? [] : [{ node, reason: bulge.reason }]),
+    bulge: sum(bulges.map(b => b.J)), endLoss: torsion.endLoss,
+    ends: -sum(torsion.perWall.map(w => torsion.endLoss * w.t ** 4 * (w.freeEnds + w.cornerEnds))),
+  }
+}
+
+function toSectorial(p: SectorialProperties): Sectorial {
+  return {
+    A: p.A, centroid: p.centroid, Ixx: p.Ixx, Iyy: p.Iyy, Ixy: p.Ixy, shearCentre: p.shearCentre,
+    Gamma: p.gamma, GammaPrimary: p.gammaPrimary, GammaSecondary: p.gammaSecondary ?? 0, omegaMax: p.omegaMax,
+  }
+}
+
+/** kL = L √(GJ / EΓ), where all of them are known. */
+function decay(model: OpenSectionModel, torsion: OpenTorsion, sectorial: Sectorial | null, E: number | null): number | null {
+  if (!sectorial || E === null || !model.length || !(sectorial.Gamma > 0)) return null
+  const kL = model.length.value * Math.sqrt(torsion.GJ / (E * sectorial.Gamma))
+  return Number.isFinite(kL) ? kL : null
+}
+
+function solveCase(model: OpenSectionModel, c: CaseModel, torsion: OpenTorsion, walls: WallSolution[], corners: CornerSolution[], p: SectorialProperties | null): CaseSolution {
+  const rate = c.rate ? c.rate.value : (c.torque?.value ?? 0) / torsion.GJ
+  const tau = new Map(walls.map(w => [w.wall.id, flatStress(w.wall, rate) * w.faceFactor]))
+  const corner = new Map(corners.flatMap(k => k.factor.ok ? [[k.node, k.factor.K * flatStress(k.worst, rate)] as const] : []))
+  const [tauMaxWall, tauMax] = largest(tau) ?? ['', 0]
+  const worstCorner = largest(corner)
+  const levels = levelsOf(model, c)
+  return {
+    model: c, torque: c.torque?.value ?? torsion.GJ * rate, rate, twist: model.length ? rate * model.length.value : null, ...levels,
+    tau, corner, tauMax, tauMaxWall, tauCorner: worstCorner?.[1] ?? null, tauCornerNode: worstCorner?.[0] ?? null,
+    knockdown: new Map(model.materials.map(m => [m.id, knockdownOf(m, c)])),
+    wagnerLimit: wagnerAt(torsion, p, rate * levels.toLimit), wagnerUltimate: wagnerAt(torsion, p, rate * levels.toUltimate),
+  }
+}
+
+const flatStress = (wall: ModelWall, rate: number) => wall.G * wall.t.value * Math.abs(rate)
+
+function largest(values: Map<string, number>): [string, number] | null {
+  let best: [string, number] | null = null
+  for (const [key, value] of values) {
+    if (best === null || value > best[1]) best = [key, value]
+  }
+  return best
+}
+
+/** Ultimate loads are not raised again; they are divided for the checks at limit only where the author confirms it (methods §8). */
+function levelsOf(model: OpenSectionModel, c: CaseModel): { toLimit: number, toUltimate: number } {
+  const { ultimate, divideUltimate } = model.factors
+  if (c.level === 'limit') return { toLimit: 1, toUltimate: ultimate }
+  return { toLimit: divideUltimate ? 1 / ultimate : 1, toUltimate: 1 }
+}
+
+/** Beyond the table the nearest point is used and G-30 stops the note. */
+function knockdownOf(m: MaterialModel, c: CaseModel): number {
+  const T = c.temperature?.value
+  const [first, last] = [m.knockdown[0], m.knockdown.at(-1)]
+  if (T === undefined || !first || !last) return 1
+  if (T <= first.temperature) return first.factor
+  if (T >= last.temperature) return last.factor
+  const at = knockDownAt(m.knockdown, T)
+  return at.ok ? at.factor : Math.min(first.factor, last.factor)
+}
+
+function wagnerAt(torsion: OpenTorsion, p: SectorialProperties | null, rate: number): WagnerState | null {
+  if (!p || p.referenceE === null) return null
+  const effect = wagner({ E: p.referenceE, GJ: torsion.GJ, In: p.In, Ips: p.Ips, A: p.weightedArea, rhoMax: p.rhoMax, rate })
+  return effect.ok ? { In: p.In, ratio: effect.ratio, torque: effect.torque, stress: effect.edgeStress } : null
+}

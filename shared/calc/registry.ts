@@ -1,0 +1,53 @@
+/** All calculation kinds. One line per kind; a second registration of a name is a programmer's error. */
+import { openSection } from '#shared/calc/kinds/open-section/kind'
+import type { CalcKind, Evaluation } from '#shared/calc/types'
+
+/** Changes whenever any kind may give another number than before. */
+export const ENGINE_VERSION = '1.0.0'
+/** The methods reference the engine implements. */
+export const METHOD_REVISION = openSection.methodRevision
+
+// Inputs are checked by each kind itself; the registry never looks inside them.
+type AnyKind = CalcKind<unknown>
+
+export interface Registry { kind: (name: string) => AnyKind, has: (name: string) => boolean, names: () => string[] }
+
+/** @throws when a kind is registered twice. */
+export function makeRegistry(kinds: AnyKind[]): Registry {
+  const byName = new Map<string, AnyKind>()
+  for (const entry of kinds) {
+    if (byName.has(entry.kind)) throw new Error(`Calculation kind “${entry.kind}” is registered twice.`)
+    byName.set(entry.kind, entry)
+  }
+  return {
+    kind(name) {
+      const found = byName.get(name)
+      if (!found) throw new Error(`Calculation kind “${name}” is not registered.`)
+      return found
+    },
+    has: name => byName.has(name),
+    names: () => [...byName.keys()],
+  }
+}
+
+const registry = makeRegistry([openSection])
+
+/** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
+export const calcKind = (name: string): AnyKind => registry.kind(name)
+export const isCalcKind = (name: string): boolean => registry.has(name)
+export const calcKindNames = (): string[] => registry.names()
+
+/**
+ * Evaluates one calculation of a document. Never throws: an unknown kind or a newer version than this
+ * engine knows is a fault, and the calculation is shown locked rather than dropped.
+ */
+export function evaluateCalculation(calculation: { kind: string, kindVersion: number, inputs: unknown }): Evaluation {
+  if (!registry.has(calculation.kind)) {
+    return { ok: false, faults: [{ path: 'kind', message: `This version does not know the calculation kind “${calculation.kind.slice(0, 60)}”; it is kept as it is and cannot be changed here.` }] }
+  }
+  const kind = registry.kind(calculation.kind)
+  if (calculation.kindVersion !== kind.version) {
+    return { ok: false, faults: [{ path: 'kindVersion', message: `This calculation was written for version ${calculation.kindVersion} of “${kind.title}”; this engine has version ${kind.version}. It is kept as it is.` }] }
+  }
+  return kind.evaluate(calculation.inputs)
+}
