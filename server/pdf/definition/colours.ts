@@ -1,0 +1,10 @@
+/** The colours of the page, as on the screen by day; a signal is always beside its word. */
+export const INK = '#1C2733'
+export const INK2 = '#424D58'
+export const INK3 = '#5C646C'
+export const HAIR = '#D8D2C4'
+export const ACCENT = '#0E665C'
+export const CAUTION = '#8A5A00'
+export const STOP = '#A3262A'
+export const PASS = '#1E6B3C'
+export const INFORMATION = '#3D5A8A'
