@@ -7,22 +7,20 @@ const rows = (section: string, reason: string, ...texts: string[]): LooseReason[
 export const REASONS: Record<'hat' | 'angle' | 'rail' | 'latch', LooseReason[]> = {
   hat: [
     ...rows('geometry', drawing, '15 mm', '30 mm', '28 mm', '6 mm', '1.2 mm', '3.0 mm', '1.6 mm', '3.2 mm'),
-    ...rows('deflections', 'Limit of the sensor, with its origin in reference 3.', '1.95°'),
+    ...rows('span-analysis', 'Distance between the clips, drawing.', '300 mm'),
     ...rows('sensitivity', 'Least sheet of the drawing, entered in C3.', '1.15 mm', '1.55 mm'),
   ],
   angle: [
     ...rows('description', drawing, '0.06 in'),
     ...rows('geometry', drawing, '2.00 in', '1.55 in', '0.250 in', '0.190 in'),
-    ...rows('deflections', 'Limit of the rod end, drawing note 9.', '3.0°'),
+    ...rows('span-analysis', 'Clamp line to pad, drawing.', '2.40 in'),
     ...rows('sensitivity', 'Fillet of the concession, entered in C2.', '0.160 in'),
   ],
   rail: [
     ...rows('geometry', drawing, '60 mm', '6.0 mm', '140 mm', '5.0 mm', '1800 mm', '900 mm'),
-    ...rows('span-analysis', 'hand value', '2.71°'),
-    ...rows('deflections', 'Limit of the rollers, criteria paragraph 7.', '2.4°'),
+    ...rows('span-analysis', 'hand value', '2.12°'),
   ],
   latch: [
     ...rows('geometry', drawing, '62 mm', '190°', '6.0 mm', '240 mm'),
-    ...rows('deflections', 'Limit of the latch, drawing note 4.', '1.2°'),
   ],
 }

@@ -12,8 +12,9 @@ import { REASONS } from './loose-reasons'
 const only = <T extends { key: string }>(sections: T[], ...keys: string[]): T[] => sections.filter(one => keys.includes(one.key))
 
 const SET_UP = ['scope', 'references', 'description', 'assumptions']
-const DATA = ['geometry', 'materials', 'loads']
-const ANALYSIS = ['section-analysis', 'span-analysis', 'stresses', 'stability', 'deflections']
+// The texts of the data are tied to the calculations, so these come with them.
+const DATA = ['section-analysis', 'geometry', 'materials', 'loads']
+const ANALYSIS = ['span-analysis', 'stresses', 'stability', 'deflections']
 
 export const HAT: DemoNote = {
   project: 'QW-19', counter: 31, number: 'QSN-19-0031', title: 'Flap inner hat stiffener: torsion imposed by the twist of the flap', part: 'QW19-5721-14', drawingIssue: 'C',
@@ -26,7 +27,7 @@ export const HAT: DemoNote = {
         { act: 'save', by: 'ilse', at: '2026-02-23 14:05', sections: only(hatStiffener('A'), ...SET_UP, ...DATA) },
         { act: 'save', by: 'ilse', at: '2026-03-03 09:40', sections: only(hatStiffener('A'), ...SET_UP, ...DATA, ...ANALYSIS), label: 'All cases solved' },
         { act: 'save', by: 'ilse', at: '2026-03-09 15:50', sections: hatStiffener('A') },
-        { act: 'answer', by: 'ilse', at: '2026-03-09 16:02', answers: [] },
+        { act: 'answer', by: 'ilse', at: '2026-03-09 16:02', answers: [{ calc: 'C3', guard: 'G-28', text: 'At this rate of twist the section carries more torque than the linear result says, so for the given torque it twists less: safe side for the alignment. The longitudinal stress that goes with it is below one megapascal.' }] },
         { act: 'explain', by: 'ilse', at: '2026-03-09 16:10', reasons: REASONS.hat },
         { act: 'submit', by: 'ilse', at: '2026-03-09 16:20', checker: 'meera', approver: 'catalina' },
         { act: 'tick', by: 'meera', at: '2026-03-16 10:30', calcs: ['C1', 'C2', 'C3'] },
@@ -83,7 +84,7 @@ export const ANGLE_BRACKET: DemoNote = {
         { calc: '*', guard: 'G-02', text: 'Junction bulge and end corrections are applied, which hold within a tenth of a per cent for equal legs of this shape; the peak is taken from the table of the machined angle and not from the thin wall.' },
         { calc: '*', guard: 'G-11', text: 'Both corrections were applied, and the free ends of the through leg were counted at the corner as well. The sum was repeated by hand from reference 6.' },
         { calc: '*', guard: 'G-27', text: 'Every opening of the door loads the fillet. Fatigue is treated in QSN-19-0069 with the peak stress of this note.' },
-        { calc: '*', guard: 'G-28', text: 'The legs are thick for their width: the longitudinal stress of the twist is small beside the shear, and the torque it would add helps. The linear torque is the safe one for the fillet.' },
+        { calc: '*', guard: 'G-28', text: 'At this rate of twist the section carries more torque than the linear result says, so for the given torque fillet and pad see less. The longitudinal stress is largest at the toes, where the shear is low, and is about a tenth of the tension strength; at the corner it is compression.' },
         { calc: '*', guard: 'G-34', text: 'The allowable is A basis, thickness and fillet are drawing minima, and the governing torque is the measured stall of the actuator. Nothing in the chain is a mean value.' },
       ] },
       { act: 'explain', by: 'tunde', at: '2026-09-30 16:30', reasons: REASONS.angle },
@@ -122,7 +123,7 @@ export const RAIL_NOTE: DemoNote = {
       { act: 'explain', by: 'ilse', at: '2026-09-18 08:50', reasons: REASONS.rail },
       { act: 'submit', by: 'ilse', at: '2026-09-18 09:05', checker: 'noemie', approver: 'catalina' },
       { act: 'remark', remark: {
-        by: 'noemie', at: '2026-09-28 10:05', on: { section: 'span-analysis', quote: '2.71°' },
+        by: 'noemie', at: '2026-09-28 10:05', on: { section: 'span-analysis', quote: '2.12°' },
         text: 'Typed, not tied, and kept with the reason "hand value". The calculation says otherwise: two digits have changed places. Tie it.', replies: [],
       } },
       { act: 'remark', remark: {
@@ -170,7 +171,7 @@ export const LIPPED_CHANNEL: DemoNote = {
     letter: 'A', openedBy: 'noemie', openedAt: '2026-10-05 08:40',
     acts: [
       { act: 'save', by: 'noemie', at: '2026-10-05 11:15', sections: only(lippedChannel(), ...SET_UP, ...DATA) },
-      { act: 'save', by: 'noemie', at: '2026-10-07 16:05', sections: only(lippedChannel(), ...SET_UP, ...DATA, 'section-analysis', 'span-analysis', 'stresses', 'stability') },
+      { act: 'save', by: 'noemie', at: '2026-10-07 16:05', sections: only(lippedChannel(), ...SET_UP, ...DATA, 'span-analysis', 'stresses', 'stability') },
       { act: 'answer', by: 'noemie', at: '2026-10-07 16:20', answers: [{ calc: 'C1', guard: 'G-02', text: 'The end correction is applied to the lips; they carry no load other than their own shear.' }] },
       { act: 'save', by: 'noemie', at: '2026-10-09 15:30', sections: lippedChannel(), label: 'Next stocked sheet tried' },
     ],

@@ -1,14 +1,14 @@
 /** QSN-19-0067: a machined angle in US customary units, waiting for approval. */
 import { calc, notApplicable, ol, p, section, table, ul, type DemoSection } from '../build-document'
-import { BRACKET_CASES } from '../load-cases'
+import { BRACKET_CASES, type DemoCase } from '../load-cases'
 import { QM_103 } from '../materials'
 import { corners, openSection, polyline, torqueCases } from '../open-section-inputs'
 
-const angle = (fillet: string) => openSection({
+const angle = (fillet: string, cases: DemoCase[]) => openSection({
   units: 'US',
   geometry: polyline({ corners: [['2.000', '0.125'], ['0.125', '0.125'], ['0.125', '1.550']], names: ['long leg', 'short leg'], t: '0.250', material: 'QM-103', unit: 'in' }),
   junctions: corners(['2'], fillet, 'machined', 'in'), material: QM_103,
-  loading: torqueCases(BRACKET_CASES, 'lbf·in', '°F'), length: '2.40', twistAllowed: '3.0', twistOrigin: 'Drawing QW19-5231-07 note 9: pad rotation that the rod end tolerates',
+  loading: torqueCases(cases, 'lbf·in', '°F'), length: '2.40', twistAllowed: '3.0', twistOrigin: 'Drawing QW19-5231-07 note 9: pad rotation that the rod end tolerates',
   fitting: '1.15', factorReason: 'QW19-SC-002 issue 2: 1.5 on limit loads; the bracket is a fitting, so 1.15 acts on ultimate and on limit (paragraph 5.3). It is the highest special factor that pertains.',
   repeated: true,
 })
@@ -52,23 +52,23 @@ export function angleBracket(state: 'returned' | 'passed'): DemoSection[] {
       p('The bracket is a fitting within 25.625. The fitting factor is the highest special factor that pertains and multiplies the factor of safety once (25.619); by paragraph 5.3 of the criteria it acts at limit too. The load is repeated at every opening of the door.')),
     section('section-analysis',
       p('The legs are stocky: junction and ends carry a good part of the torsion constant, so both corrections are applied and the corner factor is read from the table of the methods reference.'),
-      calc('C1', 'Angle at drawing minima, fillet as drawn', angle('0.190')),
+      calc('C1', 'Angle at drawing minima, fillet as drawn', angle('0.190', BRACKET_CASES)),
       p('The torsion constant is ⟦C1 J⟧. The fillet carries the peak: its factor on the stress of the flats is ⟦C1 Kc:2⟧. The common rule of thumb for a fillet would give less here and would be unsafe, because it does not know how much the junction fattens.')),
     section('span-analysis',
       p('One torque, one support: the torque is constant from pad to clamp line. K05 carries ⟦C1 T@K05⟧ and K07 carries ⟦C1 T@K07⟧; the clamp returns the same.'),
-      p('The rate of twist of K07 is ⟦C1 theta@K07⟧, which turns the pad by ⟦C1 twist_deg@K07⟧ over ⟦C1 length⟧.')),
+      p('The rate of twist of K07 is ⟦C1 theta@K07⟧, which turns the pad by ⟦C1 twist_deg@K07⟧ over 2.40 in.')),
     section('stresses',
-      p('At limit the flats reach ⟦C1 tau_max@K05⟧ in K05 and the fillet ⟦C1 tau_corner@K05⟧. K07 has ⟦C1 tau_corner@K07⟧ at the fillet, at a temperature where the strength is not reduced. The pin takes the direct shear and the bending of the force, so nothing is added to the torsion at the fillet.')),
+      p('At limit the flats reach ⟦C1 tau_max@K05⟧ in K05 and the fillet ⟦C1 tau_corner@K05⟧. K07 has ⟦C1 tau_corner@K07⟧ at the fillet, at a temperature where the strength is not reduced. So the hot gust K05 governs although K07 has the larger torque. The pin takes the direct shear and the bending of the force, so nothing is added to the torsion at the fillet.')),
     notApplicable('stability', 'The compressed leg is fewer than six thicknesses wide and its stress is shear.'),
     section('deflections',
       p('The rod end of the actuator tolerates a pad rotation of ⟦C1 twist_allowed⟧ (drawing note 9). K07 turns it by ⟦C1 twist_deg@K07⟧ at limit load, a margin of ⟦C1 MS:twist@K07⟧.')),
     section('sensitivity',
-      p('A concession has been asked for a fillet cut to 0.160 in. C2 solves it.'),
-      calc('C2', 'Angle with the fillet of the concession', angle('0.160')),
-      p('The fillet stress of K07 would rise from ⟦C1 tau_corner@K07⟧ to ⟦C2 tau_corner@K07⟧ and the least margin would be ⟦C2 MS:corner-ultimate@K07⟧. A thinner leg is worse: the torsion constant goes with the cube of the thickness. No concession below the drawing minima can be granted on this note.')),
+      p('A concession has been asked for a fillet cut to 0.160 in. C2 solves it for the two cases that lie closest to their limit.'),
+      calc('C2', 'Angle with the fillet of the concession', angle('0.160', BRACKET_CASES.filter(one => ['K05', 'K07'].includes(one.id)))),
+      p('The fillet stress of K05 would rise from ⟦C1 tau_corner@K05⟧ to ⟦C2 tau_corner@K05⟧ and the least margin would be ⟦C2 MS:corner-ultimate@K05⟧. A thinner leg is worse: the torsion constant goes with the cube of the thickness. No concession below the drawing minima can be granted on this note.')),
     section('open-points', p(passed ? 'None. The relief under the toes is in the key characteristics list of the drawing.' : 'None.')),
     section('conclusion',
-      ul('25.305 (b) with 25.303, 25.619 and 25.625: shear at the fillet, ultimate, ⟦C1 MS:corner-ultimate@K07⟧ in K07 and ⟦C1 MS:corner-ultimate@K05⟧ in K05. Met.',
+      ul('25.305 (b) with 25.303, 25.619 and 25.625: shear at the fillet, ultimate, ⟦C1 MS:corner-ultimate@K05⟧ in K05 and ⟦C1 MS:corner-ultimate@K07⟧ in K07. Met.',
         '25.305 (a): yield at the fillet in K07, ⟦C1 MS:corner-yield@K07⟧, and twist, ⟦C1 MS:twist@K07⟧. Met.',
         '25.613: A basis on a single load path, temperature included. Met.'),
       p('The bracket is adequate at drawing minimum dimensions, with little to spare at the fillet.')),

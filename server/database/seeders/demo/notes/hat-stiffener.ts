@@ -96,7 +96,7 @@ const sectionAnalysis = (sheet: Sheet) => section('section-analysis',
 
 const span = () => section('span-analysis',
   p('Where the twist is imposed there is no span to solve: the rate is prescribed at every station. In case S10 the stiffener carries a torque of ⟦C1 T@S10⟧, which it returns to the flap.'),
-  p('In the sensor bay the torque is constant from clip to clip. The largest, W03, turns at ⟦C2 theta@W03⟧ and so twists the bay by ⟦C2 twist_deg@W03⟧ over ⟦C2 length⟧, which is ⟦C2 twist@W03⟧. The torques at the two clips are equal and opposite.'))
+  p('In the sensor bay the torque is constant from clip to clip. The largest, W03, turns at ⟦C2 theta@W03⟧ and so twists the bay by ⟦C2 twist_deg@W03⟧ over 300 mm, which is ⟦C2 twist@W03⟧. The torques at the two clips are equal and opposite.'))
 
 const stresses = () => section('stresses',
   p('The largest shear of the imposed twist occurs in S10: ⟦C1 tau_max@S10⟧ on the flats and ⟦C1 tau_corner@S10⟧ on the inside of the bends. In the sensor bay W03 gives ⟦C2 tau_max@W03⟧ on the flats and ⟦C2 tau_corner@W03⟧ at the bends.'),
@@ -107,7 +107,7 @@ const deflections = (sheet: Sheet) => section('deflections',
   ...(sheet.letter === 'A' ? [] : [p('The larger sensor would have twisted the thinner sheet of issue A beyond its limit; this is one of the two reasons for the thicker sheet.')]))
 
 const sensitivity = (sheet: Sheet) => section('sensitivity',
-  p(`With the least sheet of the drawing, ⟦C3 t:a⟧, the margin of W03 becomes ⟦C3 MS:twist@W03⟧ (C3). Thickness therefore matters: it enters the twist by its cube.`),
+  p(`With the least sheet of the drawing, ${sheet.least} mm, the margin of W03 becomes ⟦C3 MS:twist@W03⟧ (C3). Thickness therefore matters: it enters the twist by its cube.`),
   p('In shear under the imposed twist the tendency is the opposite. There the stress grows with the thickness, because the rate is given and not the torque. Both margins were looked at for this reason.'),
   p('The bend radius moves the developed length a little and the corner factor less. If a clip were lost, the bay would be twice as long and twist twice as much: the clips are on the list of the inspection card.'))
 

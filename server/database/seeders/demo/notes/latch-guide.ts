@@ -19,7 +19,7 @@ export function latchGuide(): DemoSection[] {
     section('references', ol('Drawing QL8-4120-07 issue B.', 'QL8-LDS-012 issue 1, Loader loads, table 4.', 'QM-MD-106 issue 2, material record QM-106.', 'QL8-SC-001 issue 1, Structural criteria of the loader.', 'Torsion methods reference, revision A, paragraphs 1.9 and 1.10.')),
     section('description', p('The guide is a trough rolled from plate, a little more than half a circle, open upwards. The latch runs in it and turns it about its own axis when it strikes the pallet stop. Its feet hold the rotation at one end; the other end is free.'), p('Axes: x and y in the section, z from the feet to the latch. Torque is positive right-handed about z.')),
     section('assumptions', ol('Linear elastic.', 'The two guides of a pair share the torque equally. Reason: they are alike.', 'Warping is free. Reason: common practice.', 'Nominal thickness.')),
-    section('geometry', p('Mid-line radius 62 mm, swept angle 190°, plate 6.0 mm, length ⟦C1 length⟧ from the feet to the latch.')),
+    section('geometry', p('Mid-line radius 62 mm, swept angle 190°, plate 6.0 mm, length 240 mm from the feet to the latch.')),
     section('materials', p('QM-106 issue 2, structural steel S355J2, S basis. Shear yield is taken as the tension yield divided by the square root of three. Demonstration data.')),
     section('loads', p('Four cases at characteristic level. G02, latch against the pallet stop at speed, governs with ⟦C1 T@G02⟧ in each guide.')),
     section('section-analysis', calc('C1', 'Trough rolled from plate', guide()), p('The torsion constant is ⟦C1 J⟧; the inside face of the arc carries a little more than the outside.')),
