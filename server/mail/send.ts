@@ -44,6 +44,8 @@ function contentOf(template: string, props: Record<string, unknown>): MailConten
   return renderMail(template, { ...props, demonstration: environment().demonstration } as unknown as MailProps<MailTemplate>)
 }
 
+const CARRIES_LINK = new Set<string>(['invited', 'forgotten-password'] satisfies MailTemplate[])
+
 export type Delivery = 'sent' | 'already sent' | 'not sent: recipient disabled' | 'unknown'
 
 /**
@@ -61,6 +63,8 @@ export async function deliverMail(em: SqlEntityManager, mailer: Mailer, mailId: 
     if (person.disabledAt) return 'not sent: recipient disabled'
     await mailer.send({ id: mail.id, to: { name: person.name, address: person.email }, content: contentOf(mail.template, mail.props) })
     mail.sentAt = clock()
+    // A one-time link is a key: once it is on its way, the row keeps nothing that opens.
+    if (CARRIES_LINK.has(mail.template)) mail.props = {}
     return 'sent'
   })
 }
