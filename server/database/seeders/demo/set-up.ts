@@ -22,15 +22,15 @@ async function giveEntry(em: EntityManager, clock: () => Date, person: Person, p
   await setPassword(em, clock, tokenOf(link), password)
 }
 
-async function addEverybody(em: EntityManager, clock: () => Date, administrator: Person, password: string): Promise<[PersonKey, Person][]> {
+/** The administrator adds a person every five minutes; each sets a password two hours later. */
+async function addEverybody(em: EntityManager, time: DemoClock, administrator: Person, password: string): Promise<[PersonKey, Person][]> {
   const added: [PersonKey, Person][] = []
-  for (const one of PEOPLE) {
-    if (one.administrator) continue
-    const { email, name, auditor } = one
-    const person = await addPerson({ em, actor: administrator, clock }, { email, name, auditor, administrator: false })
-    await giveEntry(em, clock, person, password)
-    added.push([one.key, person])
+  const moment = (hour: string, index: number) => () => time.at(`${FIRST_DAY} ${hour}:${String(index * 5).padStart(2, '0')}`)
+  for (const [index, { key, email, name, auditor, administrator: chief }] of PEOPLE.entries()) {
+    if (chief) continue
+    added.push([key, await addPerson({ em, actor: administrator, clock: moment('09', index) }, { email, name, auditor, administrator: false })])
   }
+  for (const [index, [, person]] of added.entries()) await giveEntry(em, moment('11', index), person, password)
   return added
 }
 
@@ -61,7 +61,7 @@ export async function setUpCast(em: EntityManager, time: DemoClock, password: st
   const link = await createAdministrator(em, at('08:00'), { email: chief.email, name: chief.name })
   await setPassword(em, at('08:10'), tokenOf(link), password)
   const administrator = await em.fork().findOneOrFail(PersonSchema, { email: chief.email })
-  const people = Object.fromEntries([[chief.key, administrator], ...await addEverybody(em, at('09:00'), administrator, password)]) as Record<PersonKey, Person>
+  const people = Object.fromEntries([[chief.key, administrator], ...await addEverybody(em, time, administrator, password)]) as Record<PersonKey, Person>
   const projects = Object.fromEntries(await addProjects(em, at('10:00'), administrator, people)) as Record<ProjectCode, string>
   return { people, projects }
 }
