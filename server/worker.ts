@@ -17,7 +17,7 @@ import { serverClock } from '#server/utils/clock'
 const { databaseUrl, dataDir, smtpUrl, mailFrom } = environment()
 useQueue(databaseUrl)
 const orm = await connect(databaseUrl)
-const signer = await loadSigner(`${dataDir}/authority`)
+const signer = await loadSigner(`${dataDir}/authority`, serverClock())
 const mailer = openMailer({ smtpUrl, from: mailFrom })
 const boss = new PgBoss({ connectionString: databaseUrl, migrate: false, schedule: false, max: 4 })
 boss.on('error', error => console.error('queue', error.message))

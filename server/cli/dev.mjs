@@ -25,7 +25,7 @@ async function main() {
   const mailPort = await freePort()
   const url = (role, password) => databaseUrl({ role, password, port: pgPort })
   const env = {
-    ...environmentOf({ databaseUrl: url('torquill_app', secrets.appPassword), baseUrl: `http://127.0.0.1:${port}`, authSecret: secrets.authSecret, dataDir, smtpUrl: `smtp://127.0.0.1:${mailPort}`, demonstration: true, caughtMailDir }),
+    ...environmentOf({ databaseUrl: url('torquill_app', secrets.appPassword), baseUrl: `http://127.0.0.1:${port}`, authSecret: secrets.authSecret, dataDir, smtpUrl: `smtp://127.0.0.1:${mailPort}`, demonstration: true, organisation: 'Quellmark Airframe Works', caughtMailDir }),
     NODE_ENV: 'development', DATABASE_OWNER_URL: url('torquill_owner', secrets.ownerPassword), NUXT_TELEMETRY_DISABLED: '1',
   }
   const tsx = (...args) => ['--import', 'tsx', ...args]

@@ -3,7 +3,7 @@ import { join } from 'node:path'
 import { root, start, stop, until } from './shell.mjs'
 
 /** The environment that the server and the worker share. */
-export function environmentOf({ databaseUrl, baseUrl, authSecret, dataDir, smtpUrl, demonstration = false, caughtMailDir, filesUrl }) {
+export function environmentOf({ databaseUrl, baseUrl, authSecret, dataDir, smtpUrl, demonstration = false, organisation, caughtMailDir, filesUrl }) {
   return {
     ...process.env,
     NODE_ENV: 'production',
@@ -15,6 +15,7 @@ export function environmentOf({ databaseUrl, baseUrl, authSecret, dataDir, smtpU
     TORQUILL_DATA_DIR: dataDir,
     SMTP_URL: smtpUrl,
     TORQUILL_DEMONSTRATION: demonstration ? '1' : '0',
+    ...(organisation ? { TORQUILL_ORGANISATION: organisation } : {}),
     ...(caughtMailDir ? { TORQUILL_CAUGHT_MAIL_DIR: caughtMailDir } : {}),
     ...(filesUrl ? { TORQUILL_FILES_URL: filesUrl } : {}),
   }

@@ -53,7 +53,7 @@ async function main() {
   mkdirSync(caughtMailDir, { recursive: true })
   const mailPort = await freePort()
   const env = {
-    ...environmentOf({ databaseUrl: application, baseUrl, authSecret: loadSecrets().authSecret, dataDir, smtpUrl: `smtp://127.0.0.1:${mailPort}`, demonstration: true, caughtMailDir }),
+    ...environmentOf({ databaseUrl: application, baseUrl, authSecret: loadSecrets().authSecret, dataDir, smtpUrl: `smtp://127.0.0.1:${mailPort}`, demonstration: true, organisation: 'Quellmark Airframe Works', caughtMailDir }),
     DATABASE_OWNER_URL: owner,
   }
   const say1 = text => text.trim() && say(text.trim())

@@ -13,6 +13,8 @@ const schema = z.object({
   TORQUILL_FILES_URL: z.string().optional(),
   SMTP_URL: url.default('smtp://127.0.0.1:2525'),
   MAIL_FROM: z.string().default('Torquill <torquill@localhost>'),
+  /** Name of the organisation, at the head of covers. */
+  TORQUILL_ORGANISATION: z.string().max(80).optional(),
   TORQUILL_DEMONSTRATION: z.enum(['0', '1']).default('0'),
   TORQUILL_CAUGHT_MAIL_DIR: z.string().optional(),
 })
@@ -25,6 +27,7 @@ export interface Environment {
   filesUrl: string | null
   smtpUrl: string
   mailFrom: string
+  organisation: string | null
   demonstration: boolean
   caughtMailDir: string | null
 }
@@ -47,6 +50,7 @@ export function environment(): Environment {
     filesUrl: e.TORQUILL_FILES_URL ?? null,
     smtpUrl: e.SMTP_URL,
     mailFrom: e.MAIL_FROM,
+    organisation: e.TORQUILL_ORGANISATION ?? null,
     demonstration: e.TORQUILL_DEMONSTRATION === '1',
     caughtMailDir: e.TORQUILL_CAUGHT_MAIL_DIR ?? null,
   }
