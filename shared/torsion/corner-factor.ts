@@ -8,6 +8,7 @@ import type { MidLine, WallAtNode } from '#shared/torsion/mid-line'
 import { refusal } from '#shared/torsion/section'
 import { smoothTurn, turnBetween } from '#shared/torsion/mid-line'
 import { midLineOf } from '#shared/torsion/section-check'
+import { bendFactor } from '#shared/torsion/bend-factor'
 import { machinedCornerTable } from '#shared/torsion/published'
 
 export interface CornerValue {
@@ -27,26 +28,6 @@ export interface Corner { readonly node: string, readonly walls: readonly string
 export const rightAngleWithin = Math.PI / 360
 /** Thicknesses count as equal within this part. */
 const equalWithin = 1e-6
-
-/**
- * Exact for a long circular strip of inside radius `inside` and thickness t;
- * high, hence safe, for a bend of limited angle.
- */
-export function bendFactor(inside: number, t: number): number | null {
-  if (!(inside > 0 && t > 0)) return null
-  const x = t / inside
-  // (1 + x/2)/ln(1 + x) − 1, over x; by its series where the logarithm would cancel.
-  const K = x < 1e-4 ? 1 + x / 6 - x * x / 12 : ((x + x * x / 2) / Math.log1p(x) - 1) / x
-  return Number.isFinite(K) ? K : null
-}
-
-export type StripFactor = { readonly ok: true, readonly K: number } | Refusal
-
-/** The same factor on the inner face of an arc wall, by its mid-line radius. */
-export function stripFactor({ radius, t }: { readonly radius: number, readonly t: number }): StripFactor {
-  const K = bendFactor(radius - t / 2, t)
-  return K === null ? refusal('The mid-line radius of the arc must be more than half its thickness.') : { ok: true, K }
-}
 
 /**
  * Between the points of the table: the lesser of the chord in (r/t, K) and the

@@ -5,6 +5,7 @@
 import type { OpenTorsion } from '#shared/torsion/open-section'
 import type { Refusal } from '#shared/torsion/section'
 import { refusal } from '#shared/torsion/section'
+import { faceStress } from '#shared/torsion/wall-stiffness'
 
 export interface WallResponse {
   readonly id: string
@@ -23,9 +24,6 @@ export interface SectionResponse {
   /** The first wall that has it. */
   readonly tauMaxWall: string
 }
-
-/** Face stress of a wall, MPa. */
-export const faceStress = (G: number, t: number, rate: number): number => G * t * Math.abs(rate)
 
 /** θ′ = T/(GJ) */
 export function respondToTorque(torsion: OpenTorsion, torque: number): SectionResponse | Refusal {

@@ -10,7 +10,8 @@ import type { Station, WalkedPiece } from '#shared/torsion/stations'
 import { refusal } from '#shared/torsion/section'
 import { directionOf, distance, pathEnd, pathLength, pathPoint, pathStart } from '#shared/torsion/geometry'
 import { midLineOf } from '#shared/torsion/section-check'
-import { sectorialGrowth, sectorialTurns, stationsOf, walk } from '#shared/torsion/stations'
+import { sectorialGrowth, sectorialTurns } from '#shared/torsion/sectorial-growth'
+import { stationsOf, walk } from '#shared/torsion/stations'
 
 export interface SectorialProperties {
   readonly ok: true

@@ -5,9 +5,10 @@
  * no arc is replaced by chords.
  */
 import type { Point } from '#shared/torsion/section'
-import type { ArcPath, WallPath } from '#shared/torsion/geometry'
+import type { WallPath } from '#shared/torsion/geometry'
 import type { Piece } from '#shared/torsion/mid-line'
-import { arcPoint, pathLength, pathPoint, pathStart } from '#shared/torsion/geometry'
+import { pathLength, pathPoint } from '#shared/torsion/geometry'
+import { sectorialGrowth } from '#shared/torsion/sectorial-growth'
 
 /** Abscissas and weights of the eight-point rule on (−1, 1); symmetric, so half is listed. Standard tables, checked by the test of the rule. */
 const gauss: readonly (readonly [number, number])[] = [
@@ -22,31 +23,6 @@ export function rulePoints(path: WallPath): { part: number, weight: number }[] {
   const count = path.kind === 'line' ? 1 : Math.max(1, Math.ceil(Math.abs(path.sweep) / panel))
   return Array.from({ length: count }, (_, index) => index).flatMap(index =>
     gauss.flatMap(([x, w]) => [-x, x].map(at => ({ part: (index + (1 + at) / 2) / count, weight: w / 2 / count }))))
-}
-
-/** Growth of the sectorial coordinate ∫(x dy − y dx) from the start of a piece to `part` of it, pole at `pole`. */
-export function sectorialGrowth(path: WallPath, pole: Point, part: number): number {
-  const start = pathStart(path)
-  if (path.kind === 'line') {
-    const end = pathPoint(path, part)
-    return (start.x - pole.x) * (end.y - start.y) - (start.y - pole.y) * (end.x - start.x)
-  }
-  const { centre, radius, startAngle, sweep } = path
-  const end = startAngle + part * sweep
-  return radius * ((centre.x - pole.x) * (Math.sin(end) - Math.sin(startAngle)) - (centre.y - pole.y) * (Math.cos(end) - Math.cos(startAngle)))
-    + radius * radius * part * sweep
-}
-
-/** Parts of an arc at which the sectorial coordinate about `pole` stops growing: its extremes inside the arc. */
-export function sectorialTurns({ centre, radius, startAngle, sweep }: ArcPath, pole: Point): number[] {
-  const [a, b] = [centre.x - pole.x, centre.y - pole.y]
-  const reach = Math.hypot(a, b)
-  if (reach <= radius) return []
-  const [towards, open] = [Math.atan2(b, a), Math.acos(-radius / reach)]
-  const full = 2 * Math.PI
-  return [towards + open, towards - open]
-    .map(angle => ((Math.sign(sweep) * (angle - startAngle)) % full + full) % full / Math.abs(sweep))
-    .filter(part => part < 1)
 }
 
 /** One integration point: where, how much area it stands for, and ω about the first pole. */
@@ -87,7 +63,7 @@ export function stationsOf(walked: readonly WalkedPiece[], pole: Point, weigh: (
     const { path, t } = piece
     const area = pathLength(path) * t * weigh(piece)
     return rulePoints(path).map(({ part, weight }) => ({
-      ...(path.kind === 'arc' ? arcPoint(path, part) : pathPoint(path, part)),
+      ...pathPoint(path, part),
       area: area * weight, omega: startOmega + sectorialGrowth(path, pole, part), piece, t,
     }))
   })

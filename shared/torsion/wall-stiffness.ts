@@ -1,4 +1,4 @@
-/** The stiffness of one thin wall of an open section (methods reference §1.9, §1.10). N·mm². */
+/** One thin wall of an open section: its stiffness and its stress (methods reference §1.9, §1.10). N·mm², MPa. */
 import { freeEndLoss, junctionEndLoss } from '#shared/torsion/published'
 
 export interface WallStiffnessInput {
@@ -29,3 +29,6 @@ export function wallStiffness({ G, t, developed, effective, ends, junctions }: W
   const perLength = G * t ** 3 / 3
   return { plainGJ: perLength * developed, lengthTerm: perLength * (effective - developed), endTerm: -G * endLossOf(junctions) * t ** 4 * ends }
 }
+
+/** Stress on both faces of a flat wall, G·t·|θ′|. */
+export const faceStress = (G: number, t: number, rate: number): number => G * t * Math.abs(rate)

@@ -1,0 +1,27 @@
+/** The engine as the reference rows use it: one object, so that a test can load it with a fault put into one of its parts. */
+// Modules load one after another: side by side, a replaced module may be passed over.
+export async function loadEngine() {
+  const units = await import('#shared/units/units')
+  const display = await import('#shared/units/display')
+  const open = await import('#shared/torsion/open-section')
+  const response = await import('#shared/torsion/response')
+  const wall = await import('#shared/torsion/wall-stiffness')
+  const sectorial = await import('#shared/torsion/sectorial')
+  const corner = await import('#shared/torsion/corner-factor')
+  const bend = await import('#shared/torsion/bend-factor')
+  const junction = await import('#shared/torsion/junction-formula')
+  const wagner = await import('#shared/torsion/wagner')
+  const margins = await import('#shared/torsion/margins')
+  const factors = await import('#shared/torsion/factors')
+  const allowables = await import('#shared/torsion/allowables')
+  const warping = await import('#shared/torsion/warping-length')
+  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping }
+}
+
+export type Engine = Awaited<ReturnType<typeof loadEngine>>
+
+/** The value, or an error that names the reason: a reference row never compares a refusal. */
+export function given<T extends { ok: boolean }>(result: T): Extract<T, { ok: true }> {
+  if (!result.ok) throw new Error(`Refused: ${JSON.stringify(result)}`)
+  return result as Extract<T, { ok: true }>
+}

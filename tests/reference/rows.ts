@@ -1,0 +1,8 @@
+/** All reference rows the engine is held to. */
+import type { ReferenceRow } from './row'
+import { programRows } from './program-rows'
+import { sectorialRows } from './sectorial-rows'
+import { torsionRows } from './torsion-rows'
+import { unitRows } from './unit-rows'
+
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...sectorialRows, ...programRows, ...unitRows]
