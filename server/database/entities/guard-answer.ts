@@ -1,18 +1,9 @@
 import { defineEntity, type InferEntity } from '@mikro-orm/core'
+import type { GuardFacts } from '#shared/calc/lapse'
 import { IssueSchema } from './issue'
 import { PersonSchema } from './person'
 
-/** The facts a guard was answered at: the answer lapses when they move. */
-export interface GuardFacts {
-  severity: string
-  values: Record<string, number>
-  wall: string | null
-  caseId: string | null
-  message: string
-  methodRevision: string
-}
-
-/** An analyst's answer to a caution, or deviation to a marked stop. One current row per issue, calculation and guard. */
+/** An analyst's answer to a caution, or deviation to a marked stop. One current row per issue, calculation and guard; earlier wordings stand in the trail. */
 export const GuardAnswerSchema = defineEntity({
   name: 'GuardAnswer',
   properties: p => ({
@@ -22,6 +13,7 @@ export const GuardAnswerSchema = defineEntity({
     guardKey: p.text(),
     kind: p.text().$type<'answer' | 'deviation'>(),
     text: p.text(),
+    /** The condition it was given at: the answer lapses when it moves. */
     facts: p.json<GuardFacts>(),
     author: () => p.manyToOne(PersonSchema),
     at: p.datetime(),
