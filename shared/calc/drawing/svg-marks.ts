@@ -3,6 +3,7 @@ import { arrowhead, at, n, polygon, segment, text, textWidth, unit, type Canvas,
 import type { Shape } from '#shared/calc/types'
 
 type Of<T extends Shape['type']> = Extract<Shape, { type: T }>
+interface Spot { at: readonly [number, number] }
 
 export function drawMark(canvas: Canvas, shape: Shape): string {
   switch (shape.type) {
@@ -81,7 +82,7 @@ function dimensionText(canvas: Canvas, middle: Pixel, along: Pixel, value: strin
   return text(canvas, place, value, { anchor: 'middle', ground: true, rotate: Math.abs(angle) < 1e-6 ? 0 : angle })
 }
 
-function drawCentroid(canvas: Canvas, shape: Of<'centroid'>): string {
+function drawCentroid(canvas: Canvas, shape: Spot): string {
   const [x, y] = canvas.px(shape.at)
   const { ink, paper } = canvas.palette
   return `<circle cx="${n(x)}" cy="${n(y)}" r="5" fill="${paper}" stroke="${ink}" stroke-width=".9"/>`
@@ -89,7 +90,7 @@ function drawCentroid(canvas: Canvas, shape: Of<'centroid'>): string {
     + text(canvas, [x + 9, y + 12], 'C', { ground: true })
 }
 
-function drawShearCentre(canvas: Canvas, shape: Of<'shear-centre'>): string {
+function drawShearCentre(canvas: Canvas, shape: Spot): string {
   const [x, y] = canvas.px(shape.at)
   const { ink } = canvas.palette
   return `<circle cx="${n(x)}" cy="${n(y)}" r="3.6" fill="none" stroke="${ink}" stroke-width=".9"/>`

@@ -1,4 +1,122 @@
-import type { Drawing } from '#shared/calc/types'
-import type { Solution } from '#shared/calc/kinds/open-section/solution'
+/** The section to scale: walls with their stress, names, dimensions, centroid, shear centre, torque and peak. */
+import type { Drawing, Shape } from '#shared/calc/types'
+import { decisiveCases } from '#shared/calc/kinds/open-section/working-cases'
+import { shownUnits } from '#shared/calc/kinds/open-section/shown-units'
+import { axes, balloons, dimensions, flowArrows, middleOf, outerSide, thicknessNotes, type Room } from '#shared/calc/kinds/open-section/sketch-marks'
+import { filletShapes, midLine, polar, wallShapes, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
+import type { CaseSolution, Solution } from '#shared/calc/kinds/open-section/solution'
+import { significant, showQuantity } from '#shared/units/display'
+import { fromEngine } from '#shared/units/units'
 
-export const openSectionSketch = (_: Solution): Drawing | null => null
+/** Pixels of the picture at its nominal size, and of the section inside it. */
+const PICTURE = 470
+const SECTION = { width: 290, height: 190 }
+const MOST_NAMED = 12
+
+export function openSectionSketch(s: Solution): Drawing | null {
+  const extent = extentOf(s)
+  const [width, height] = [extent.max[0] - extent.min[0], extent.max[1] - extent.min[1]]
+  const size = Math.max(width, height)
+  if (!(size > 0)) return null
+  const pixel = 1 / Math.min(SECTION.width / Math.max(width, size * 0.05), SECTION.height / Math.max(height, size * 0.05))
+  const shown = decisiveCases(s)[0] ?? null
+  const level = (wall: string) => shown && shown.tauMax > 0 ? Math.min((shown.tau.get(wall) ?? 0) / shown.tauMax, 1) : 0
+  const room: Room = { pixel, centre: [(extent.min[0] + extent.max[0]) / 2, (extent.min[1] + extent.max[1]) / 2], taken: [] }
+  const centres = centreMarks(s, room, shown)
+  const peak = shown ? peakMark(s, shown, room) : []
+  const shapes: Shape[] = [
+    ...wallShapes(s, level), ...filletShapes(s, level), ...dimensions(s, room, extent), ...flowArrows(s, room), ...centres, ...peak,
+    ...thicknessNotes(s, room), ...balloons(s, room),
+  ]
+  const unit = shownUnits(s.model).stress
+  return {
+    shapes, box: boxOf(shapes, pixel), alt: altText(s, shown),
+    ...(shown && shown.tauMax > 0 ? { ramp: { max: shown.tauMax, unit, label: `Shear stress at the faces, ${caseName(s, shown)}` } } : {}),
+  }
+}
+
+function extentOf(s: Solution): { min: Pt, max: Pt } {
+  const points = s.walls.flatMap(({ wall }) => midLine(s, wall).map(st => st.at))
+  const of = (pick: (...v: number[]) => number, axis: 0 | 1) => pick(...points.map(p => p[axis]))
+  return { min: [of(Math.min, 0), of(Math.min, 1)], max: [of(Math.max, 0), of(Math.max, 1)] }
+}
+
+function caseName(s: Solution, c: CaseSolution): string {
+  return c.model.id === 'T' && s.cases.length === 1 ? `given at ${c.model.level}` : `case ${c.model.id}, given at ${c.model.level}`
+}
+
+/** Centroid with the axes, shear centre, and the torque about it. */
+function centreMarks(s: Solution, room: Room, shown: CaseSolution | null): Shape[] {
+  const p = s.sectorial
+  if (!p) return []
+  const [C, S]: [Pt, Pt] = [[p.centroid.x, p.centroid.y], [p.shearCentre.x, p.shearCentre.y]]
+  room.taken.push({ at: C, radius: 12 * room.pixel }, { at: S, radius: 12 * room.pixel }, { at: polar(C, Math.PI / 4, 20 * room.pixel), radius: 20 * room.pixel })
+  const unit = shown?.model.torque?.unit ?? shownUnits(s.model).torque
+  const torque: Shape[] = shown
+    ? [{ type: 'torque', at: S, radius: 40 * room.pixel, text: `T ${showQuantity(shown.torque, 'torque', unit)}` }]
+    : []
+  for (const angle of [35, 60, 90, 120, 145]) room.taken.push({ at: polar(S, angle * Math.PI / 180, 40 * room.pixel), radius: 8 * room.pixel })
+  return [...torque, ...axes(C, room), { type: 'centroid', at: C }, { type: 'shear-centre', at: S }]
+}
+
+/** The highest stress of the case shown: at a corner where its factor makes it the largest, else on the outer face of its wall. */
+function peakMark(s: Solution, c: CaseSolution, room: Room): Shape[] {
+  if (!(c.tauMax > 0)) return []
+  const unit = shownUnits(s.model).stress
+  const say = (tau: number) => `${significant(fromEngine(tau, unit), 3)}\u2009${unit} peak`
+  const corner = c.tauCorner !== null && c.tauCorner > c.tauMax ? s.model.nodes.find(n => n.id === c.tauCornerNode) : undefined
+  if (corner && c.tauCorner !== null) {
+    const at: Pt = [corner.x, corner.y]
+    room.taken.push({ at, radius: 22 * room.pixel })
+    return [{ type: 'peak', at, text: say(c.tauCorner) }]
+  }
+  const wall = s.walls.find(w => w.wall.id === c.tauMaxWall)?.wall
+  if (!wall) return []
+  const m = middleOf(s, wall, 0.75)
+  const at = polar(m.at, m.direction + outerSide(m, room.centre) * Math.PI / 2, m.half)
+  room.taken.push({ at, radius: 22 * room.pixel })
+  return [{ type: 'peak', at, text: say(c.tauMax) }]
+}
+
+/** Everything that is drawn, with room for its lettering, at least as wide as the nominal picture. */
+function boxOf(shapes: Shape[], pixel: number): Drawing['box'] {
+  const points = shapes.flatMap(shape => reachOf(shape, pixel))
+  const xs = points.map(p => p[0])
+  const ys = points.map(p => p[1])
+  const pad = 8 * pixel
+  const [left, right] = [Math.min(...xs) - pad, Math.max(...xs) + pad]
+  const [bottom, top] = [Math.min(...ys) - pad, Math.max(...ys) + pad]
+  const width = Math.max(right - left, PICTURE * pixel)
+  return { x: (left + right - width) / 2, y: bottom, width, height: top - bottom }
+}
+
+const around = ([x, y]: Pt, dx: number, dy = dx): Pt[] => [[x - dx, y - dy], [x + dx, y + dy]]
+
+function reachOf(shape: Shape, p: number): Pt[] {
+  switch (shape.type) {
+    case 'path': return shape.points
+    case 'line': return [shape.from, shape.to]
+    case 'label': return around(shape.at, 4 * p + shape.text.length * 3 * p, 10 * p)
+    case 'balloon': return around(shape.at, 11 * p)
+    case 'dimension': {
+      const along = Math.atan2(shape.to[1] - shape.from[1], shape.to[0] - shape.from[0])
+      const out = shape.offset + Math.sign(shape.offset) * 6 * p
+      return [shape.from, shape.to].flatMap(end => around(polar(end, along + Math.PI / 2, out), 12 * p))
+    }
+    case 'centroid': case 'shear-centre': return around(shape.at, 18 * p)
+    case 'peak': return around(shape.at, 34 * p, 44 * p)
+    case 'torque': return [...around(shape.at, Math.max(shape.radius, shape.text.length * 3.2 * p), 0), [shape.at[0], shape.at[1] + shape.radius + 24 * p]]
+  }
+}
+
+function altText(s: Solution, c: CaseSolution | null): string {
+  const unit = shownUnits(s.model)
+  const named = s.walls.slice(0, MOST_NAMED).map(({ wall }) => `${wall.id}${wall.name.trim() === '' ? '' : ` ${wall.name.trim()}`} ${showQuantity(wall.length, 'length', unit.length)} by ${wall.t.typed}${wall.arc ? ' arc' : ''}`)
+  const more = s.walls.length > MOST_NAMED ? `, and ${s.walls.length - MOST_NAMED} more` : ''
+  const walls = `Open section to scale with ${s.walls.length} ${s.walls.length === 1 ? 'wall' : 'walls'}: ${named.join('; ')}${more}.`
+  const at = (p: { x: number, y: number }) => `x ${showQuantity(p.x, 'length', unit.length)}, y ${showQuantity(p.y, 'length', unit.length)}`
+  const centres = s.sectorial ? ` Centroid at ${at(s.sectorial.centroid)}; shear centre at ${at(s.sectorial.shearCentre)}.` : ''
+  if (!c) return walls + centres
+  const corner = c.tauCorner !== null && c.tauCorner > c.tauMax ? `, and ${showQuantity(c.tauCorner, 'stress', unit.stress)} at corner ${c.tauCornerNode ?? ''}` : ''
+  return `${walls}${centres} ${caseName(s, c).replace(/^./, l => l.toUpperCase())}: shear zero on the mid-line and ${showQuantity(c.tauMax, 'stress', unit.stress)} at the faces of wall ${c.tauMaxWall}${corner}.`
+}

@@ -48,6 +48,9 @@ export interface Sectorial {
   GammaPrimary: number
   GammaSecondary: number
   omegaMax: number
+  /** The modulus that the warping constant is referred to, where moduli are given. */
+  E: number | null
+  In: number
 }
 
 export interface WagnerState { In: number, ratio: number, torque: number, stress: number | null }

@@ -5,7 +5,7 @@ import type { CaseModel, MaterialModel, ModelWall, OpenSectionModel } from '#sha
 import { cornersOf } from '#shared/calc/kinds/open-section/solve-corners'
 import type { CaseSolution, CornerSolution, Sectorial, Solution, WagnerState, WallSolution } from '#shared/calc/kinds/open-section/solution'
 import { knockDownAt } from '#shared/torsion/allowables'
-import { stripFactor } from '#shared/torsion/corner-factor'
+import { stripFactor } from '#shared/torsion/bend-factor'
 import { torsionOfOpenSection, type OpenSection, type OpenTorsion } from '#shared/torsion/open-section'
 import { checkSection } from '#shared/torsion/section-check'
 import { sectorialProperties, type SectorialProperties } from '#shared/torsion/sectorial'
@@ -90,10 +90,15 @@ function corrections(model: OpenSectionModel, torsion: OpenTorsion) {
   }
 }
 
+/** What symmetry makes zero and arithmetic leaves at 1e-15 is shown as zero. */
 function toSectorial(p: SectorialProperties): Sectorial {
+  const size = p.rhoMax + Math.abs(p.centroid.x) + Math.abs(p.centroid.y)
+  const settle = (value: number, scale: number) => Math.abs(value) < 1e-11 * scale ? 0 : value
+  const point = ({ x, y }: { x: number, y: number }) => ({ x: settle(x, size), y: settle(y, size) })
+  const I = p.Ixx + p.Iyy
   return {
-    A: p.A, centroid: p.centroid, Ixx: p.Ixx, Iyy: p.Iyy, Ixy: p.Ixy, shearCentre: p.shearCentre,
-    Gamma: p.gamma, GammaPrimary: p.gammaPrimary, GammaSecondary: p.gammaSecondary ?? 0, omegaMax: p.omegaMax,
+    A: p.A, centroid: point(p.centroid), Ixx: settle(p.Ixx, I), Iyy: settle(p.Iyy, I), Ixy: settle(p.Ixy, I), shearCentre: point(p.shearCentre),
+    Gamma: p.gamma, GammaPrimary: p.gammaPrimary, GammaSecondary: p.gammaSecondary ?? 0, omegaMax: p.omegaMax, E: p.referenceE, In: p.In,
   }
 }
 

@@ -1,0 +1,122 @@
+/** Balloons, dimensions, arrows and flags around the walls, placed where they hide nothing. */
+import type { Shape } from '#shared/calc/types'
+import type { ModelWall } from '#shared/calc/kinds/open-section/model'
+import { shownUnits } from '#shared/calc/kinds/open-section/shown-units'
+import { midLine, polar, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
+import type { Solution } from '#shared/calc/kinds/open-section/solution'
+import { significant } from '#shared/units/display'
+import { fromEngine } from '#shared/units/units'
+
+/** Section space as the sketch sees it: millimetres per pixel at nominal size, and what is already taken. */
+export interface Room { pixel: number, centre: Pt, taken: { at: Pt, radius: number }[] }
+
+const MOST_MARKED = 24
+const distance = (a: Pt, b: Pt) => Math.hypot(a[0] - b[0], a[1] - b[1])
+
+interface Middle { at: Pt, direction: number, half: number }
+export function middleOf(s: Solution, wall: ModelWall, part = 0.5): Middle {
+  const stations = midLine(s, wall)
+  const half = wall.t.value / 2
+  const [a, b] = [stations[0], stations.at(-1)]
+  if (stations.length > 2) {
+    const mid = stations[Math.round((stations.length - 1) * part)]
+    return { at: mid?.at ?? [0, 0], direction: mid?.direction ?? 0, half }
+  }
+  const [p, q]: [Pt, Pt] = [a?.at ?? [0, 0], b?.at ?? [0, 0]]
+  return { at: [p[0] + (q[0] - p[0]) * part, p[1] + (q[1] - p[1]) * part], direction: a?.direction ?? 0, half }
+}
+
+/** Side of the wall that looks away from the middle of the section: +1 left, −1 right of its direction. */
+export function outerSide(m: Middle, centre: Pt): 1 | -1 {
+  const left = polar(m.at, m.direction + Math.PI / 2, 1)
+  return distance(left, centre) >= distance(m.at, centre) ? 1 : -1
+}
+
+/** Lengths of walls that differ from one another, each on the outer side; and the overall size. */
+export function dimensions(s: Solution, room: Room, extent: { min: Pt, max: Pt }): Shape[] {
+  const unit = shownUnits(s.model).length
+  const seen = new Set<string>()
+  const walls = s.walls.filter(({ wall }) => !wall.arc && wall.length > 14 * room.pixel).flatMap(({ wall }): Shape[] => {
+    const value = lengthText(wall, unit)
+    if (seen.has(value) || seen.size >= MOST_MARKED / 2) return []
+    seen.add(value)
+    const m = middleOf(s, wall)
+    const offset = outerSide(m, room.centre) * (m.half + 24 * room.pixel)
+    const [from, to] = midLine(s, wall).map(st => st.at)
+    if (!from || !to) return []
+    for (const part of [0.15, 0.5, 0.85]) room.taken.push({ at: polar(middleOf(s, wall, part).at, m.direction + Math.PI / 2, offset), radius: 9 * room.pixel })
+    return [{ type: 'dimension', from, to, offset, text: value }]
+  })
+  return [...walls, ...overall(extent, unit, seen, room)]
+}
+
+/** Overall width and height of the mid-line, where no wall says it already. */
+function overall({ min, max }: { min: Pt, max: Pt }, unit: 'mm' | 'cm' | 'm' | 'in' | 'ft', seen: Set<string>, room: Room): Shape[] {
+  const shapes: Shape[] = []
+  const width = short(fromEngine(max[0] - min[0], unit))
+  const height = short(fromEngine(max[1] - min[1], unit))
+  if (max[0] - min[0] > 20 * room.pixel && !seen.has(width)) shapes.push({ type: 'dimension', from: [min[0], min[1]], to: [max[0], min[1]], offset: -52 * room.pixel, text: width })
+  if (max[1] - min[1] > 20 * room.pixel && !seen.has(height)) shapes.push({ type: 'dimension', from: [min[0], min[1]], to: [min[0], max[1]], offset: 52 * room.pixel, text: height })
+  return shapes
+}
+
+const short = (value: number) => significant(Number(value.toPrecision(5)), 5).replace(/(\.\d*?)0+(?=$|×)/u, '$1').replace(/\.(?=$|×)/u, '')
+
+const lengthText = (wall: ModelWall, unit: 'mm' | 'cm' | 'm' | 'in' | 'ft') => wall.lengthTyped ?? short(fromEngine(wall.length, unit))
+
+/** One thickness note per different thickness, on the inner side of the first wall that has it. */
+export function thicknessNotes(s: Solution, room: Room): Shape[] {
+  const seen = new Set<string>()
+  return s.walls.flatMap(({ wall }): Shape[] => {
+    if (seen.has(wall.t.typed) || seen.size > 8) return []
+    seen.add(wall.t.typed)
+    const m = middleOf(s, wall, 0.3)
+    const at = polar(m.at, m.direction - outerSide(m, room.centre) * Math.PI / 2, m.half + 13 * room.pixel)
+    room.taken.push({ at, radius: 12 * room.pixel })
+    return [{ type: 'label', at, text: `t ${wall.t.typed}`, role: 'note', anchor: 'middle' }]
+  })
+}
+
+/** Names of the walls; the place with the most room of several is taken. */
+export function balloons(s: Solution, room: Room): Shape[] {
+  const lines = s.walls.flatMap(({ wall }) => [0, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 1].map(part => middleOf(s, wall, part)))
+  return s.walls.slice(0, 60).map(({ wall }): Shape => {
+    const candidates = [0.5, 0.68, 0.32].flatMap(part => ([1, -1] as const).flatMap(side => [26, 40].map((away) => {
+      const m = middleOf(s, wall, part)
+      const normal = m.direction + side * Math.PI / 2
+      return { at: polar(polar(m.at, normal, m.half + away * room.pixel), m.direction, 6 * room.pixel), leaderTo: polar(m.at, normal, m.half) }
+    })))
+    const free = (p: Pt) => Math.min(
+      ...room.taken.map(t => distance(p, t.at) - t.radius - 9 * room.pixel), ...lines.map(m => distance(p, m.at) - m.half - 9 * room.pixel),
+    )
+    const best = candidates.reduce((a, b) => Math.min(free(b.at), 8 * room.pixel) > Math.min(free(a.at), 8 * room.pixel) + 1e-9 ? b : a)
+    room.taken.push({ at: best.at, radius: 10 * room.pixel })
+    return { type: 'balloon', at: best.at, text: wall.id, leaderTo: best.leaderTo }
+  })
+}
+
+/** Opposed arrows on both faces of straight walls, in the sense of a positive torque: along the wall on its right, back on its left. */
+export function flowArrows(s: Solution, room: Room): Shape[] {
+  return s.walls.slice(0, MOST_MARKED).flatMap(({ wall }): Shape[] => {
+    if (wall.arc || wall.length < 44 * room.pixel) return []
+    const side = (part: number, way: 1 | -1): Pt => {
+      const m = middleOf(s, wall, part)
+      return polar(m.at, m.direction + way * Math.PI / 2, m.half + 5 * room.pixel)
+    }
+    return [
+      { type: 'line', from: side(0.25, -1), to: side(0.75, -1), role: 'flow' },
+      { type: 'line', from: side(0.75, 1), to: side(0.25, 1), role: 'flow' },
+    ]
+  })
+}
+
+/** Axes of the section, drawn at the centroid. */
+export function axes([x, y]: Pt, room: Room): Shape[] {
+  const p = room.pixel
+  return [
+    { type: 'line', from: [x + 9 * p, y], to: [x + 36 * p, y], role: 'axis' },
+    { type: 'label', at: [x + 29 * p, y + 5 * p], text: 'x', role: 'axis' },
+    { type: 'line', from: [x, y + 9 * p], to: [x, y + 36 * p], role: 'axis' },
+    { type: 'label', at: [x + 5 * p, y + 27 * p], text: 'y', role: 'axis' },
+  ]
+}
