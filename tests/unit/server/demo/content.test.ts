@@ -3,11 +3,13 @@ import { evaluateCalculation } from '#shared/calc/registry'
 import type { CalcResult, Evaluation, Guard } from '#shared/calc/types'
 import { calculationsOf, tiedValuesOf } from '#shared/note/calculations'
 import { readDocument } from '#shared/note/schema'
+import { scanLooseNumbers } from '#shared/note/loose-numbers'
 import { unfinishedSections } from '#shared/note/sections'
 import { showMargin } from '#shared/units/display'
 import { buildDocument, type DemoSection } from '#server/database/seeders/demo/build-document'
 import type { DemoAct, DemoNote } from '#server/database/seeders/demo/demo-note'
 import { answerFor } from '#server/database/seeders/demo/answers'
+import { reasonFor } from '#server/database/seeders/demo/loose-reasons'
 import { ANGLE_BRACKET, CROSS_BAR, DEMO_NOTES, HAT, LATCH_GUIDE, LIPPED_CHANNEL, RAIL_NOTE } from '#server/database/seeders/demo/scenario'
 
 type Issue = DemoNote['issues'][number]
@@ -67,6 +69,22 @@ describe.each(ISSUES.filter(({ issue }) => submitted(issue)))('$name', ({ note, 
         .map(guard => `${label} ${guard.key} ${guard.severity}: ${guard.message}`)
     })
     expect(open).toEqual([])
+  })
+})
+
+describe.each(ISSUES.filter(({ issue }) => submitted(issue)))('$name', ({ note, issue }) => {
+  const reasons = issue.acts.flatMap(act => act.act === 'explain' ? act.reasons : [])
+
+  it('explains every typed quantity that is tied to nothing', () => {
+    const { doc, evaluations } = lastOf(note, issue)
+    const open = scanLooseNumbers(doc, Object.fromEntries(evaluations), { noteTitle: note.title }).filter(one => reasonFor(doc, reasons, one) === null)
+    expect(open.map(one => `${one.text}: ${one.reason}`)).toEqual([])
+  })
+
+  it('holds no number that a calculation contradicts, but for the one that was planted', () => {
+    const { doc, evaluations } = lastOf(note, issue)
+    const wrong = scanLooseNumbers(doc, Object.fromEntries(evaluations), { noteTitle: note.title }).filter(one => one.verdict === 'disagreeing')
+    expect(wrong.map(one => one.text)).toEqual(note === RAIL_NOTE ? ['2.12°'] : [])
   })
 })
 
