@@ -17,6 +17,9 @@ export const wallEnd = (from: Point, length: number, direction: number): Point =
 
 export interface ArcPath {
   readonly kind: 'arc'
+  readonly start: Point
+  /** Tangent at the start. */
+  readonly startDirection: number
   readonly centre: Point
   readonly radius: number
   /** Angle of the radius to the start. */
@@ -26,13 +29,20 @@ export interface ArcPath {
 export interface LinePath { readonly kind: 'line', readonly start: Point, readonly end: Point }
 export type WallPath = ArcPath | LinePath
 
-/** The point of an arc after `part` (0…1) of its sweep. */
-export const arcPoint = ({ centre, radius, startAngle, sweep }: ArcPath, part: number): Point => along(centre, startAngle + part * sweep, radius)
+/**
+ * The point of an arc after `part` (0…1) of its sweep. Taken from the start and
+ * not from the centre, which lies far off when a wall is curved only slightly.
+ */
+export function arcPoint({ start, startDirection, radius, sweep }: ArcPath, part: number): Point {
+  const half = part * sweep / 2
+  return along(start, startDirection + half, 2 * radius * Math.abs(Math.sin(half)))
+}
 
 /** An arc that leaves `from` with a given tangent; it turns left for a positive sweep. */
 export function arcFromTangent(from: Point, startDirection: number, radius: number, sweep: number): ArcPath {
   const left = Math.sign(sweep) * Math.PI / 2
-  return { kind: 'arc', centre: along(from, startDirection + left, radius), radius, startAngle: startDirection - left, sweep }
+  const start = { x: from.x, y: from.y }
+  return { kind: 'arc', start, startDirection, centre: along(from, startDirection + left, radius), radius, startAngle: startDirection - left, sweep }
 }
 
 /** End of an arc wall given by its start tangent, mid-line radius and swept angle, with the tangent there. */
@@ -69,7 +79,7 @@ export function pathLength(path: WallPath): number {
   return path.kind === 'line' ? distance(path.start, path.end) : path.radius * Math.abs(path.sweep)
 }
 
-export const pathStart = (path: WallPath): Point => (path.kind === 'line' ? path.start : arcPoint(path, 0))
+export const pathStart = (path: WallPath): Point => path.start
 export const pathEnd = (path: WallPath): Point => (path.kind === 'line' ? path.end : arcPoint(path, 1))
 
 /** The point after `part` (0…1) of the length. */
@@ -78,11 +88,14 @@ export function pathPoint(path: WallPath, part: number): Point {
   return { x: path.start.x + part * (path.end.x - path.start.x), y: path.start.y + part * (path.end.y - path.start.y) }
 }
 
+/** Direction of the tangent after `part` (0…1) of the length. */
+export const tangentAt = (path: WallPath, part: number): number =>
+  (path.kind === 'line' ? directionOf(path.start, path.end) : path.startDirection + part * path.sweep)
+
 /** Direction in which the path leaves its start, or leaves its end when walked backwards. */
 export function leavingDirection(path: WallPath, end: 'start' | 'end'): number {
   if (path.kind === 'line') return end === 'start' ? directionOf(path.start, path.end) : directionOf(path.end, path.start)
-  const quarter = Math.sign(path.sweep) * Math.PI / 2
-  return end === 'start' ? path.startAngle + quarter : path.startAngle + path.sweep - quarter
+  return end === 'start' ? path.startDirection : path.startDirection + path.sweep + Math.PI
 }
 
 /** A path drawn as points: the ends of a line, an arc in chords of at most `step` rad. */

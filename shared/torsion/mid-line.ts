@@ -3,8 +3,8 @@
  * replaces the corner, and the bends between them.
  */
 import type { Junction, OpenSection, OpenWall, Point, SectionFault, SectionNode } from '#shared/torsion/section'
-import type { ArcPath, WallPath } from '#shared/torsion/geometry'
-import { along, directionOf, distance, leavingDirection, pathEnd, pathLength, pathStart, turn, wallPath } from '#shared/torsion/geometry'
+import type { WallPath } from '#shared/torsion/geometry'
+import { along, arcFromTangent, directionOf, distance, leavingDirection, pathEnd, pathLength, pathStart, turn, wallPath } from '#shared/torsion/geometry'
 
 /** A stretch of mid-line with one thickness. A bend belongs half to each of its two walls. */
 export interface Piece {
@@ -89,9 +89,7 @@ function bendAt(junction: Junction, meeting: readonly WallAtNode[], corner: Poin
   const middle = radius + a.wall.t / 2
   const trim = middle * Math.tan(phi / 2)
   const start = along(corner, a.direction, trim)
-  const half = turn(b.direction - a.direction) / 2
-  const centre = along(corner, a.direction + half, middle / Math.cos(phi / 2))
-  const path: ArcPath = { kind: 'arc', centre, radius: middle, startAngle: directionOf(centre, start), sweep: turn(b.direction - a.direction - Math.PI) }
+  const path = arcFromTangent(start, a.direction + Math.PI, middle, turn(b.direction - a.direction - Math.PI))
   const walls = [a.wall.id, b.wall.id] as const
   const { t, G, E = null } = a.wall
   const piece: Piece = { path, from: vertex(node, walls[0]), to: vertex(node, walls[1]), t, G, E, walls: walls.map(id => ({ id, part: 0.5 })), bendAt: node }

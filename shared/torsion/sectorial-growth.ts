@@ -3,17 +3,23 @@ import type { Point } from '#shared/torsion/section'
 import type { ArcPath, WallPath } from '#shared/torsion/geometry'
 import { pathPoint, pathStart } from '#shared/torsion/geometry'
 
-/** Growth of the sectorial coordinate ∫(x dy − y dx) from the start of a piece to `part` of it, pole at `pole`. */
+/** δ − sin δ without cancellation: by its series below a twentieth, where four terms reach rounding. */
+function sagittal(delta: number): number {
+  if (Math.abs(delta) > 0.05) return delta - Math.sin(delta)
+  const square = delta * delta
+  return delta * square / 6 * (1 - square / 20 * (1 - square / 42 * (1 - square / 72)))
+}
+
+/**
+ * Growth of the sectorial coordinate ∫(x dy − y dx) from the start of a piece
+ * to `part` of it, pole at `pole`: twice the area of the triangle to the chord,
+ * and for an arc twice the segment between chord and arc.
+ */
 export function sectorialGrowth(path: WallPath, pole: Point, part: number): number {
   const start = pathStart(path)
-  if (path.kind === 'line') {
-    const end = pathPoint(path, part)
-    return (start.x - pole.x) * (end.y - start.y) - (start.y - pole.y) * (end.x - start.x)
-  }
-  const { centre, radius, startAngle, sweep } = path
-  const end = startAngle + part * sweep
-  return radius * ((centre.x - pole.x) * (Math.sin(end) - Math.sin(startAngle)) - (centre.y - pole.y) * (Math.cos(end) - Math.cos(startAngle)))
-    + radius * radius * part * sweep
+  const end = pathPoint(path, part)
+  const triangle = (start.x - pole.x) * (end.y - start.y) - (start.y - pole.y) * (end.x - start.x)
+  return path.kind === 'line' ? triangle : triangle + path.radius ** 2 * sagittal(part * path.sweep)
 }
 
 /** Parts of an arc at which the sectorial coordinate about `pole` stops growing: its extremes inside the arc. */

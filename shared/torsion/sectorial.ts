@@ -25,9 +25,9 @@ export interface SectorialProperties {
   readonly shearCentre: Point
   /** Warping constant of the mid-line, about the shear centre. */
   readonly gammaPrimary: number
-  /** Across the thickness: given where all walls point at one point, null otherwise, where it is small beside the primary one. */
-  readonly gammaSecondary: number | null
-  /** gammaPrimary + gammaSecondary */
+  /** Across the thickness. */
+  readonly gammaSecondary: number
+  /** What to use: the primary constant, with the secondary one added once it is more than a tenth of it (angles, tees, cruciforms). */
   readonly gamma: number
   /** Normalised ω, at each node; at a bend, at the middle of the bend. */
   readonly omegaAt: Readonly<Record<string, number>>
@@ -92,15 +92,16 @@ function shearCentreOnLine(stations: readonly Station[]): Point {
   return { x: integral(stations, at => at.t * at.t * at.x) / stiffness, y: integral(stations, at => at.t * at.t * at.y) / stiffness }
 }
 
-/** Across-thickness warping ∫(t²/12)·s²dA, s from the point at which all walls point; null unless they do. */
-function secondaryGamma(pieces: readonly Piece[], stations: readonly Station[], pole: Point, size: number): number | null {
-  const radial = pieces.every(({ path }) => {
-    if (path.kind === 'arc') return false
-    const length = pathLength(path)
-    return length === 0 || Math.abs(sectorialGrowth(path, pole, 1)) <= 1e-9 * size * length
-  })
-  return radial ? integral(stations, at => at.t * at.t / 12 * distance(pole, at) ** 2) : null
-}
+/** Warping across the thickness, ∫(t²/12)·s²dA with s from the foot of the perpendicular out of the shear centre. */
+const secondaryGamma = (stations: readonly Station[], pole: Point): number =>
+  integral(stations, at => at.t * at.t / 12 * ((at.x - pole.x) * Math.cos(at.tangent) + (at.y - pole.y) * Math.sin(at.tangent)) ** 2)
+
+/**
+ * Below a tenth of the mid-line's constant the secondary one is less than what
+ * a mid-line knows of the outline, and is left out; where walls point at one
+ * place (angle, tee, cruciform, bent or sharp) it is what there is.
+ */
+const secondaryCounts = 0.1
 
 /** Where |ω| or the distance from the pole may be greatest: ends of pieces and turning points inside arcs. */
 function peaks(walked: readonly WalkedPiece[], pole: Point): { omega: number, at: Point }[] {
@@ -156,6 +157,15 @@ export function sectorialProperties(section: OpenSection): SectorialProperties |
   }
 }
 
+/** Where all walls point at the shear centre ω is zero, and what is left is rounding error. */
+function gammasOf(stations: readonly Station[], pole: Point, size: number) {
+  const A = integral(stations, () => 1)
+  const square = integral(stations, at => at.omega ** 2)
+  const gammaPrimary = square <= 1e-20 * A * size ** 4 ? 0 : square
+  const gammaSecondary = secondaryGamma(stations, pole)
+  return { A, gammaPrimary, gammaSecondary, gamma: gammaSecondary > secondaryCounts * gammaPrimary ? gammaPrimary + gammaSecondary : gammaPrimary }
+}
+
 interface Known { readonly centroid: Point, readonly weightedArea: number, readonly size: number }
 
 function aboutShearCentre(section: OpenSection, pieces: readonly Piece[], pole: Point, weigh: Weights, { centroid, weightedArea, size }: Known) {
@@ -163,17 +173,15 @@ function aboutShearCentre(section: OpenSection, pieces: readonly Piece[], pole: 
   const raw = stationsOf(walked, pole, weigh.of)
   const mean = integral(raw, at => at.omega) / weightedArea
   const stations = raw.map(at => ({ ...at, omega: at.omega - mean }))
-  const gammaSecondary = secondaryGamma(pieces, stations, pole, size)
-  // Where all walls point at the shear centre ω is zero, and what is left is rounding error.
-  const gammaPrimary = gammaSecondary === null ? integral(stations, at => at.omega ** 2) : 0
+  const { A, ...gammas } = gammasOf(stations, pole, size)
+  const { gammaPrimary } = gammas
   const peak = peaks(walked, pole).map(one => ({ ...one, omega: one.omega - mean })).reduce((best, one) => (Math.abs(one.omega) > Math.abs(best.omega) ? one : best))
-  const omegaMax = gammaSecondary === null ? Math.abs(peak.omega) : 0
+  const omegaMax = gammaPrimary === 0 ? 0 : Math.abs(peak.omega)
   const nodal = omegaAtNodes(section, walked, pole, omegaAt, mean)
-  const scale = Math.max(omegaMax, 1e-6 * size * size) * weightedArea
+  const scale = Math.max(omegaMax, 1e-6 * size * size) * A
   const Ips = integral(stations, at => distance(pole, at) ** 2)
   return {
-    gammaPrimary, gammaSecondary, gamma: gammaPrimary + (gammaSecondary ?? 0),
-    omegaAt: gammaSecondary === null ? nodal : Object.fromEntries(Object.keys(nodal).map(id => [id, 0])), omegaMax, omegaMaxAt: peak.at,
+    ...gammas, omegaAt: gammaPrimary === 0 ? Object.fromEntries(Object.keys(nodal).map(id => [id, 0])) : nodal, omegaMax, omegaMaxAt: peak.at,
     Ips, In: integral(stations, at => distance(pole, at) ** 4) - Ips * Ips / weightedArea, rhoMax: farthest(pieces, pole),
     residuals: {
       area: Math.abs(integral(stations, at => at.omega)) / scale,

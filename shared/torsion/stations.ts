@@ -7,7 +7,7 @@
 import type { Point } from '#shared/torsion/section'
 import type { WallPath } from '#shared/torsion/geometry'
 import type { Piece } from '#shared/torsion/mid-line'
-import { pathLength, pathPoint } from '#shared/torsion/geometry'
+import { pathLength, pathPoint, tangentAt } from '#shared/torsion/geometry'
 import { sectorialGrowth } from '#shared/torsion/sectorial-growth'
 
 /** Abscissas and weights of the eight-point rule on (−1, 1); symmetric, so half is listed. Standard tables, checked by the test of the rule. */
@@ -26,7 +26,7 @@ export function rulePoints(path: WallPath): { part: number, weight: number }[] {
 }
 
 /** One integration point: where, how much area it stands for, and ω about the first pole. */
-export interface Station extends Point { readonly area: number, readonly omega: number, readonly piece: Piece, readonly t: number }
+export interface Station extends Point { readonly area: number, readonly omega: number, readonly t: number, readonly tangent: number }
 
 /** A piece with ω at its start, as the walk along the tree found it. */
 export interface WalkedPiece { readonly piece: Piece, readonly startOmega: number, readonly endOmega: number }
@@ -64,7 +64,7 @@ export function stationsOf(walked: readonly WalkedPiece[], pole: Point, weigh: (
     const area = pathLength(path) * t * weigh(piece)
     return rulePoints(path).map(({ part, weight }) => ({
       ...pathPoint(path, part),
-      area: area * weight, omega: startOmega + sectorialGrowth(path, pole, part), piece, t,
+      area: area * weight, omega: startOmega + sectorialGrowth(path, pole, part), t, tangent: tangentAt(path, part),
     }))
   })
 }

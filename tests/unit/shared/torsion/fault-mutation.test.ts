@@ -89,8 +89,7 @@ async function spoiltEngine({ module, spoil }: Mutation): Promise<Engine> {
 const valueOf = (row: ReferenceRow, engine: Engine): number => {
   try {
     return row.actual(engine)
-  }
-  catch {
+  } catch {
     return Number.NaN
   }
 }
