@@ -5,6 +5,7 @@ import { emailSchema } from '#shared/schemas/people'
 import { checkProductionRole } from './check-role'
 import { migrate } from './migrate'
 import { seed } from './seed'
+import { signIns } from './sign-ins'
 
 function needed(name: string): string {
   const value = process.env[name]
@@ -23,6 +24,10 @@ const commands: Record<string, { usage: string, run: (args: string[]) => Promise
   'seed': {
     usage: 'seed: makes the demonstration, once',
     run: async () => console.log(await seed(needed('DATABASE_URL'))),
+  },
+  'sign-ins': {
+    usage: 'sign-ins: lists the people of the demonstration',
+    run: async () => console.log(signIns()),
   },
   'check-role': {
     usage: 'check-role: refuses an application role that owns a table',

@@ -1,0 +1,26 @@
+import { connect } from '#server/database/orm'
+import { seedDemo } from '#server/database/seeders/demo/seed-demo'
+import { closeQueue, useQueue } from '#server/jobs/queue'
+import { makeRelease } from '#server/jobs/make-release'
+import { loadSigner } from '#server/pdf/signing/local-authority'
+import { serverClock } from '#server/utils/clock'
+import { environment } from '#server/utils/environment'
+
+/** Makes the demonstration, once, as the application's role. Releases are made here as the worker makes them. Answers what was done. */
+export async function seed(databaseUrl: string): Promise<string> {
+  const { demonstration, dataDir } = environment()
+  if (!demonstration) throw new Error('The demonstration is seeded only where TORQUILL_DEMONSTRATION is 1.')
+  useQueue(databaseUrl)
+  const orm = await connect(databaseUrl)
+  try {
+    const signer = await loadSigner(`${dataDir}/authority`)
+    const done = await seedDemo({
+      em: orm.em.fork(), now: serverClock(),
+      makeRelease: (job, clock) => makeRelease({ em: orm.em.fork(), clock, signer }, job, { last: true }),
+    })
+    return done ? 'The demonstration is made.' : 'There is somebody here already; the demonstration is left as it is.'
+  } finally {
+    await closeQueue()
+    await orm.close()
+  }
+}
