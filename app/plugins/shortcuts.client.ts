@@ -1,0 +1,10 @@
+export default defineNuxtPlugin(() => {
+  const on = useShortcutsOn()
+  addEventListener('keydown', (event) => {
+    if (!on.value) return
+    const shortcut = shortcutFor(event)
+    if (!shortcut) return
+    event.preventDefault()
+    shortcut.act()
+  })
+})
