@@ -43,7 +43,6 @@ export default defineNuxtConfig({
       external: ['@node-rs/argon2'],
       traceInclude: [fileURLToPath(new URL('./node_modules/next-auth/core/index.js', import.meta.url))],
     },
-    experimental: { asyncContext: true },
   },
   vite: {
     build: { assetsInlineLimit: 0 },

@@ -17,7 +17,7 @@ export function addPerson(context: CommandContext, input: AddPerson): Promise<Pe
     }
     const person = em.create(PersonSchema, {
       id, email: input.email, name: input.name, auditor: input.auditor, administrator: input.administrator,
-      passwordHash: null, disabledAt: null, sessionEpoch: 0, createdAt: clock(),
+      disabledAt: null, sessionEpoch: 0, createdAt: clock(),
     })
     await em.flush()
     await recordAct(inside, { chain: systemChain, act: 'add person', subject, new: { name: input.name, auditor: input.auditor, administrator: input.administrator } })

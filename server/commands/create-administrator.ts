@@ -12,7 +12,7 @@ export function createAdministrator(em: EntityManager, clock: () => Date, input:
     if (known && (!known.administrator || known.disabledAt)) throw new DomainError('taken', 'This address belongs to somebody who is no administrator, or disabled.')
     const person = known ?? tx.create(PersonSchema, {
       id: randomUUID(), email: input.email, name: input.name, auditor: false, administrator: true,
-      passwordHash: null, disabledAt: null, sessionEpoch: 0, createdAt: clock(),
+      disabledAt: null, sessionEpoch: 0, createdAt: clock(),
     })
     await tx.flush()
     const link = await makeLink({ em: tx, clock }, person, 'invitation')

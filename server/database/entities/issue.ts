@@ -34,7 +34,7 @@ export const IssueSchema = defineEntity({
     /** SHA-256 over all frozen parts, made when the check passes. */
     contentHash: p.text().nullable(),
     /** For the register: least margin over all calculations, and its mode. */
-    leastMargin: p.double().nullable(),
+    leastMargin: p.double().$type<number>().nullable(),
     leastMarginMode: p.text().nullable(),
     leastMarginCase: p.text().nullable(),
     leastMarginCalc: p.uuid().nullable(),
