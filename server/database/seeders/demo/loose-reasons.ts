@@ -15,7 +15,7 @@ export const REASONS: Record<'hat' | 'angle' | 'rail' | 'latch', LooseReason[]> 
     ...rows('description', drawing, '0.06 in'),
     ...rows('geometry', drawing, '2.00 in', '1.55 in', '0.250 in', '0.190 in'),
     ...rows('span-analysis', 'Clamp line to pad, drawing.', '2.40 in'),
-    ...rows('sensitivity', 'Fillet of the concession, entered in C2.', '0.160 in'),
+    ...rows('sensitivity', 'Largest fillet of the drawing, entered in C2.', '0.220 in'),
   ],
   rail: [
     ...rows('geometry', drawing, '60 mm', '6.0 mm', '140 mm', '5.0 mm', '1800 mm', '900 mm'),

@@ -110,6 +110,9 @@ describe('what the notes conclude', () => {
   it('hat stiffener: 1.95° over T·L/(G·J), issue A with 0.113 N·m and issue B with 0.202 N·m over 300 mm', () => {
     expect(shown(HAT, 'A', 'C2', 'MS:twist@W03')).toBe('+0.82')
     expect(shown(HAT, 'B', 'C2', 'MS:twist@W03')).toBe('+1.41')
+    // With the least sheet J falls to 58.126 and 141.481 mm⁴ (same program, strips less 2 × 0.105041 t⁴).
+    expect(shown(HAT, 'A', 'C3', 'MS')).toBe('+0.61')
+    expect(shown(HAT, 'B', 'C3', 'MS')).toBe('+1.19')
   })
 
   it('hat stiffener, issue B: cautions are those of the stocky brims', () => {
@@ -124,6 +127,10 @@ describe('what the notes conclude', () => {
     // K05: 41.2 ksi / (1104 lbf·in × 0.25 in × 1.489 / 0.017818 in⁴ × 1.5 × 1.15) = 1.036
     expect(shown(ANGLE_BRACKET, 'A', 'C1', 'MS:corner-ultimate@K05')).toBe('+0.03')
     expect(shown(ANGLE_BRACKET, 'A', 'C1', 'MS')).toBe('+0.03')
+    // K_c is all but flat near r/t = 0.8 while J grows with the fillet: the smallest fillet is the worst.
+    const issue = ANGLE_BRACKET.issues[0]
+    const largest = issue && lastOf(ANGLE_BRACKET, issue).results.get('C2')?.outputs.find(output => output.key === 'MS')?.value
+    expect(largest).toBeGreaterThan(0.0359)
   })
 
   it('lipped channel: too soft by an eighth, and the next sheet cures it', () => {

@@ -113,7 +113,7 @@ const sensitivity = (sheet: Sheet) => section('sensitivity',
 
 const conclusion = (sheet: Sheet) => section('conclusion',
   ul('25.305 (a) and (b), imposed twist: shear at limit and ultimate in all twelve cases, C1. Met.',
-    '25.305 (a), sensor bay: twist at limit within the alignment of the sensor, least margin ⟦C2 MS:twist@W03⟧ in W03, C2. Met.',
+    '25.305 (a), sensor bay: twist at limit within the alignment of the sensor, ⟦C2 MS:twist@W03⟧ in W03 with the nominal sheet (C2) and ⟦C3 MS:twist@W03⟧ with the least one (C3), which is the least margin of the note. Met.',
     '25.613: B basis on a redundant load path, temperature included. Met.'),
   p(`The stiffener of drawing issue ${sheet.drawing} is adequate for the twist that the flap imposes and for the torque of the position sensor.`))
 
