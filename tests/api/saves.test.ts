@@ -111,14 +111,19 @@ describe('a save', () => {
     expect((await load()).save).toBe(1)
   })
 
-  it.each([
-    ['a script link', paragraph({ type: 'text', text: 'x', marks: [{ type: 'link', attrs: { href: 'javascript:alert(1)' } }] })],
-    ['an id used twice', withId(testId(5), paragraph('x'))],
-  ])('with %s is refused', async (name, block) => {
+  it('with a script link is refused', async () => {
     const now = await load()
+    const sound = saveOf(now.document, now.save, insertBlock('scope', paragraph({ type: 'text', text: 'x', marks: [{ type: 'link', attrs: { href: 'https://example.org/' } }] })))
+    const evil = JSON.parse(JSON.stringify(sound).replace('https://example.org/', 'javascript:alert(1)')) as SaveContent
+    expect((await put(evil)).body).toMatchObject({ code: 'invalid-document' })
+  })
+
+  it('with an id used twice is refused', async () => {
+    const now = await load()
+    const block = withId(testId(5), paragraph('x'))
     const payload = saveOf(now.document, now.save, (change, doc) => {
       insertBlock('scope', block)(change, doc)
-      if (name.startsWith('an id')) insertBlock('scope', block)(change, change.doc)
+      insertBlock('scope', block)(change, change.doc)
     })
     expect((await put(payload)).status).toBe(422)
   })
