@@ -12,7 +12,7 @@ export default defineNuxtRouteMiddleware(async (to) => {
   const store = useMeStore()
   // The count of what waits is read again on the way, without waiting for it.
   if (import.meta.client && store.me) void store.load().catch(() => undefined)
-  const me = store.me ?? await store.load()
+  const me = store.me ?? (to.meta.open && store.asked ? null : await store.load())
   if (to.meta.open) return
   if (!me) return navigateTo(signInAddress(to.fullPath))
   const allowed = to.meta.need === 'administrator' ? me.administrator : to.meta.need === 'auditor' ? me.auditor || me.administrator : true

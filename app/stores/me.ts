@@ -4,10 +4,13 @@ import type { Me } from '#shared/schemas/lists'
 /** Who is signed in; null when nobody is. */
 export const useMeStore = defineStore('me', () => {
   const me = ref<Me | null>(null)
+  /** Whether the server was asked: a stranger on an open page is asked for once. */
+  const asked = ref(false)
 
   /** @throws when the server cannot be asked; nobody signed in is not a failure. */
   async function load(): Promise<Me | null> {
     const fetcher = useRequestFetch() as typeof $fetch
+    asked.value = true
     try {
       me.value = await fetcher<unknown>('/api/me', { retry: 0 }) as Me
     } catch (thrown) {
@@ -20,5 +23,5 @@ export const useMeStore = defineStore('me', () => {
   function forget() {
     me.value = null
   }
-  return { me, load, forget }
+  return { me, asked, load, forget }
 })
