@@ -19,3 +19,10 @@ export async function lockIssue(em: EntityManager, id: string): Promise<Issue> {
   await em.populate(locked, [...around])
   return locked
 }
+
+/** The issue that the next letter is opened from: the newest that is or was in force. @throws DomainError wrong-state */
+export async function newestReleased(em: EntityManager, noteId: string): Promise<Issue> {
+  const issue = await em.findOne(IssueSchema, { note: noteId, releasedAt: { $ne: null } }, { orderBy: { createdAt: 'desc' } })
+  if (!issue) throw new DomainError('wrong-state', 'No issue of this note has been released yet; finish the one that is on its way.')
+  return issue
+}

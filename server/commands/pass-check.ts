@@ -1,0 +1,33 @@
+import type { Pass } from '#shared/schemas/acts'
+import { confirmPassword } from '#server/access/confirm-password'
+import { recordAct } from '#server/audit/record'
+import { deviationsIn, shownMargin } from '#server/mail/issue-mails'
+import { issueMailProps } from '#server/mail/issue-props'
+import { queueMail } from '#server/mail/queue-mail'
+import { actOnIssue } from '#server/notes/act-on-issue'
+import { refuseMovedEngine } from '#server/notes/engine-check'
+import { expectSeen } from '#server/notes/expect-seen'
+import { addPart } from '#server/notes/parts'
+import { sign } from '#server/notes/signatures'
+import type { CommandContext } from '#server/utils/command-context'
+
+/** The checker signs that every step was followed; the content hash is fixed here. */
+export function passCheck(context: CommandContext, issueId: string, input: Pass): Promise<void> {
+  return actOnIssue(context, issueId, 'pass', ['pass'], async (inside, issue, name, standing) => {
+    const { em, actor, clock } = inside
+    expectSeen(issue, input.expect)
+    await confirmPassword(inside, input.password)
+    refuseMovedEngine(issue)
+    await addPart(inside, issue, 'checker')
+    const { hash } = standing.content
+    await sign(inside, issue, 'passed', hash)
+    Object.assign(issue, { state: 'for approval', contentHash: hash, lastChangeAt: clock() })
+    await em.flush()
+    await recordAct(inside, { ...name, old: { state: 'in check' }, new: { state: 'for approval', save: issue.saveNumber, contentHash: hash } })
+    if (!issue.approver) return
+    await queueMail(inside, {
+      template: 'passed', to: issue.approver, event: `pass:${issue.id}:${clock().toISOString()}`,
+      props: { ...issueMailProps(issue), checker: actor.name, analyst: issue.analyst?.name ?? '', leastMargin: shownMargin(issue), cautions: issue.cautions, deviations: deviationsIn(standing) },
+    })
+  })
+}
