@@ -94,7 +94,8 @@ export type Shape
     | { type: 'balloon', at: [number, number], text: string, leaderTo: [number, number] }
     | { type: 'dimension', from: [number, number], to: [number, number], offset: number, text: string }
     | { type: 'centroid' | 'shear-centre', at: [number, number] }
-    | { type: 'peak', at: [number, number], text: string }
+    /** `away` points from the material to where the flag stands; up where absent. */
+    | { type: 'peak', at: [number, number], text: string, away?: [number, number] }
     | { type: 'torque', at: [number, number], radius: number, text: string }
 export type ShapeRole = 'wall' | 'axis' | 'dimension' | 'flow' | 'note'
 export interface Drawing {

@@ -14,8 +14,9 @@ export function drawLegend(canvas: Canvas, ramp: NonNullable<Drawing['ramp']>, w
   const left = canvas.width * 0.1
   const width = canvas.width * 0.8
   const bar = top + 18
+  // Each step runs on to the end under the next, so that no seam shows between two.
   const steps = Array.from({ length: STEPS }, (_, i) =>
-    `<rect x="${n(left + width * i / STEPS)}" y="${n(bar)}" width="${n(width / STEPS + 0.4)}" height="7" fill="${rampColour(canvas.palette, (i + 0.5) / STEPS)}"/>`).join('')
+    `<rect x="${n(left + width * i / STEPS)}" y="${n(bar)}" width="${n(width * (1 - i / STEPS))}" height="7" fill="${rampColour(canvas.palette, (i + 0.5) / STEPS)}"/>`).join('')
   const frame = `<rect x="${n(left)}" y="${n(bar)}" width="${n(width)}" height="7" fill="none" stroke="${canvas.palette.rule}" stroke-width=".6"/>`
   const place = (level: number): Pixel => [left + width * level, bar]
   return steps + frame + levelMarks(canvas, walls, place) + ticks(canvas, ramp, place)

@@ -102,14 +102,17 @@ function drawShearCentre(canvas: Canvas, shape: Spot): string {
 function drawPeak(canvas: Canvas, shape: Of<'peak'>): string {
   const [x, y] = canvas.px(shape.at)
   const { ink } = canvas.palette
-  const long = textWidth(shape.text, 11.5 * canvas.mark) + 6
-  const way = x + 30 + long > canvas.width - 4 ? -1 : 1
-  const rise = y < 48 ? -1 : 1
-  const knee: Pixel = [x + way * 26, y - rise * 26]
+  const out = unit(shape.away ? [shape.away[0], -shape.away[1]] : [0, -1])
+  const long = textWidth(shape.text, 11.5 * canvas.mark) * 1.12 + 6
+  const wanted = out[0] < -0.3 ? -1 : 1
+  const fits = (way: number) => x + way * (26 + long) > 4 && x + way * (26 + long) < canvas.width - 4
+  const way = fits(wanted) ? wanted : -wanted
+  const knee: Pixel = [x + way * 26, y + (out[1] > 0.3 ? 26 : -26)]
   const tip: Pixel = [knee[0] + way * long, knee[1]]
+  const base: Pixel = [x + out[0] * 8.5, y + out[1] * 8.5]
   return segment([x, y], knee, ink, 0.7) + segment(knee, tip, ink, 0.7)
-    + polygon([[x, y - 0.5 * rise], [x - 4.5, y - 8.5 * rise], [x + 4.5, y - 8.5 * rise]], `fill="${ink}"`)
-    + text(canvas, [way > 0 ? knee[0] + 2 : tip[0] + 2, knee[1] - 4], shape.text, { weight: 600 })
+    + polygon([[x + out[0] * 0.5, y + out[1] * 0.5], [base[0] - out[1] * 4.5, base[1] + out[0] * 4.5], [base[0] + out[1] * 4.5, base[1] - out[0] * 4.5]], `fill="${ink}"`)
+    + text(canvas, [way > 0 ? knee[0] + 2 : tip[0] + 2, knee[1] - 4], shape.text, { weight: 600, ground: true })
 }
 
 /** Right-hand about z, which points out of the page: counter-clockwise, over the top. */

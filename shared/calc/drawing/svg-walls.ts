@@ -20,7 +20,7 @@ export function isWall(shape: Shape): shape is WallShape {
 
 /** All walls: first every outline, then every filling, so that the line runs round the whole section and not between walls. */
 export function drawWalls(canvas: Canvas, walls: WallShape[]): string {
-  const outlines = walls.map(w => polygon(facesOf(canvas, w, 1), `fill="${canvas.palette.ink}" stroke="${canvas.palette.ink}" stroke-width="${n(OUTLINE * 2 + 0.4)}" stroke-linejoin="miter" stroke-miterlimit="3"`))
+  const outlines = walls.map(w => polygon(facesOf(canvas, w, 1), `fill="${canvas.palette.ink}" stroke="${canvas.palette.ink}" stroke-width="${n(OUTLINE * 2 + 0.4)}" stroke-linejoin="round"`))
   const loose = walls.filter(w => w.wall === undefined).map(w => filled(canvas, w, 1, w.level ?? 0))
   const bands = Array.from({ length: BANDS }, (_, k) => 1 - k / BANDS)
     .flatMap(depth => walls.filter(w => w.wall !== undefined).map(w => filled(canvas, w, depth, (w.level ?? 0) * depth)))

@@ -41,13 +41,21 @@ export function dimensions(s: Solution, room: Room, extent: { min: Pt, max: Pt }
     if (seen.has(value) || seen.size >= MOST_MARKED / 2) return []
     seen.add(value)
     const m = middleOf(s, wall)
-    const offset = outerSide(m, room.centre) * (m.half + 24 * room.pixel)
+    const offset = freeOffset(m, room)
     const [from, to] = midLine(s, wall).map(st => st.at)
     if (!from || !to) return []
     for (const part of [0.15, 0.5, 0.85]) room.taken.push({ at: polar(middleOf(s, wall, part).at, m.direction + Math.PI / 2, offset), radius: 9 * room.pixel })
     return [{ type: 'dimension', from, to, offset, text: value }]
   })
   return [...walls, ...overall(extent, unit, seen, room)]
+}
+
+/** The nearest line outside the wall on which the value hides no other mark. */
+function freeOffset(m: Middle, room: Room): number {
+  const side = outerSide(m, room.centre)
+  const offsets = [24, 42, 60, 78].map(away => side * (m.half + away * room.pixel))
+  const clear = (offset: number) => room.taken.every(t => distance(polar(m.at, m.direction + Math.PI / 2, offset), t.at) > t.radius + 8 * room.pixel)
+  return offsets.find(clear) ?? offsets[0] ?? 0
 }
 
 /** Overall width and height of the mid-line, where no wall says it already. */
@@ -60,19 +68,23 @@ function overall({ min, max }: { min: Pt, max: Pt }, unit: 'mm' | 'cm' | 'm' | '
   return shapes
 }
 
-const short = (value: number) => significant(Number(value.toPrecision(5)), 5).replace(/(\.\d*?)0+(?=$|×)/u, '$1').replace(/\.(?=$|×)/u, '')
+const short = (value: number) => significant(Number(value.toPrecision(4)), 4).replace(/(\.\d*?)0+(?=$|×)/u, '$1').replace(/\.(?=$|×)/u, '')
 
 const lengthText = (wall: ModelWall, unit: 'mm' | 'cm' | 'm' | 'in' | 'ft') => wall.lengthTyped ?? short(fromEngine(wall.length, unit))
 
-/** One thickness note per different thickness, on the inner side of the first wall that has it. */
+/** One thickness note per different thickness, beside the longest wall that has it. */
 export function thicknessNotes(s: Solution, room: Room): Shape[] {
   const seen = new Set<string>()
-  return s.walls.flatMap(({ wall }): Shape[] => {
+  return [...s.walls].sort((a, b) => b.wall.length - a.wall.length).flatMap(({ wall }): Shape[] => {
     if (seen.has(wall.t.typed) || seen.size > 8) return []
     seen.add(wall.t.typed)
-    const m = middleOf(s, wall, 0.3)
-    const at = polar(m.at, m.direction - outerSide(m, room.centre) * Math.PI / 2, m.half + 13 * room.pixel)
-    room.taken.push({ at, radius: 12 * room.pixel })
+    const places = [0.22, 0.78, 0.5].flatMap(part => ([-1, 1] as const).map((side) => {
+      const m = middleOf(s, wall, part)
+      return polar(m.at, m.direction + side * outerSide(m, room.centre) * Math.PI / 2, m.half + 17 * room.pixel)
+    }))
+    const clear = (p: Pt) => Math.min(...room.taken.map(t => distance(p, t.at) - t.radius - 14 * room.pixel), 0)
+    const at = places.reduce((a, b) => clear(b) > clear(a) + 1e-9 ? b : a)
+    room.taken.push({ at, radius: 15 * room.pixel })
     return [{ type: 'label', at, text: `t ${wall.t.typed}`, role: 'note', anchor: 'middle' }]
   })
 }

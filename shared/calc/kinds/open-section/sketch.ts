@@ -3,9 +3,9 @@ import type { Drawing, Shape } from '#shared/calc/types'
 import { decisiveCases } from '#shared/calc/kinds/open-section/working-cases'
 import { shownUnits } from '#shared/calc/kinds/open-section/shown-units'
 import { axes, balloons, dimensions, flowArrows, middleOf, outerSide, thicknessNotes, type Room } from '#shared/calc/kinds/open-section/sketch-marks'
-import { filletShapes, midLine, polar, wallShapes, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
-import type { CaseSolution, Solution } from '#shared/calc/kinds/open-section/solution'
-import { significant, showQuantity } from '#shared/units/display'
+import { filletShapes, leavingDirection, midLine, polar, wallShapes, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
+import type { CaseSolution, CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'
+import { significant, showQuantity, withUnit } from '#shared/units/display'
 import { fromEngine } from '#shared/units/units'
 
 /** Pixels of the picture at its nominal size, and of the section inside it. */
@@ -22,12 +22,13 @@ export function openSectionSketch(s: Solution): Drawing | null {
   const shown = decisiveCases(s)[0] ?? null
   const level = (wall: string) => shown && shown.tauMax > 0 ? Math.min((shown.tau.get(wall) ?? 0) / shown.tauMax, 1) : 0
   const room: Room = { pixel, centre: [(extent.min[0] + extent.max[0]) / 2, (extent.min[1] + extent.max[1]) / 2], taken: [] }
-  const centres = centreMarks(s, room, shown)
+  const centres = centreMarks(s, room)
   const peak = shown ? peakMark(s, shown, room) : []
-  const shapes: Shape[] = [
+  const marked: Shape[] = [
     ...wallShapes(s, level), ...filletShapes(s, level), ...dimensions(s, room, extent), ...flowArrows(s, room), ...centres, ...peak,
     ...thicknessNotes(s, room), ...balloons(s, room),
   ]
+  const shapes = [...marked, ...torqueMark(s, shown, extent, marked, pixel)]
   const unit = shownUnits(s.model).stress
   return {
     shapes, box: boxOf(shapes, pixel), alt: altText(s, shown),
@@ -45,18 +46,22 @@ function caseName(s: Solution, c: CaseSolution): string {
   return c.model.id === 'T' && s.cases.length === 1 ? `given at ${c.model.level}` : `case ${c.model.id}, given at ${c.model.level}`
 }
 
-/** Centroid with the axes, shear centre, and the torque about it. */
-function centreMarks(s: Solution, room: Room, shown: CaseSolution | null): Shape[] {
+/** Centroid with the axes, and shear centre. */
+function centreMarks(s: Solution, room: Room): Shape[] {
   const p = s.sectorial
   if (!p) return []
   const [C, S]: [Pt, Pt] = [[p.centroid.x, p.centroid.y], [p.shearCentre.x, p.shearCentre.y]]
-  room.taken.push({ at: C, radius: 12 * room.pixel }, { at: S, radius: 12 * room.pixel }, { at: polar(C, Math.PI / 4, 20 * room.pixel), radius: 20 * room.pixel })
-  const unit = shown?.model.torque?.unit ?? shownUnits(s.model).torque
-  const torque: Shape[] = shown
-    ? [{ type: 'torque', at: S, radius: 40 * room.pixel, text: `T ${showQuantity(shown.torque, 'torque', unit)}` }]
-    : []
-  for (const angle of [35, 60, 90, 120, 145]) room.taken.push({ at: polar(S, angle * Math.PI / 180, 40 * room.pixel), radius: 8 * room.pixel })
-  return [...torque, ...axes(C, room), { type: 'centroid', at: C }, { type: 'shear-centre', at: S }]
+  room.taken.push({ at: C, radius: 14 * room.pixel }, { at: S, radius: 20 * room.pixel }, { at: polar(C, Math.PI / 4, 20 * room.pixel), radius: 20 * room.pixel })
+  return [...axes(C, room), { type: 'centroid', at: C }, { type: 'shear-centre', at: S }]
+}
+
+/** The torque stands over everything else, above the shear centre where that lies within the width of the section. */
+function torqueMark(s: Solution, shown: CaseSolution | null, extent: { min: Pt, max: Pt }, below: Shape[], pixel: number): Shape[] {
+  if (!shown || !s.sectorial) return []
+  const unit = shown.model.torque?.unit ?? shownUnits(s.model).torque
+  const top = Math.max(...below.flatMap(shape => reachOf(shape, pixel)).map(point => point[1]))
+  const x = Math.min(Math.max(s.sectorial.shearCentre.x, extent.min[0]), extent.max[0])
+  return [{ type: 'torque', at: [x, top - 20 * pixel], radius: 40 * pixel, text: `T ${showQuantity(shown.torque, 'torque', unit)}` }]
 }
 
 /** The highest stress of the case shown: at a corner where its factor makes it the largest, else on the outer face of its wall. */
@@ -64,18 +69,39 @@ function peakMark(s: Solution, c: CaseSolution, room: Room): Shape[] {
   if (!(c.tauMax > 0)) return []
   const unit = shownUnits(s.model).stress
   const say = (tau: number) => `${significant(fromEngine(tau, unit), 3)}\u2009${unit} peak`
-  const corner = c.tauCorner !== null && c.tauCorner > c.tauMax ? s.model.nodes.find(n => n.id === c.tauCornerNode) : undefined
-  if (corner && c.tauCorner !== null) {
-    const at: Pt = [corner.x, corner.y]
-    room.taken.push({ at, radius: 22 * room.pixel })
-    return [{ type: 'peak', at, text: say(c.tauCorner) }]
-  }
+  const corner = c.tauCorner !== null && c.tauCorner > c.tauMax ? s.corners.find(k => k.node === c.tauCornerNode) : undefined
+  const inner = corner && innerPoint(s, corner)
+  if (inner && c.tauCorner !== null) return peakAt(inner.at, inner.away, say(c.tauCorner), room)
   const wall = s.walls.find(w => w.wall.id === c.tauMaxWall)?.wall
   if (!wall) return []
   const m = middleOf(s, wall, 0.75)
-  const at = polar(m.at, m.direction + outerSide(m, room.centre) * Math.PI / 2, m.half)
-  room.taken.push({ at, radius: 22 * room.pixel })
-  return [{ type: 'peak', at, text: say(c.tauMax) }]
+  const normal = m.direction + outerSide(m, room.centre) * Math.PI / 2
+  return peakAt(polar(m.at, normal, m.half), polar([0, 0], normal, 1), say(c.tauMax), room)
+}
+
+function peakAt(at: Pt, away: Pt, text: string, room: Room): Shape[] {
+  const direction = Math.atan2(away[1], away[0])
+  const flag = polar(at, direction, 26 * room.pixel)
+  const side = away[0] < -0.3 ? -1 : 1
+  for (const step of [0, 26, 52, 78]) room.taken.push({ at: [flag[0] + side * step * room.pixel, flag[1]], radius: 14 * room.pixel })
+  return [{ type: 'peak', at, text, away }]
+}
+
+/** The inner surface of a two-walled corner, in the direction that halves the angle between its walls. */
+function innerPoint(s: Solution, corner: CornerSolution): { at: Pt, away: Pt } | null {
+  const node = s.model.nodes.find(n => n.id === corner.node)
+  const [a, b] = corner.walls
+  if (!node || !a || !b) return null
+  const [u, v] = [polar([0, 0], leavingDirection(a, corner.node), 1), polar([0, 0], leavingDirection(b, corner.node), 1)]
+  const middle: Pt = [u[0] + v[0], u[1] + v[1]]
+  const long = Math.hypot(middle[0], middle[1])
+  if (long < 1e-6) return null
+  const away: Pt = [middle[0] / long, middle[1] / long]
+  const half = Math.acos(Math.min(Math.max(u[0] * away[0] + u[1] * away[1], -1), 1))
+  // From the node to the inner surface: half the thickness, and what the radius fills.
+  const r = corner.junction?.radius.value ?? 0
+  const depth = (corner.worst.t.value / 2 + r) / Math.sin(half) - r
+  return { at: [node.x + away[0] * depth, node.y + away[1] * depth], away }
 }
 
 /** Everything that is drawn, with room for its lettering, at least as wide as the nominal picture. */
@@ -111,7 +137,7 @@ function reachOf(shape: Shape, p: number): Pt[] {
 
 function altText(s: Solution, c: CaseSolution | null): string {
   const unit = shownUnits(s.model)
-  const named = s.walls.slice(0, MOST_NAMED).map(({ wall }) => `${wall.id}${wall.name.trim() === '' ? '' : ` ${wall.name.trim()}`} ${showQuantity(wall.length, 'length', unit.length)} by ${wall.t.typed}${wall.arc ? ' arc' : ''}`)
+  const named = s.walls.slice(0, MOST_NAMED).map(({ wall }) => `${wall.id}${wall.name.trim() === '' ? '' : ` ${wall.name.trim()}`} ${showQuantity(wall.length, 'length', unit.length)} by ${/[a-z]/i.test(wall.t.typed) ? wall.t.typed : withUnit(wall.t.typed, wall.t.unit)}${wall.arc ? ' arc' : ''}`)
   const more = s.walls.length > MOST_NAMED ? `, and ${s.walls.length - MOST_NAMED} more` : ''
   const walls = `Open section to scale with ${s.walls.length} ${s.walls.length === 1 ? 'wall' : 'walls'}: ${named.join('; ')}${more}.`
   const at = (p: { x: number, y: number }) => `x ${showQuantity(p.x, 'length', unit.length)}, y ${showQuantity(p.y, 'length', unit.length)}`
