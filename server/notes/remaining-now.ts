@@ -1,8 +1,20 @@
-import type { IssueView } from '#shared/schemas/issue-view'
+import { readDocument } from '#shared/note/schema'
+import { remaining, type RemainingLists } from '#shared/review/remaining'
+import { presentAnswers, presentCheckSheet, presentLoose, presentRemarks, presentTicks } from '#server/presenters/issue-parts'
+import { resultsOf } from './current-results'
+import { looseNumbersOf } from './loose'
 import type { Standing } from './standing'
 
-export type RemainingNow = IssueView['remaining']
+export type RemainingNow = RemainingLists
 
-export function remainingNow(_standing: Standing): RemainingNow {
-  return { submit: [], pass: [], release: [] }
+/** What stands between the issue as saved and its next act. */
+export function remainingNow(standing: Standing): RemainingNow {
+  const { issue, content } = standing
+  const results = resultsOf(issue)
+  return remaining({
+    doc: readDocument(JSON.parse(issue.document)), results,
+    answers: presentAnswers(standing, results), loose: presentLoose(standing, looseNumbersOf(issue)), remarks: presentRemarks(standing, new Map()),
+    ticks: presentTicks(standing), sheet: presentCheckSheet(standing),
+    changeNoted: issue.changeNote.trim() !== '', contentAsPassed: issue.state === 'for approval' ? issue.contentHash === content.hash : null,
+  })
 }
