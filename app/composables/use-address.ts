@@ -1,4 +1,4 @@
-import type { WritableComputedRef } from 'vue'
+import { computed, type WritableComputedRef } from 'vue'
 
 /**
  * One value of a list that lives in the address, so that a view can be sent to

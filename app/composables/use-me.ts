@@ -1,3 +1,4 @@
+import { computed } from 'vue'
 import type { Me, ProjectRole } from '#shared/schemas/lists'
 
 /** What a person is, in words: `analyst and checker`, `auditor`. */

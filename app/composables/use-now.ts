@@ -1,3 +1,5 @@
+import { onBeforeUnmount, onMounted } from 'vue'
+
 /** The present minute, the same on the server and at hydration, moved on in the browser. */
 export function useNow() {
   const now = useState('now', () => Date.now())

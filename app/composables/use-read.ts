@@ -1,4 +1,4 @@
-import type { MaybeRefOrGetter, Ref } from 'vue'
+import { computed, toValue, watch, type MaybeRefOrGetter, type Ref } from 'vue'
 import type { ApiError } from '#shared/schemas/api-error'
 
 export interface Reading<T> {

@@ -1,4 +1,4 @@
-import { shallowReactive } from 'vue'
+import { computed, onBeforeUnmount, onMounted, shallowReactive } from 'vue'
 
 export interface Shortcut {
   /** As `KeyboardEvent.key` says it; one key, without modifiers. */

@@ -1,3 +1,5 @@
+import { computed } from 'vue'
+
 export type ThemeChoice = 'light' | 'dark' | 'system'
 
 /** Which ground the pages stand on; without a choice they follow the system. */

@@ -1,6 +1,6 @@
 export default defineNuxtPlugin(() => {
   const on = useShortcutsOn()
-  addEventListener('keydown', (event) => {
+  window.addEventListener('keydown', (event) => {
     if (!on.value) return
     const shortcut = shortcutFor(event)
     if (!shortcut) return

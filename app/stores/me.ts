@@ -1,4 +1,5 @@
 import { defineStore } from 'pinia'
+import { ref } from 'vue'
 import type { Me } from '#shared/schemas/lists'
 
 /** Who is signed in; null when nobody is. */
