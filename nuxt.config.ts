@@ -1,5 +1,15 @@
 import { fileURLToPath } from 'node:url'
 
+/** Passed whole: the types of the configuration know only part of what the server build takes. */
+const nitro = {
+  output: process.env.TORQUILL_OUTPUT_DIR ? { dir: process.env.TORQUILL_OUTPUT_DIR } : undefined,
+  alias: { 'next-auth/core': fileURLToPath(new URL('./server/access/next-auth-core.ts', import.meta.url)) },
+  externals: {
+    external: ['@node-rs/argon2'],
+    traceInclude: [fileURLToPath(new URL('./node_modules/next-auth/core/index.js', import.meta.url))],
+  },
+}
+
 export default defineNuxtConfig({
   modules: ['@nuxtjs/tailwindcss', '@pinia/nuxt', '@sidebase/nuxt-auth', 'nuxt-security', '@nuxt/eslint'],
   components: [{ path: '~/components', pathPrefix: true }],
@@ -35,15 +45,7 @@ export default defineNuxtConfig({
   future: { compatibilityVersion: 4 },
   experimental: { payloadExtraction: false },
   compatibilityDate: '2026-01-01',
-  nitro: {
-    output: process.env.TORQUILL_OUTPUT_DIR ? { dir: process.env.TORQUILL_OUTPUT_DIR } : undefined,
-    esbuild: { options: { target: 'node20' } },
-    alias: { 'next-auth/core': fileURLToPath(new URL('./server/access/next-auth-core.ts', import.meta.url)) },
-    externals: {
-      external: ['@node-rs/argon2'],
-      traceInclude: [fileURLToPath(new URL('./node_modules/next-auth/core/index.js', import.meta.url))],
-    },
-  },
+  nitro,
   vite: {
     build: { assetsInlineLimit: 0 },
     resolve: { dedupe: ['prosemirror-model', 'prosemirror-state', 'prosemirror-transform', 'prosemirror-view'] },

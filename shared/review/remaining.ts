@@ -80,7 +80,7 @@ function textLines(facts: RemainingFacts): Remaining[] {
   return [
     ...line('sections', sections.map(s => ({ sectionKey: s.sectionKey, ...(s.blockId ? { blockId: s.blockId } : {}) })), sections[0]?.message ?? '', n => `${n} sections to write or mark not applicable`),
     ...line('ties', brokenTies(facts.doc, facts.results).map(({ blockId }) => ({ blockId })), 'One tied value has lost its calculation', n => `${n} tied values have lost their calculations`),
-    ...(facts.changeNoted ? [] : [{ id: 'change-note', text: 'The revision record does not say what changed', count: 1, target: { sectionKey: 'revision-record' } }]),
+    ...(facts.changeNoted ? [] : [{ id: 'change-note', text: 'The revision record does not say what changed', count: 1, target: { sectionKey: 'revisions' } }]),
   ]
 }
 

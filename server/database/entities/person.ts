@@ -8,7 +8,8 @@ export const PersonSchema = defineEntity({
     /** Lower case, unique for ever. */
     email: p.text().unique(),
     name: p.text(),
-    passwordHash: p.text().nullable().hidden(),
+    /** argon2id. Presenters never read it. */
+    passwordHash: p.text().nullable(),
     auditor: p.boolean().default(false),
     administrator: p.boolean().default(false),
     disabledAt: p.datetime().nullable(),
