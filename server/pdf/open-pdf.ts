@@ -16,11 +16,12 @@ export interface PdfFont {
   descender: number
   ref: () => PdfRef
   encode: (text: string) => [string[], unknown[]]
+  layoutRun: (text: string, features?: unknown) => unknown
   widthOfString: (text: string, size: number, features?: unknown) => number
   lineHeight: (size: number, includeGap?: boolean) => number
 }
 
-export interface PdfPage { dictionary: PdfRef, annotations: PdfRef[], height: number, width: number }
+export interface PdfPage { dictionary: PdfRef, annotations: PdfRef[], xobjects: Record<string, PdfRef>, height: number, width: number }
 
 export interface PdfImage { width: number, height: number, obj: PdfRef | null, finalize?: () => void }
 
@@ -34,6 +35,7 @@ export interface PdfDocument extends NodeJS.ReadableStream {
   appendXML: (xml: string) => void
   endAcroForm: () => void
   ref: (data?: Record<string, unknown>) => PdfRef
+  addContent: (operators: string) => void
   switchToPage: (index: number) => PdfPage
   provideFont: (family: string, bold: boolean, italics: boolean) => PdfFont
   provideImage: (name: string) => PdfImage

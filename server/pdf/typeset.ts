@@ -42,18 +42,35 @@ export interface TextRun { text: string, equation?: Equation, [style: string]: u
 function equationFont(width: number, height: number, depth: number): PdfFont {
   const never = () => { throw new Error('An equation in a line is drawn, not written.') }
   return {
-    id: 'equation', ref: never, encode: never,
+    id: 'equation', ref: never, encode: never, layoutRun: never,
     ascender: (height - depth) * 1000, descender: -depth * 1000,
     widthOfString: text => text === '' ? 0 : width,
     lineHeight: () => height - depth + Math.max(depth, 3),
   }
 }
 
+const remembered = new WeakSet<PdfFont>()
+
+/** pdfkit forgets the shapes of words that are set with font features; tables ask for them, over and over. */
+function remembering(font: PdfFont): PdfFont {
+  if (remembered.has(font)) return font
+  remembered.add(font)
+  const runs = new Map<string, unknown>()
+  const layoutRun = font.layoutRun.bind(font)
+  font.layoutRun = (text, features) => {
+    const key = `${String(features)} ${text}`
+    const run = runs.get(key) ?? layoutRun(text, features)
+    runs.set(key, run)
+    return run
+  }
+  return font
+}
+
 const Base = documentModule.default
 class NoteDocument extends Base {
   override provideFont(family: string, bold: boolean, italics: boolean): PdfFont {
     const [, width, height, depth] = EQUATION_FONT.exec(family) ?? []
-    return depth === undefined ? super.provideFont(family, bold, italics) : equationFont(Number(width), Number(height), Number(depth))
+    return depth === undefined ? remembering(super.provideFont(family, bold, italics)) : equationFont(Number(width), Number(height), Number(depth))
   }
 }
 

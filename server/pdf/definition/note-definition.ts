@@ -1,24 +1,51 @@
-import { cover } from '#server/pdf/definition/cover'
-import { INK } from '#server/pdf/definition/colours'
-import { footer, header } from '#server/pdf/definition/page-frame'
+import type { Content } from 'pdfmake/interfaces'
+import { sectionAnchor } from '#server/pdf/definition/anchors'
+import { INK, INK2, STOP } from '#server/pdf/definition/colours'
+import { contents } from '#server/pdf/definition/contents'
+import { cover, SIGNATURE_PLACE } from '#server/pdf/definition/cover'
+import { generatedSection } from '#server/pdf/definition/generated-sections'
+import { HANG, sectionHeading, together } from '#server/pdf/definition/headings'
+import { noteContext, type NoteContext } from '#server/pdf/definition/note-context'
+import { footer, header, UNCONTROLLED } from '#server/pdf/definition/page-frame'
+import { sectionBlocks } from '#server/pdf/definition/text-blocks'
 import { TEXT } from '#server/pdf/fonts'
 import type { NotePdfData } from '#server/pdf/note-pdf-data'
-import { MARGINS, PAGE, type NoteDefinition } from '#server/pdf/typeset'
+import type { NoteDefinition } from '#server/pdf/typeset'
+import type { NoteSection } from '#shared/note/sections'
 
-/** Where the picture of the signature stands on the cover. */
-export const SIGNATURE_PLACE = { x: MARGINS.left, y: 742, width: PAGE.measure, height: 30 }
+export { SIGNATURE_PLACE }
 
+/** Sections that begin a page of their own. */
+const NEW_PAGE = new Set(['revisions', 'appendices'])
+
+/** An issue as pages: pure, the same data gives the same definition. */
 export function noteDefinition(data: NotePdfData): NoteDefinition {
+  const context = noteContext(data)
   const at = new Date(data.createdAt)
   return {
-    content: [...cover(data)],
+    content: [...cover(context), ...contents(context), ...context.sections.filter(section => section.key !== 'cover').flatMap(section => sectionContent(section, context))],
     header: header(data), footer: footer(data),
     styles: {}, defaultStyle: { font: TEXT, fontSize: 10.5, color: INK, lineHeight: 1.25 },
-    images: {},
+    ...(data.uncontrolled ? { watermark: { text: UNCONTROLLED.toUpperCase(), color: STOP, opacity: 0.07, bold: true, angle: -52, fontSize: 54 } } : {}),
+    images: Object.fromEntries(Object.entries(data.figures).map(([id, { mime, bytes }]) => [id, `data:${mime};base64,${Buffer.from(bytes).toString('base64')}`])),
     info: {
       Title: `${data.number} issue ${data.letter}: ${data.title}`, Subject: 'Torsion substantiation note',
-      Author: data.people.map(person => person.name).filter(Boolean).join(', '),
+      Author: data.people.flatMap(person => person.name ?? []).join(', '),
       Creator: 'Torquill', Producer: 'Torquill', CreationDate: at, ModDate: at,
     },
   }
+}
+
+function sectionContent(section: NoteSection, context: NoteContext): Content[] {
+  const heading = sectionHeading(section.number, section.title, sectionAnchor(section.key), { newPage: NEW_PAGE.has(section.key) })
+  const [first, ...rest] = sectionBody(section, context)
+  return first ? [NEW_PAGE.has(section.key) ? { stack: [heading, first] } : together(heading, first), ...rest] : [heading]
+}
+
+function sectionBody(section: NoteSection, context: NoteContext): Content[] {
+  const aside = (text: string): Content[] => [{ text, italics: true, color: INK2, margin: [HANG, 0, 24, 6] }]
+  if (section.generated) return generatedSection(section.key, context)
+  if (section.notApplicable !== null) return aside(`Not applicable because ${section.notApplicable}`)
+  if (section.empty) return aside('Nothing is written here yet.')
+  return sectionBlocks(section.node, context)
 }

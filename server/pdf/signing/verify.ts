@@ -10,7 +10,7 @@ export type Verdict
     | { valid: false, reason: string }
 
 /** Names that have no business in a released note: anything that acts, hides or arrives later. */
-const FORBIDDEN = ['JavaScript', 'JS', 'OpenAction', 'AA', 'Launch', 'Encrypt', 'OCProperties', 'OCG', 'ObjStm', 'XFA', 'RichMedia', 'Movie', 'Sound', 'GoToR', 'GoToE', 'SubmitForm', 'ImportData', 'Prev', 'XRefStm']
+const FORBIDDEN = ['JavaScript', 'JS', 'OpenAction', 'AA', 'Launch', 'Encrypt', 'OCProperties', 'OCG', 'ObjStm', 'XFA', 'RichMedia', 'Movie', 'Sound', 'GoToR', 'GoToE', 'SubmitForm', 'ImportData']
 const MAX_BYTES = 50 * 1024 * 1024
 
 /**
