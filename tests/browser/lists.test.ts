@@ -64,10 +64,15 @@ describe('signing in', () => {
   })
 
   it('is asked of nobody for a page of somebody else\'s duty: 403 in words', async () => {
-    const { page } = await seatOf(team.analyst)
+    const seat = await seatOf(team.analyst, { colorScheme: 'dark' })
+    const { page } = seat
     const answer = await page.goto('/people')
     expect(answer?.status()).toBe(403)
     await page.getByText('ask one').waitFor()
+    // The page's own content policy must let its scripts run: the ground is set by one of them.
+    expect(await page.evaluate(() => document.documentElement.dataset.theme)).toBe('dark')
+    expect(seat.faults.filter(fault => fault.includes('Content Security Policy'))).toEqual([])
+    expect(await axe(page)).toEqual([])
   })
 })
 
