@@ -6,7 +6,7 @@ export type Glyph
     | { kind: 'bar', x: number, y: number, width: number, height: number }
 
 interface Place { x: number, y: number, scaleX: number, scaleY: number }
-const TRANSFORM = /(translate|scale)\(\s*(-?[\d.]+)(?:\s*,\s*(-?[\d.]+))?\s*\)/g
+const TRANSFORM = /(translate|scale)\(\s*(-?[\d.]+)(?:[\s,]+(-?[\d.]+))?\s*\)/g
 
 /** The place inside a transform; null where it turns or slants. */
 function moved(place: Place, transform: string | undefined): Place | null {

@@ -1,8 +1,8 @@
-import rendererModule from 'pdfmake/js/Renderer.js'
 import { outlineOperators, type Glyph } from '#server/pdf/equation-glyphs'
 import type { Equation } from '#server/pdf/equations'
 import { TEXT } from '#server/pdf/fonts'
 import type { PdfFont, PdfRef } from '#server/pdf/open-pdf'
+import { Renderer } from '#server/pdf/pdfmake-parts'
 
 /** A piece of a line of text. One with an `equation` stands for a drawing set in the line. */
 export interface Inline { x: number, text: string, width: number, font: PdfFont, fontSize: number, color?: string, equation?: Equation }
@@ -14,7 +14,6 @@ export interface Line {
   clone: () => Line
 }
 
-const Renderer = rendererModule.default
 const COLOUR = '0.11 0.153 0.2 rg'
 const n = (value: number) => String(Math.round(value * 10_000) / 10_000)
 

@@ -37,7 +37,7 @@ export interface PdfDocument extends NodeJS.ReadableStream {
   ref: (data?: Record<string, unknown>) => PdfRef
   addContent: (operators: string) => void
   switchToPage: (index: number) => PdfPage
-  provideFont: (family: string, bold: boolean, italics: boolean) => PdfFont
+  provideFont(family: string, bold: boolean, italics: boolean): PdfFont
   provideImage: (name: string) => PdfImage
   addNamedEmbeddedFile: (name: string, filespec: PdfRef) => void
   markContent: (tag: string, options: Record<string, unknown>) => void

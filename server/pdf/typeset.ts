@@ -1,12 +1,9 @@
-import layoutModule from 'pdfmake/js/LayoutBuilder.js'
-import documentModule from 'pdfmake/js/PDFDocument.js'
-import svgMeasureModule from 'pdfmake/js/SVGMeasure.js'
-import { tableLayouts } from 'pdfmake/js/tableLayouts.js'
 import type { Content, DynamicContent, Style, StyleDictionary } from 'pdfmake/interfaces'
 import type { Equation } from '#server/pdf/equations'
 import { fontFaces } from '#server/pdf/fonts'
 import { NoteRenderer } from '#server/pdf/note-renderer'
 import type { PdfDocument, PdfFont } from '#server/pdf/open-pdf'
+import { LayoutBuilder, PdfmakeDocument, SvgMeasure, tableLayouts } from '#server/pdf/pdfmake-parts'
 
 /** What pdfmake lays out, with every image under a name. */
 export interface NoteDefinition {
@@ -66,8 +63,7 @@ function remembering(font: PdfFont): PdfFont {
   return font
 }
 
-const Base = documentModule.default
-class NoteDocument extends Base {
+class NoteDocument extends PdfmakeDocument {
   override provideFont(family: string, bold: boolean, italics: boolean): PdfFont {
     const [, width, height, depth] = EQUATION_FONT.exec(family) ?? []
     return depth === undefined ? remembering(super.provideFont(family, bold, italics)) : equationFont(Number(width), Number(height), Number(depth))
@@ -85,7 +81,7 @@ export async function typeset(definition: NoteDefinition): Promise<PdfDocument> 
     compress: true, bufferPages: true, autoFirstPage: false, font: null, info: definition.info,
   })
   for (const name of Object.keys(definition.images)) await embedImage(document, name)
-  const builder = new layoutModule.default(A4, MARGINS, new svgMeasureModule.default())
+  const builder = new LayoutBuilder(A4, MARGINS, new SvgMeasure())
   builder.registerTableLayouts(tableLayouts)
   const pages = builder.layoutDocument(definition.content, document, definition.styles, definition.defaultStyle, undefined, definition.header, definition.footer, definition.watermark)
   new NoteRenderer(document).renderPages(pages)

@@ -1,7 +1,6 @@
 /** A whole issue as it is handed to the printer: three calculations, every sort of block, answers, a check sheet. All of it is invented. */
 import { createHash } from 'node:crypto'
-import { crc32 } from 'node:zlib'
-import { deflateSync } from 'node:zlib'
+import { crc32, deflateSync } from 'node:zlib'
 import { ENGINE_VERSION, evaluateCalculation } from '#shared/calc/registry'
 import type { Evaluation } from '#shared/calc/types'
 import { canonicalJson } from '#shared/note/canonical'
@@ -133,6 +132,9 @@ export function samplePdfData(change: Partial<NotePdfData> = {}, sections = SECT
     ...change,
   }
 }
+
+/** The same with its first calculation only: quicker to set where the rest does not matter. */
+export const shortPdfData = (): NotePdfData => samplePdfData({}, SECTIONS.slice(0, 1))
 
 /** An issue whose section does not carry its torque, as an uncontrolled print of a draft. */
 export function negativeDraft(): NotePdfData {

@@ -30,7 +30,7 @@ export function cover(context: NoteContext): Content[] {
     {
       columns: [
         { width: '*', text: data.title, fontSize: title, bold: true, lineHeight: 1.1, outline: true, outlineText: `Cover: ${data.number} issue ${data.letter}` },
-        { width: 118, ...stamp(data.state, releaseDay(data)) as object },
+        stamp(data.state, releaseDay(data)),
       ],
       columnGap: 14,
     },

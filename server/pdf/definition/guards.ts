@@ -25,7 +25,7 @@ export function guardList(calculation: NoteCalculation, result: CalcResult, { da
   if (result.guards.length === 0) return [{ text: 'No guard of this method spoke up.', fontSize: 9, color: INK2, margin: [0, 4, 0, 4] }]
   return [{
     table: {
-      dontBreakRows: true, widths: [12, '*', 128],
+      dontBreakRows: true, widths: [12, '*', 152],
       body: result.guards.map((guard) => {
         const answer = data.answers.find(one => one.calcId === calculation.id && one.guardKey === guard.key)
         return [sign(guard.severity), guardText(guard, answer), who(guard, answer)]

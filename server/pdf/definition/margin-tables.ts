@@ -32,28 +32,28 @@ export function allMarginsTable({ margins }: NoteContext): Content {
   const shown = alignDecimals(margins.map(({ row }) => showMargin(row.ms)))
   return ruledTable({
     columns: [
-      { width: '*', head: 'Failure mode' }, { width: 'auto', head: 'Level' }, { width: 'auto', head: 'Case' }, { width: 'auto', head: 'Place' }, { width: 'auto', head: 'Calc.' },
-      { width: 'auto', head: 'Applied', right: true }, { width: 'auto', head: 'Allowed', right: true }, { width: 44, head: 'Margin', right: true }, { width: 84, head: '0 to +1', right: true },
+      { width: '*', head: 'Failure mode' }, { width: 'auto', head: 'Level' }, { width: 'auto', head: 'Calc., case' }, { width: 84, head: 'Place' },
+      { width: 'auto', head: 'Applied', right: true }, { width: 'auto', head: 'Allowed', right: true }, { width: 38, head: 'Margin', right: true }, { width: 58, head: '0 to +1', right: true },
     ],
     rows: margins.map((one, i) => [
-      one.row.modeLabel, one.row.level, one.row.caseId, one.row.place, one.calculation.label, ...quantities(one), shown[i] ?? '', ruler(one.row.ms),
+      one.row.modeLabel, one.row.level, `${one.calculation.label}, ${one.row.caseId}`, one.row.place, ...quantities(one), shown[i] ?? '', ruler(one.row.ms),
     ]),
     ...(margins[0]?.row.ms === null ? {} : { governing: 0 }),
   })
 }
 
-const RULER = { left: 6, zero: 24, one: 78 }
+const RULER = { left: 4, zero: 15, one: 54 }
 
 /** A margin on a line: zero in ink, a wedge where it stands, an arrow where it is beyond. */
 function ruler(ms: number | null): TableCell {
   const { left, zero, one } = RULER
   const tick = (x: number) => `<path d="M${x} 8v-2.5" stroke="${INK3}" stroke-width=".5"/>`
   const at = zero + (ms ?? 2) * (one - zero)
-  const mark = at > one ? `<path d="M73 4.5l5 3.5-5 3.5" fill="none" stroke="${INK2}" stroke-width="1"/>`
+  const mark = at > one ? `<path d="M49 4.5l5 3.5-5 3.5" fill="none" stroke="${INK2}" stroke-width="1"/>`
     : `<path d="M${Math.max(at, left).toFixed(2)} 8l-3-5h6z" fill="${INK}"/>`
   const ticks = [left, ...[0.25, 0.5, 0.75, 1].map(v => zero + v * (one - zero))].map(tick).join('')
   return {
-    svg: `<svg xmlns="http://www.w3.org/2000/svg" width="84" height="12" viewBox="0 0 84 12"><path d="M${left} 8H${one}" stroke="${INK3}" stroke-width=".5"/>${ticks}<path d="M${zero} 2v9" stroke="${INK}" stroke-width=".9"/>${mark}</svg>`,
-    width: 84, alignment: 'right',
+    svg: `<svg xmlns="http://www.w3.org/2000/svg" width="58" height="12" viewBox="0 0 58 12"><path d="M${left} 8H${one}" stroke="${INK3}" stroke-width=".5"/>${ticks}<path d="M${zero} 2v9" stroke="${INK}" stroke-width=".9"/>${mark}</svg>`,
+    width: 58, alignment: 'right',
   }
 }

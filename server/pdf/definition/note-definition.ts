@@ -8,6 +8,7 @@ import { HANG, sectionHeading, together } from '#server/pdf/definition/headings'
 import { noteContext, type NoteContext } from '#server/pdf/definition/note-context'
 import { footer, header, UNCONTROLLED } from '#server/pdf/definition/page-frame'
 import { sectionBlocks } from '#server/pdf/definition/text-blocks'
+import { checkPicture } from '#server/pdf/check-picture'
 import { TEXT } from '#server/pdf/fonts'
 import type { NotePdfData } from '#server/pdf/note-pdf-data'
 import type { NoteDefinition } from '#server/pdf/typeset'
@@ -27,13 +28,31 @@ export function noteDefinition(data: NotePdfData): NoteDefinition {
     header: header(data), footer: footer(data),
     styles: {}, defaultStyle: { font: TEXT, fontSize: 10.5, color: INK, lineHeight: 1.25 },
     ...(data.uncontrolled ? { watermark: { text: UNCONTROLLED.toUpperCase(), color: STOP, opacity: 0.07, bold: true, angle: -52, fontSize: 54 } } : {}),
-    images: Object.fromEntries(Object.entries(data.figures).map(([id, { mime, bytes }]) => [id, `data:${mime};base64,${Buffer.from(bytes).toString('base64')}`])),
+    images: pictures(context),
     info: {
       Title: `${data.number} issue ${data.letter}: ${data.title}`, Subject: 'Torsion substantiation note',
       Author: data.people.flatMap(person => person.name ?? []).join(', '),
       Creator: 'Torquill', Producer: 'Torquill', CreationDate: at, ModDate: at,
     },
   }
+}
+
+/** The pictures that the text shows, each readable. */
+function pictures({ data, doc }: NoteContext): Record<string, string> {
+  const shown: Record<string, string> = {}
+  doc.descendants((node) => {
+    const { fileId, caption } = node.attrs as { fileId: string, caption: string }
+    const figure = node.type.name === 'figure' ? data.figures[fileId] : undefined
+    if (!figure) return !node.isTextblock
+    try {
+      checkPicture(figure.bytes)
+    } catch (fault) {
+      throw new Error(`The picture of the figure “${caption}” cannot be read (${fault instanceof Error ? fault.message : 'unknown fault'}). Save it again as PNG or JPEG and put that in its place.`)
+    }
+    shown[fileId] = `data:${figure.mime};base64,${Buffer.from(figure.bytes).toString('base64')}`
+    return false
+  })
+  return shown
 }
 
 function sectionContent(section: NoteSection, context: NoteContext): Content[] {

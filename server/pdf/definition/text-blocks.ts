@@ -100,7 +100,7 @@ function figure(node: Node, context: NoteContext): Content {
   const { id, fileId, alt, caption } = node.attrs as Record<'id' | 'fileId' | 'alt' | 'caption', string>
   const number = context.numbering.figures.get(id) ?? 'Figure'
   const picture: Content = context.data.figures[fileId]
-    ? { image: fileId, fit: [PAGE.measure - HANG, 420] }
+    ? { image: fileId, fit: [PAGE.measure - HANG, 420] as [number, number] }
     : { text: `The picture of this figure is not in the store. It shows: ${alt}`, italics: true, color: INK2 }
   return { stack: [picture, { text: [{ text: `${number}. `, bold: true }, caption], fontSize: 9, margin: [0, 5, 0, 0] }], unbreakable: true, margin: [HANG, 6, 0, 12] }
 }
