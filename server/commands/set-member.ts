@@ -23,6 +23,6 @@ export function setMember(context: CommandContext, projectId: string, { personId
       if (!old.includes(role)) em.create(ProjectMemberSchema, { id: randomUUID(), project, person, role, since: clock() })
     }
     await em.flush()
-    await recordAct(inside, { ...name, subject: { ...name.subject, label: project.code }, old: { person: personId, roles: old }, new: { person: personId, roles: [...roles].sort() } })
+    await recordAct(inside, { ...name, subject: { ...name.subject, label: `${project.code}: ${person.name}` }, old: { person: personId, roles: old }, new: { person: personId, roles: [...roles].sort() } })
   })
 }

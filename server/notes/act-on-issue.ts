@@ -10,7 +10,7 @@ import type { Standing } from './standing'
  * The frame of every act on an issue: one transaction, the issue's row locked,
  * the ability judged inside it, and refusals left in the trail of the note.
  */
-export async function actOnIssue<T>(context: CommandContext, issueId: string, act: string, needs: Act[], work: (inside: CommandContext, issue: Issue, name: ActName, standing: Standing) => Promise<T>): Promise<T> {
+export async function actOnIssue<T>(context: CommandContext, issueId: string, act: string, needs: [Act, ...Act[]], work: (inside: CommandContext, issue: Issue, name: ActName, standing: Standing) => Promise<T>): Promise<T> {
   const { note, letter } = await findIssue(context.em.fork(), issueId)
   const name = { chain: noteChain(note.id), act, subject: { type: 'issue', id: issueId, label: `${note.number} ${letter}` } }
   return runCommand(context, name, async (inside) => {

@@ -1,7 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql'
 import { refusalOf, abilities } from '#shared/review/abilities'
 import { contributedTo, partIn } from '#shared/review/eligibility'
-import type { RefusalKind, ReviewFacts } from '#shared/review/facts'
+import type { Refusal, RefusalKind, ReviewFacts } from '#shared/review/facts'
 import { compareLetters } from '#shared/review/letters'
 import { isOnItsWay, wasReleased } from '#shared/review/states'
 import type { Abilities, Act } from '#shared/schemas/issue-view'
@@ -51,12 +51,20 @@ export async function abilitiesOf(asker: Asker, standing: Standing, remaining: R
   return abilities(await reviewFacts(asker, standing, remaining))
 }
 
+/** What remains is named in the refusal, so that who asks by other ways than the screens reads it too. */
+function refused(act: Act, refusal: Refusal, remaining: RemainingNow): DomainError {
+  const left = refusal.kind === 'remains' && (act === 'submit' || act === 'pass' || act === 'release') ? remaining[act] : []
+  const message = left.length ? `${refusal.why} (${left.map(r => r.text).join('; ')})` : refusal.why
+  return new DomainError(codeOf[refusal.kind], message, left.length ? { details: { remaining: left } } : {})
+}
+
 /** Refuses unless one of the acts can be done now. @throws DomainError with the sentence of the first act */
-export async function requireAbility(context: CommandContext, issue: Issue, acts: Act[]): Promise<Standing> {
+export async function requireAbility(context: CommandContext, issue: Issue, acts: [Act, ...Act[]]): Promise<Standing> {
   const standing = await loadStanding(context.em, issue)
-  const facts = await reviewFacts(context, standing, remainingNow(standing))
+  const remaining = remainingNow(standing)
+  const facts = await reviewFacts(context, standing, remaining)
   const refusals = acts.map(act => refusalOf(act, facts))
   const first = refusals[0]
-  if (first && refusals.every(Boolean)) throw new DomainError(codeOf[first.kind], first.why)
+  if (first && refusals.every(Boolean)) throw refused(acts[0], first, remaining)
   return standing
 }

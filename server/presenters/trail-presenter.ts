@@ -43,9 +43,10 @@ export async function presentTrail(em: EntityManager, query: TrailQuery) {
   return { items, total: Number(rows[0]?.total ?? 0), page: query.page, size: query.size }
 }
 
-/** Every chain with its length, and the acts that occur, for the filter. */
+/** Every chain with its length, the acts that occur and who acted, for the filter. */
 export async function presentChains(em: EntityManager) {
   const chains = await em.execute<{ chain: string, seq: number, label: string | null }[]>(`select t.chain, t.seq, ${label} as label from trail_head t order by label`)
   const acts = await em.execute<{ act: string }[]>('select distinct act from trail_row order by act')
-  return { chains: chains.map(c => ({ chain: c.chain, label: c.label ?? c.chain, rows: c.seq })), acts: acts.map(a => a.act) }
+  const actors = await em.execute<{ id: string, name: string }[]>('select id, name from person p where exists (select 1 from trail_row where actor_id = p.id) order by name')
+  return { actors, chains: chains.map(c => ({ chain: c.chain, label: c.label ?? c.chain, rows: c.seq })), acts: acts.map(a => a.act) }
 }
