@@ -8,6 +8,7 @@ import { changeMetadata } from '#server/commands/change-metadata'
 import { explainLooseNumber } from '#server/commands/explain-loose-number'
 import { labelSave } from '#server/commands/label-save'
 import { saveNote } from '#server/commands/save-note'
+import { LooseDecisionSchema } from '#server/database/entities/loose-decision'
 import { looseNumbersOf } from '#server/notes/loose'
 import { answerFor } from './answers'
 import { buildDocument, stableId } from './build-document'
@@ -48,12 +49,14 @@ export async function playAnswers(stage: Stage, note: DemoNote, act: ActOf<'answ
   }
 }
 
-/** Explains every loose number that this act has a reason for. */
+/** Explains every loose number that this act has a reason for and that has none yet. */
 export async function playReasons(stage: Stage, note: DemoNote, act: ActOf<'explain'>): Promise<void> {
   const issue = await issueOf(stage, note.number)
   const document = readDocument(JSON.parse(issue.document))
+  const explained = await stage.em.fork().find(LooseDecisionSchema, { issue: issue.id })
   for (const { blockId, text, ordinal } of looseNumbersOf(issue)) {
     const reason = reasonFor(document, act.reasons, { blockId, text })
-    if (reason !== null) await explainLooseNumber(contextOf(stage, act.by, act.at), issue.id, { blockId, text, ordinal, reason })
+    const known = explained.some(one => one.blockId === blockId && one.text === text && one.ordinal === ordinal)
+    if (reason !== null && !known) await explainLooseNumber(contextOf(stage, act.by, act.at), issue.id, { blockId, text, ordinal, reason })
   }
 }

@@ -99,6 +99,7 @@ export const ANGLE_BRACKET: DemoNote = {
       } },
       { act: 'return', by: 'koji', at: '2026-10-02 14:00', reason: 'Say what keeps the toes free at the root, and which way the tolerance runs.' },
       { act: 'save', by: 'tunde', at: '2026-10-05 11:04', sections: angleBracket('passed'), label: 'Toes relieved, tolerance stated' },
+      { act: 'explain', by: 'tunde', at: '2026-10-05 11:10', reasons: REASONS.angle },
       { act: 'submit', by: 'tunde', at: '2026-10-05 11:20', checker: 'koji', approver: 'padraig' },
       { act: 'tick', by: 'koji', at: '2026-10-08 09:50', calcs: ['C1', 'C2'] },
       { act: 'judge', by: 'koji', at: '2026-10-08 10:12', note: 'True for this part.' },

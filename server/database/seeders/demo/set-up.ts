@@ -31,7 +31,9 @@ async function addEverybody(em: EntityManager, time: DemoClock, administrator: P
     added.push([key, await addPerson({ em, actor: administrator, clock: moment('09', index) }, { email, name, auditor, administrator: false })])
   }
   for (const [index, [, person]] of added.entries()) await giveEntry(em, moment('11', index), person, password)
-  return added
+  // Read again: what was made before the password was set knows nothing of it, and signing asks for it.
+  const fresh = em.fork()
+  return Promise.all(added.map(async ([key, { id }]): Promise<[PersonKey, Person]> => [key, await fresh.findOneOrFail(PersonSchema, { id })]))
 }
 
 async function addProjects(em: EntityManager, clock: () => Date, administrator: Person, people: Record<PersonKey, Person>): Promise<[ProjectCode, string][]> {
