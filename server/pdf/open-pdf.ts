@@ -14,6 +14,7 @@ export interface PdfFont {
   /** In thousandths of the font size. */
   ascender: number
   descender: number
+  font: { hasGlyphForCodePoint: (codePoint: number) => boolean }
   ref: () => PdfRef
   encode: (text: string) => [string[], unknown[]]
   layoutRun: (text: string, features?: unknown) => unknown

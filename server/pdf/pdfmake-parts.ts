@@ -18,7 +18,7 @@ interface Builder {
   registerTableLayouts: (layouts: object) => void
   layoutDocument: (
     content: Content, document: object, styles: StyleDictionary, defaultStyle: Style, background: undefined,
-    header: DynamicContent, footer: DynamicContent, watermark: object | undefined
+    header: DynamicContent, footer: DynamicContent, watermark: object | undefined,
   ) => LaidOutPage[]
 }
 

@@ -1,8 +1,9 @@
 import type { Content, DynamicContent, Style, StyleDictionary } from 'pdfmake/interfaces'
 import type { Equation } from '#server/pdf/equations'
-import { fontFaces } from '#server/pdf/fonts'
+import { fontFaces, TEXT } from '#server/pdf/fonts'
 import { NoteRenderer } from '#server/pdf/note-renderer'
 import type { PdfDocument, PdfFont } from '#server/pdf/open-pdf'
+import { preparedText } from '#server/pdf/prepared-text'
 import { LayoutBuilder, PdfmakeDocument, SvgMeasure, tableLayouts } from '#server/pdf/pdfmake-parts'
 
 /** What pdfmake lays out, with every image under a name. */
@@ -39,7 +40,7 @@ export interface TextRun { text: string, equation?: Equation, [style: string]: u
 function equationFont(width: number, height: number, depth: number): PdfFont {
   const never = () => { throw new Error('An equation in a line is drawn, not written.') }
   return {
-    id: 'equation', ref: never, encode: never, layoutRun: never,
+    id: 'equation', font: { hasGlyphForCodePoint: () => true }, ref: never, encode: never, layoutRun: never,
     ascender: (height - depth) * 1000, descender: -depth * 1000,
     widthOfString: text => text === '' ? 0 : width,
     lineHeight: () => height - depth + Math.max(depth, 3),
@@ -83,7 +84,13 @@ export async function typeset(definition: NoteDefinition): Promise<PdfDocument> 
   for (const name of Object.keys(definition.images)) await embedImage(document, name)
   const builder = new LayoutBuilder(A4, MARGINS, new SvgMeasure())
   builder.registerTableLayouts(tableLayouts)
-  const pages = builder.layoutDocument(definition.content, document, definition.styles, definition.defaultStyle, undefined, definition.header, definition.footer, definition.watermark)
+  const face = document.provideFont(TEXT, false, false).font
+  const prepare = (content: Content | null | undefined) => preparedText(content, codePoint => face.hasGlyphForCodePoint(codePoint)) as Content
+  const repeated = (part: DynamicContent): DynamicContent => (page, pages, size) => prepare(part(page, pages, size))
+  const pages = builder.layoutDocument(
+    prepare(definition.content), document, definition.styles, definition.defaultStyle, undefined,
+    repeated(definition.header), repeated(definition.footer), definition.watermark,
+  )
   new NoteRenderer(document).renderPages(pages)
   return document
 }

@@ -1,12 +1,12 @@
-import type { Content } from 'pdfmake/interfaces'
+import type { Content, TableCell } from 'pdfmake/interfaces'
 import { showMargin } from '#shared/units/display'
-import { HAIR, INK, INK2, INK3, STOP } from '#server/pdf/definition/colours'
+import { INK2, INK3, STOP } from '#server/pdf/definition/colours'
 import { isNegative, leastByMode, type NoteContext } from '#server/pdf/definition/note-context'
 import { spaced } from '#server/pdf/definition/page-frame'
 import { shownDay, shownTime } from '#server/pdf/definition/shown-time'
 import { stamp } from '#server/pdf/definition/stamp'
 import { leastMarginTable } from '#server/pdf/definition/margin-tables'
-import { titleBlock } from '#server/pdf/definition/tables'
+import { sideBySide, titleBlock } from '#server/pdf/definition/tables'
 import type { NotePdfData, PdfPerson } from '#server/pdf/note-pdf-data'
 import { MARGINS, PAGE } from '#server/pdf/typeset'
 
@@ -14,10 +14,11 @@ import { MARGINS, PAGE } from '#server/pdf/typeset'
 const PEOPLE_TOP = 600
 export const SIGNATURE_PLACE = { x: MARGINS.left, y: 737, width: PAGE.measure, height: 26 }
 
-const MEANINGS: Record<PdfPerson['role'], string> = {
-  Analyst: 'wrote the note and submitted it for check',
-  Checker: 'followed every step, ticked every calculation and passed the note',
-  Approver: 'confirms the check and releases the note for use',
+/** What each signature says, and what is printed while it is not given. */
+const MEANINGS: Record<PdfPerson['role'], { done: string, open: string }> = {
+  Analyst: { done: 'wrote the note and submitted it for check', open: 'has not submitted it' },
+  Checker: { done: 'followed every step, ticked every calculation and passed the note', open: 'has not passed it' },
+  Approver: { done: 'confirms the check and releases the note for use', open: 'has not released it' },
 }
 
 export const CAUTIONS = 'The results in this note are aids for qualified engineers. They do not take the place of the governing code, the certification basis or the judgement of the responsible approver, and they must be checked independently.'
@@ -74,12 +75,12 @@ export function verdict(context: NoteContext): Content[] {
 const lower = (words: string) => words.charAt(0).toLowerCase() + words.slice(1)
 
 function people(data: NotePdfData): Content {
-  const cell = (person: PdfPerson): Content => ({
+  const cell = (person: PdfPerson): TableCell => ({
     stack: [
       { text: person.role, fontSize: 8.5, color: INK3 },
       { text: person.name ?? 'not named', fontSize: 12.5, bold: true },
-      { text: MEANINGS[person.role], fontSize: 9, color: INK2, margin: [0, 1, 0, 3] },
-      { text: person.at ? `${person.role === 'Analyst' ? 'submitted' : 'signed'} ${shownTime(person.at)}` : 'not signed', fontSize: 8.5, color: person.at ? INK : STOP },
+      { text: person.at ? MEANINGS[person.role].done : MEANINGS[person.role].open, fontSize: 9, color: person.at ? INK2 : STOP, margin: [0, 1, 0, 3] },
+      { text: person.at ? `${person.role === 'Analyst' ? 'submitted' : 'signed'} ${shownTime(person.at)}` : '', fontSize: 8.5 },
       { text: person.save === null ? '' : `save ${person.save}`, fontSize: 8.5, color: INK2 },
     ],
     lineHeight: 1.12,
@@ -89,13 +90,7 @@ function people(data: NotePdfData): Content {
   return {
     absolutePosition: { x: MARGINS.left, y: PEOPLE_TOP },
     stack: [
-      {
-        table: { widths: ['*', '*', '*'], body: [data.people.map(cell)] },
-        layout: {
-          hLineWidth: i => i === 0 ? 1.9 : 0.75, hLineColor: () => INK, vLineWidth: i => i === 0 || i === data.people.length ? 0 : 0.5, vLineColor: () => HAIR,
-          paddingLeft: i => i === 0 ? 0 : 10, paddingRight: () => 8, paddingTop: () => 5, paddingBottom: () => 6,
-        },
-      },
+      ...sideBySide(data.people.map(cell), data.people.map(() => '*')),
       { text: [also, { text: hash, color: INK2 }], fontSize: 8, margin: [0, 6, 0, 0], lineHeight: 1.1 },
     ],
   }

@@ -50,7 +50,7 @@ function methods(context: NoteContext): Content[] {
     const asking = guards.filter(guard => guard.severity !== 'information').length
     return [
       one.label, one.title, isCalcKind(one.kind) ? calcKind(one.kind).title : one.kind, result?.methodRevision ?? '–',
-      { text: parts.flatMap(part => part.split(', ')).filter((part, i, all) => all.indexOf(part) === i).sort().join(', ') || '–' },
+      { text: parts.flatMap(part => part.split(', ')).filter((part, i, all) => all.indexOf(part) === i).sort((a, b) => a.localeCompare(b, 'en', { numeric: true })).join(', ') || '–' },
       asking === 0 ? 'none' : `${answered} of ${asking} answered`,
     ]
   })

@@ -26,17 +26,20 @@ export function leastMarginTable(context: NoteContext, options: { places: boolea
   })
 }
 
-/** Every margin of the note with a ruler from −0.3 to +1. */
+/** `Shear on the flats, ultimate` names its level already. */
+const modeAndLevel = ({ row }: PlacedMargin) => row.modeLabel.endsWith(row.level) ? row.modeLabel : `${row.modeLabel}, ${row.level}`
+
+/** Every margin of the note with a ruler from a little below zero to +1. */
 export function allMarginsTable({ margins }: NoteContext): Content {
   if (margins.length === 0) return { text: 'This issue has no margins.', color: INK3 }
   const shown = alignDecimals(margins.map(({ row }) => showMargin(row.ms)))
   return ruledTable({
     columns: [
-      { width: '*', head: 'Failure mode' }, { width: 'auto', head: 'Level' }, { width: 'auto', head: 'Calc., case' }, { width: 84, head: 'Place' },
+      { width: '*', head: 'Failure mode and level' }, { width: 'auto', head: 'Calc., case' }, { width: 84, head: 'Place' },
       { width: 'auto', head: 'Applied', right: true }, { width: 'auto', head: 'Allowed', right: true }, { width: 38, head: 'Margin', right: true }, { width: 58, head: '0 to +1', right: true },
     ],
     rows: margins.map((one, i) => [
-      one.row.modeLabel, one.row.level, `${one.calculation.label}, ${one.row.caseId}`, one.row.place, ...quantities(one), shown[i] ?? '', ruler(one.row.ms),
+      modeAndLevel(one), `${one.calculation.label}, ${one.row.caseId}`, one.row.place, ...quantities(one), shown[i] ?? '', ruler(one.row.ms),
     ]),
     ...(margins[0]?.row.ms === null ? {} : { governing: 0 }),
   })

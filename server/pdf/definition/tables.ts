@@ -1,5 +1,6 @@
 import type { Content, ContentTable, CustomTableLayout, TableCell } from 'pdfmake/interfaces'
 import { ACCENT, HAIR, INK, INK2, INK3 } from '#server/pdf/definition/colours'
+import { PAGE } from '#server/pdf/typeset'
 
 export type Width = number | 'auto' | '*'
 
@@ -47,27 +48,33 @@ export function ruledTable({ columns, rows, governing, margin = [0, 4, 0, 12] }:
 
 /** Facts side by side under small labels, between a heavy rule and a plain one, as in a title block. */
 export function titleBlock(facts: { label: string, value: Content, width: Width }[]): Content {
-  return {
-    table: {
-      widths: facts.map(fact => fact.width),
-      body: [facts.map(({ label, value }) => ({ stack: [{ text: label, fontSize: 8.5, color: INK3 }, value] }))],
-    },
-    layout: {
-      hLineWidth: i => i === 0 ? 1.9 : 1, hLineColor: () => INK,
-      vLineWidth: (i, node) => i === 0 || i === node.table.widths?.length ? 0 : 0.5, vLineColor: () => HAIR,
-      paddingLeft: i => i === 0 ? 0 : 9, paddingRight: () => 9, paddingTop: () => 4, paddingBottom: () => 6,
-    },
-    fontSize: 9.75, lineHeight: 1.2,
-  }
+  const cells = facts.map(({ label, value }): TableCell => ({ stack: [{ text: label, fontSize: 8.5, color: INK3 }, value] }))
+  return { stack: sideBySide(cells, facts.map(fact => fact.width)), fontSize: 9.75, lineHeight: 1.2 }
 }
 
-/** Numbers of one column under each other by their decimal point: what a shorter one lacks is filled with spaces as wide as digits. */
+/** Cells parted by hairlines between a heavy rule and a plain one. The rules are drawn apart, so that no hairline cuts them. */
+export function sideBySide(cells: TableCell[], widths: Width[]): Content[] {
+  return [
+    heavyRule(PAGE.measure),
+    {
+      table: { widths, body: [cells] },
+      layout: {
+        hLineWidth: () => 0, vLineWidth: i => i === 0 || i === cells.length ? 0 : 0.5, vLineColor: () => HAIR,
+        paddingLeft: i => i === 0 ? 0 : 9, paddingRight: () => 9, paddingTop: () => 4, paddingBottom: () => 6,
+      },
+    },
+    heavyRule(PAGE.measure, 0.75),
+  ]
+}
+
+/** Numbers of one column under each other by their decimal point: what a shorter one lacks is filled with spaces as wide as digits, and a thin one for the point. */
 export function alignDecimals(values: string[]): TableCell[] {
-  const fraction = (value: string) => /^[+\u2212]?[\d\u2009]+(\.\d+)?$/.exec(value)?.[1] ?? ''
+  const plain = (value: string) => /^[+\u2212]?[\d\u2009]+(\.\d+)?$/.exec(value)
+  const fraction = (value: string) => plain(value)?.[1] ?? ''
   const longest = Math.max(0, ...values.map(value => fraction(value).length))
   return values.map((value) => {
-    const missing = /\d$/.test(value) ? longest - fraction(value).length : 0
-    const spaces = missing > 0 && fraction(value) === '' ? `\u2008${'\u2007'.repeat(missing - 1)}` : '\u2007'.repeat(Math.max(missing, 0))
+    const missing = plain(value) ? longest - fraction(value).length : 0
+    const spaces = missing > 0 && fraction(value) === '' ? `\u2009${'\u2007'.repeat(missing - 1)}` : '\u2007'.repeat(Math.max(missing, 0))
     return { text: value + spaces, preserveTrailingSpaces: true }
   })
 }
