@@ -1,4 +1,5 @@
 import { connect } from '#server/database/orm'
+import { demoClock, FIRST_DAY } from '#server/database/seeders/demo/demo-clock'
 import { seedDemo } from '#server/database/seeders/demo/seed-demo'
 import { closeQueue, useQueue } from '#server/jobs/queue'
 import { makeRelease } from '#server/jobs/make-release'
@@ -13,9 +14,11 @@ export async function seed(databaseUrl: string): Promise<string> {
   useQueue(databaseUrl)
   const orm = await connect(databaseUrl)
   try {
-    const signer = await loadSigner(`${dataDir}/authority`)
+    const now = serverClock()
+    // The authority is as old as the story, so that no release is signed before its certificate begins.
+    const signer = await loadSigner(`${dataDir}/authority`, demoClock(now).at(`${FIRST_DAY} 08:00`))
     const done = await seedDemo({
-      em: orm.em.fork(), now: serverClock(),
+      em: orm.em.fork(), now,
       makeRelease: (job, clock) => makeRelease({ em: orm.em.fork(), clock, signer }, job, { last: true }),
     })
     return done ? 'The demonstration is made.' : 'There is somebody here already; the demonstration is left as it is.'

@@ -5,6 +5,8 @@
  */
 const PRESENT = Date.UTC(2026, 9, 12, 9, 0)
 const WEEK = 7 * 86_400_000
+/** The day before everything: the administrator adds people and projects. */
+export const FIRST_DAY = '2026-02-02'
 
 export interface DemoClock {
   /** `2026-06-17 17:12`, in the scenario's own time, as a moment. Throws on another form. */

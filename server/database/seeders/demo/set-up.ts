@@ -7,10 +7,8 @@ import { makeLink } from '#server/commands/send-link'
 import { setMember } from '#server/commands/set-member'
 import { setPassword } from '#server/commands/set-password'
 import { PersonSchema, type Person } from '#server/database/entities/person'
-import type { DemoClock } from './demo-clock'
+import { FIRST_DAY, type DemoClock } from './demo-clock'
 import { PEOPLE, PROJECTS, type DemoPerson, type PersonKey, type ProjectCode } from './people'
-
-const FIRST_DAY = '2026-02-02'
 
 export interface Cast { people: Record<PersonKey, Person>, projects: Record<ProjectCode, string> }
 
