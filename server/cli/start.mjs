@@ -2,7 +2,7 @@
 import { mkdirSync, rmSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { ensureBuild } from './build.mjs'
-import { clusterFolder, databaseUrl, ensureCluster, ensureRoles, ensureServerPrograms, freePort, isRunning, startCluster, stopCluster } from './cluster.mjs'
+import { clusterFolder, databaseUrl, dropDatabase, ensureCluster, ensureRoles, ensureServerPrograms, freePort, isRunning, startCluster, stopCluster } from './cluster.mjs'
 import { ensureNodeModules } from './packages.mjs'
 import { loadSecrets, remember } from './secrets.mjs'
 import { commandOf, environmentOf, startCatcher, startServices } from './services.mjs'
@@ -36,6 +36,8 @@ async function database() {
   if (!wasRunning) remember('postgresPort', pgPort)
   startCluster(folder, pgPort)
   stops.push(() => stopCluster(folder))
+  // A first start that was broken off leaves half a demonstration: it is made anew, whole.
+  if (!secrets.demonstrationMade) dropDatabase({ port: pgPort, ...secrets })
   ensureRoles({ port: pgPort, ...secrets })
   return {
     application: databaseUrl({ role: 'torquill_app', password: secrets.appPassword, port: pgPort }),
@@ -56,8 +58,10 @@ async function main() {
     ...environmentOf({ databaseUrl: application, baseUrl, authSecret: loadSecrets().authSecret, dataDir, smtpUrl: `smtp://127.0.0.1:${mailPort}`, demonstration: true, organisation: 'Quellmark Airframe Works', caughtMailDir }),
     DATABASE_OWNER_URL: owner,
   }
+  if (!loadSecrets().demonstrationMade) say('Making the demonstration (about a minute, once)')
   const say1 = text => text.trim() && say(text.trim())
   for (const step of ['migrate', 'seed']) say1(run(process.execPath, commandOf(build, step), { env }))
+  remember('demonstrationMade', true)
   const catcher = await startCatcher(build, { port: mailPort, folder: caughtMailDir })
   stops.push(catcher.stop)
   delete env.DATABASE_OWNER_URL
