@@ -43,7 +43,7 @@ function equationFont(width: number, height: number, depth: number): PdfFont {
     id: 'equation', font: { hasGlyphForCodePoint: () => true }, ref: never, encode: never, layoutRun: never,
     ascender: (height - depth) * 1000, descender: -depth * 1000,
     widthOfString: text => text === '' ? 0 : width,
-    lineHeight: () => height - depth + Math.max(depth, 3),
+    lineHeight: () => height - depth + Math.max(depth + 1.5, 3),
   }
 }
 

@@ -15,6 +15,7 @@ import { setEquation } from '#server/pdf/equations'
 import { equationRun, PAGE } from '#server/pdf/typeset'
 
 const SKETCH = 296
+const SKETCH_HEIGHT = 330
 const OUTPUTS = PAGE.measure - SKETCH - 16
 
 /** A calculation where it stands in the text: what it is, its sketch, its results and what its method warns of. */
@@ -67,8 +68,11 @@ function overview(result: CalcResult): Content {
   const governing = result.margins.find(row => row.key === result.governing)
   const figures: Content = { stack: [...(governing ? [governingMargin(governing)] : []), outputsTable(result)] }
   if (!result.drawing) return { ...figures, margin: [0, 8, 0, 8] } as Content
+  const { box } = result.drawing
+  // A tall section is drawn narrower, so that the sketch never outgrows the page.
+  const width = Math.max(90, Math.min(SKETCH, SKETCH_HEIGHT * box.width / Math.max(box.height, 1e-9)))
   return {
-    columns: [{ width: SKETCH, svg: drawingToSvg(result.drawing, { width: SKETCH, theme: 'print' }) }, { width: OUTPUTS, ...figures as object }],
+    columns: [{ width: SKETCH, svg: drawingToSvg(result.drawing, { width, theme: 'print' }), fit: [SKETCH, SKETCH_HEIGHT + 60] }, { width: OUTPUTS, ...figures as object }],
     columnGap: 16, margin: [0, 8, 0, 8],
   } as Content
 }

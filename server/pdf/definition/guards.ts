@@ -2,6 +2,7 @@ import type { Content } from 'pdfmake/interfaces'
 import type { CalcResult, Guard, Severity } from '#shared/calc/types'
 import type { NoteCalculation } from '#shared/note/calculations'
 import { CAUTION, HAIR, INFORMATION, INK, INK2, INK3, STOP } from '#server/pdf/definition/colours'
+import { rowsFit } from '#server/pdf/definition/keep-together'
 import type { NoteContext } from '#server/pdf/definition/note-context'
 import { shownDay } from '#server/pdf/definition/shown-time'
 import { TABLE_TEXT } from '#server/pdf/definition/tables'
@@ -23,13 +24,13 @@ const sign = (severity: Severity): Content => ({
 /** What the method warns of in one calculation, with the answers given and who accepted them. */
 export function guardList(calculation: NoteCalculation, result: CalcResult, { data }: NoteContext): Content[] {
   if (result.guards.length === 0) return [{ text: 'No guard of this method spoke up.', fontSize: 9, color: INK2, margin: [0, 4, 0, 4] }]
+  const rows = result.guards.map((guard) => {
+    const answer = data.answers.find(one => one.calcId === calculation.id && one.guardKey === guard.key)
+    return [sign(guard.severity), guardText(guard, answer), who(guard, answer)]
+  })
   return [{
     table: {
-      dontBreakRows: true, widths: [12, '*', 152],
-      body: result.guards.map((guard) => {
-        const answer = data.answers.find(one => one.calcId === calculation.id && one.guardKey === guard.key)
-        return [sign(guard.severity), guardText(guard, answer), who(guard, answer)]
-      }),
+      dontBreakRows: rowsFit(rows), widths: [12, '*', 152], body: rows,
     },
     layout: {
       hLineWidth: (i, node) => i === node.table.body.length ? 1 : 0.5, hLineColor: (i, node) => i === node.table.body.length ? INK : HAIR,

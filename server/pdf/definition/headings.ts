@@ -26,6 +26,3 @@ export function subHeading(number: string, runs: TextRun[], id: string, parent: 
     outline: true, outlineText: `${number}  ${plain}`, outlineParentId: parent,
   } as Content
 }
-
-/** Keeps a heading with what follows it: a heading never ends a page. */
-export const together = (...content: Content[]): Content => ({ stack: content, unbreakable: true })

@@ -4,7 +4,8 @@ import { INK, INK2, STOP } from '#server/pdf/definition/colours'
 import { contents } from '#server/pdf/definition/contents'
 import { cover, SIGNATURE_PLACE } from '#server/pdf/definition/cover'
 import { generatedSection } from '#server/pdf/definition/generated-sections'
-import { HANG, sectionHeading, together } from '#server/pdf/definition/headings'
+import { HANG, sectionHeading } from '#server/pdf/definition/headings'
+import { headed } from '#server/pdf/definition/keep-together'
 import { noteContext, type NoteContext } from '#server/pdf/definition/note-context'
 import { footer, header, UNCONTROLLED } from '#server/pdf/definition/page-frame'
 import { sectionBlocks } from '#server/pdf/definition/text-blocks'
@@ -58,7 +59,9 @@ function pictures({ data, doc }: NoteContext): Record<string, string> {
 function sectionContent(section: NoteSection, context: NoteContext): Content[] {
   const heading = sectionHeading(section.number, section.title, sectionAnchor(section.key), { newPage: NEW_PAGE.has(section.key) })
   const [first, ...rest] = sectionBody(section, context)
-  return first ? [NEW_PAGE.has(section.key) ? { stack: [heading, first] } : together(heading, first), ...rest] : [heading]
+  if (!first) return [heading]
+  // A forced page inside a block that is kept whole would be lost.
+  return [NEW_PAGE.has(section.key) ? { stack: [heading, first] } : headed(heading, first), ...rest]
 }
 
 function sectionBody(section: NoteSection, context: NoteContext): Content[] {

@@ -1,5 +1,6 @@
 import type { Content, ContentTable, CustomTableLayout, TableCell } from 'pdfmake/interfaces'
 import { ACCENT, HAIR, INK, INK2, INK3 } from '#server/pdf/definition/colours'
+import { rowsFit } from '#server/pdf/definition/keep-together'
 import { PAGE } from '#server/pdf/typeset'
 
 export type Width = number | 'auto' | '*'
@@ -41,7 +42,7 @@ export function ruledTable({ columns, rows, governing, margin = [0, 4, 0, 12] }:
     return { ...as, ...bold, ...plain(cell) } as TableCell
   }))
   return {
-    table: { headerRows: 1, keepWithHeaderRows: 1, dontBreakRows: true, widths: columns.map(column => column.width), body: [head, ...body] },
+    table: { headerRows: 1, keepWithHeaderRows: 1, dontBreakRows: rowsFit(rows), widths: columns.map(column => column.width), body: [head, ...body] },
     layout: ruled(governing), margin, ...TABLE_TEXT,
   }
 }

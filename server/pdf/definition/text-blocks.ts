@@ -7,6 +7,7 @@ import { blockEquation } from '#server/pdf/definition/block-equation'
 import { headingAnchor, sectionAnchor } from '#server/pdf/definition/anchors'
 import { HANG, subHeading } from '#server/pdf/definition/headings'
 import { inlineRuns } from '#server/pdf/definition/inline-text'
+import { headed, rowsFit } from '#server/pdf/definition/keep-together'
 import type { NoteContext } from '#server/pdf/definition/note-context'
 import { TABLE_TEXT } from '#server/pdf/definition/tables'
 import { PAGE } from '#server/pdf/typeset'
@@ -16,8 +17,18 @@ const INDENT: [number, number, number, number] = [HANG, 0, 24, 6]
 /** The blocks of a written section in order. */
 export function sectionBlocks(section: Node, context: NoteContext): Content[] {
   const blocks: Content[] = []
-  section.forEach(node => blocks.push(block(node, context, String(section.attrs.key))))
-  return blocks
+  let heading: Content | null = null
+  section.forEach((node) => {
+    const content = block(node, context, String(section.attrs.key))
+    if (node.type.name === 'heading') {
+      if (heading) blocks.push(heading)
+      heading = content
+    } else {
+      blocks.push(heading ? headed(heading, content) : content)
+      heading = null
+    }
+  })
+  return heading ? [...blocks, heading] : blocks
 }
 
 function block(node: Node, context: NoteContext, sectionKey: string): Content {
@@ -82,7 +93,7 @@ function table(node: Node, context: NoteContext): Content {
     stack: [
       ...(number ? [{ text: number, fontSize: 8.5, color: INK2 }] : []),
       {
-        table: { headerRows: heads, dontBreakRows: true, widths: (body[0] ?? []).map(() => '*'), body },
+        table: { headerRows: heads, dontBreakRows: rowsFit(body), widths: (body[0] ?? []).map(() => '*'), body },
         layout: {
           hLineWidth: (i: number) => i === 0 ? 0 : i === heads ? 1 : i === body.length ? 0.75 : 0.5,
           hLineColor: (i: number) => i === heads || i === body.length ? INK : HAIR,
