@@ -85,7 +85,8 @@ function people(data: NotePdfData): Content {
     ],
     lineHeight: 1.12,
   })
-  const also = data.contributors.length > 0 ? `Also contributed: ${data.contributors.join(', ')}. ` : ''
+  const others = data.contributors.filter(name => !data.people.some(person => person.name === name))
+  const also = others.length > 0 ? `Also contributed: ${others.join(', ')}. ` : ''
   const hash = data.contentHash ? `Content ${spaced(data.contentHash, 64)}` : 'Content not yet hashed'
   return {
     absolutePosition: { x: MARGINS.left, y: PEOPLE_TOP },
