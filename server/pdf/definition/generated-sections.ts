@@ -19,7 +19,7 @@ export function generatedSection(key: string, context: NoteContext): Content[] {
     case 'summary': return [{ text: verdict(context), margin: [HANG, 0, 24, 4] }, leastMarginTable(context, { places: true }), paragraph(`Certification basis: ${context.data.project.basis || 'not given'}.`)]
     case 'method': return methods(context)
     case 'margins': return [
-      paragraph('A margin is allowable over applied, less one, cut to two decimals toward the unsafe side. It is decided on the unrounded number.'),
+      paragraph('A margin is allowable over applied, less one, cut to two decimals toward the unsafe side. It is decided on the unrounded number. Each row is the worst place of its calculation, mode and case; the other places are in the attached data.'),
       allMarginsTable(context),
     ]
     case 'verification': return verification(context)

@@ -29,8 +29,24 @@ export function leastMarginTable(context: NoteContext, options: { places: boolea
 /** `Shear on the flats, ultimate` names its level already. */
 const modeAndLevel = ({ row }: PlacedMargin) => row.modeLabel.endsWith(row.level) ? row.modeLabel : `${row.modeLabel}, ${row.level}`
 
-/** Every margin of the note with a ruler from a little below zero to +1. */
-export function allMarginsTable({ margins }: NoteContext): Content {
+/**
+ * The least margin of each calculation, mode and case. The rows of the other
+ * walls and corners can only be larger: they stand in the data that is attached.
+ */
+function worstPlaces(margins: PlacedMargin[]): PlacedMargin[] {
+  const seen = new Set<string>()
+  // Least first, so that the first of a key is its worst place.
+  return margins.filter(({ calculation, row }) => {
+    const key = `${calculation.id} ${row.mode} ${row.caseId}`
+    if (seen.has(key)) return false
+    seen.add(key)
+    return true
+  })
+}
+
+/** The margins of the note with a ruler from a little below zero to +1. */
+export function allMarginsTable({ margins: all }: NoteContext): Content {
+  const margins = worstPlaces(all)
   if (margins.length === 0) return { text: 'This issue has no margins.', color: INK3 }
   const shown = alignDecimals(margins.map(({ row }) => showMargin(row.ms)))
   return ruledTable({
