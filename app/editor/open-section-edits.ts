@@ -1,0 +1,99 @@
+import type { TypedQuantity } from '#shared/calc/types'
+import type { LoadingInput, MaterialInput, OpenSectionInputs, WallEndInput, WallInput } from '#shared/calc/kinds/open-section/schema'
+import type { UnitId } from '#shared/units/units'
+
+const empty = (unit: UnitId): TypedQuantity => ({ text: '', unit })
+const degrees = (text: string): TypedQuantity => ({ text, unit: '°' })
+
+export const lengthUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? 'mm' : 'in')
+export const torqueUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? 'N·m' : 'lbf·in')
+export const rateUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? '°/m' : '°/ft')
+export const stressUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? 'MPa' : 'ksi')
+export const temperatureUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? '°C' : '°F')
+
+/** a, b, … z, then aa, ab: the first that no wall bears. */
+export function nextLetters(used: readonly string[]): string {
+  for (let n = 0; ; n++) {
+    const letters = n < 26 ? letter(n) : letter(Math.floor(n / 26) - 1) + letter(n % 26)
+    if (!used.includes(letters)) return letters
+  }
+}
+const letter = (n: number) => String.fromCharCode(97 + n)
+
+/** `prefix` and the first number that is free. */
+export function nextNumbered(prefix: string, used: readonly string[], digits = 1): string {
+  for (let n = 1; ; n++) {
+    const id = `${prefix}${String(n).padStart(digits, '0')}`
+    if (!used.includes(id)) return id
+  }
+}
+
+/** The next wall goes on from the end of the last one, square to it, as thick and of the same material. */
+export function nextWall(inputs: OpenSectionInputs): WallInput {
+  const last = inputs.walls.at(-1)
+  const unit = lengthUnit(inputs)
+  const nodes = inputs.walls.flatMap(wall => [wall.from, wall.to])
+  return {
+    id: nextLetters(inputs.walls.map(wall => wall.id)),
+    name: '',
+    from: last?.to ?? '1',
+    to: nextNumbered('', last ? nodes : ['1']),
+    end: { by: 'length', length: empty(unit), direction: degrees('90') },
+    t: last ? { ...last.t } : empty(unit),
+    material: last?.material ?? inputs.materials[0]?.id ?? 'M1',
+  }
+}
+
+/** Another way to give the end of a wall, keeping what both ways share. */
+export function endBy(by: string, end: WallEndInput, unit: UnitId): WallEndInput {
+  const direction = 'direction' in end ? end.direction : degrees('0')
+  if (by === 'point') return { by: 'point', x: empty(unit), y: empty(unit) }
+  if (by === 'arc') return { by: 'arc', radius: empty(unit), sweep: degrees('90'), direction }
+  return { by: 'length', length: 'length' in end ? end.length : empty(unit), direction }
+}
+
+/** Another way to load the section, keeping the torque or the cases already typed. */
+export function loadingBy(by: string, inputs: OpenSectionInputs): LoadingInput {
+  const now = inputs.loading
+  if (by === 'torque') {
+    const first = now.by === 'cases' ? now.cases[0] : undefined
+    return { by: 'torque', torque: first?.torque ?? empty(torqueUnit(inputs)), level: first?.level ?? 'limit', temperature: first?.temperature ?? null, source: first?.source ?? '' }
+  }
+  if (by === 'cases') {
+    const cases = now.by === 'torque'
+      ? [{ id: 'L01', title: '', source: now.source, level: now.level, temperature: now.temperature, torque: now.torque }]
+      : now.cases.map(({ id, title, source, level, temperature }) => ({ id, title, source, level, temperature, torque: empty(torqueUnit(inputs)) }))
+    return { by: 'cases', cases }
+  }
+  const heads = now.by === 'torque' ? [{ id: 'L01', title: '', source: now.source, level: now.level, temperature: now.temperature }] : now.cases
+  return { by: 'rate', cases: heads.map(({ id, title, source, level, temperature }) => ({ id, title, source, level, temperature, rate: empty(rateUnit(inputs)) })) }
+}
+
+/** One more row under the load cases, at the level and from the source of the last one. */
+export function withNextCase(inputs: OpenSectionInputs): LoadingInput {
+  const now = inputs.loading
+  if (now.by === 'torque') return withNextCase({ ...inputs, loading: loadingBy('cases', inputs) })
+  const last = now.cases.at(-1)
+  const head = { id: nextNumbered('L', now.cases.map(each => each.id), 2), title: '', source: last?.source ?? '', level: last?.level ?? 'limit' as const, temperature: last?.temperature ?? null }
+  if (now.by === 'cases') return { by: 'cases', cases: [...now.cases, { ...head, torque: empty(now.cases.at(-1)?.torque.unit ?? torqueUnit(inputs)) }] }
+  return { by: 'rate', cases: [...now.cases, { ...head, rate: empty(now.cases.at(-1)?.rate.unit ?? rateUnit(inputs)) }] }
+}
+
+/** A material with the fields of another left empty. */
+export function nextMaterial(inputs: OpenSectionInputs): MaterialInput {
+  const stress = stressUnit(inputs)
+  const modulus: UnitId = inputs.units === 'SI' ? 'GPa' : 'Msi'
+  return {
+    id: nextNumbered('M', inputs.materials.map(each => each.id)),
+    name: '', specification: '', form: '', thicknessRange: '', family: 'aluminium', basis: 'none', loadPath: 'single', source: '', edition: '',
+    E: empty(modulus), G: empty(modulus), nu: empty(''), Ftu: empty(stress), Fty: empty(stress), Fsu: empty(stress), Fsy: null,
+    temperatureFrom: null, temperatureTo: null, knockdown: [], knockdownSource: '',
+  }
+}
+
+/** Nodes at which two walls or more meet: where a corner radius can stand. */
+export function meetingNodes(inputs: OpenSectionInputs): string[] {
+  const count = new Map<string, number>()
+  for (const wall of inputs.walls) for (const node of new Set([wall.from, wall.to])) count.set(node, (count.get(node) ?? 0) + 1)
+  return [...count].filter(([, walls]) => walls > 1).map(([node]) => node)
+}
