@@ -28,7 +28,7 @@ export default defineNuxtConfig({
       link: [{ rel: 'icon', type: 'image/svg+xml', href: '/favicon.svg' }],
     },
   },
-  css: ['~/assets/css/fonts.css', '~/assets/css/tokens.css', '~/assets/css/base.css'],
+  css: ['katex/dist/katex.min.css', '~/assets/css/fonts.css', '~/assets/css/tokens.css', '~/assets/css/base.css'],
   runtimeConfig: {
     authSecret: '',
     databaseUrl: '',

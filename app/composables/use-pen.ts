@@ -23,8 +23,7 @@ export function usePen(issueId: string, first: Writer, mayWrite: boolean) {
       writer.value = answer.value.writer
       held.value = answer.value.writer?.you === true
       refused.value = null
-    }
-    else if (answer.status !== 0) {
+    } else if (answer.status !== 0) {
       held.value = false
       refused.value = answer.error.message
       await look()

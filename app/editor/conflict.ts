@@ -50,11 +50,9 @@ export function reapply(tr: Transaction, chosen: readonly Clash[]): Transaction 
     const there = now.get(change.key)
     if (change.mine === null) {
       if (there) tr.delete(there.pos, there.pos + there.node.nodeSize)
-    }
-    else if (there) {
+    } else if (there) {
       tr.replaceWith(there.pos, there.pos + there.node.nodeSize, Fragment.from(change.mine))
-    }
-    else {
+    } else {
       tr.insert(placeFor(tr.doc, change, now), change.mine)
     }
   }

@@ -15,8 +15,7 @@ export function keepUnsent(storage: Storage, unsent: Unsent): boolean {
   try {
     storage.setItem(key(unsent.issueId, unsent.personId), JSON.stringify(unsent))
     return true
-  }
-  catch {
+  } catch {
     return false
   }
 }
@@ -31,8 +30,7 @@ export function readUnsent(storage: Storage, issueId: string, personId: string):
   try {
     const unsent = JSON.parse(text) as Unsent
     return Array.isArray(unsent.steps) && Number.isInteger(unsent.baseSave) ? unsent : null
-  }
-  catch {
+  } catch {
     return null
   }
 }

@@ -46,8 +46,7 @@ export const useIssueStore = defineStore('issue', () => {
       const answer = await ask<IssueView>(`/api/issues/${issue.id}/${path}`, { method, body })
       if (answer.ok) take(answer.value)
       return answer
-    }
-    finally {
+    } finally {
       busy.value = false
     }
   }
