@@ -8,12 +8,19 @@ import { showMargin } from '#shared/units/display'
 const LONG_BAR = 10
 const WAGNER_CAUTION = 0.02
 const WAGNER_STOP = 0.1
+/** Degrees over the whole length at limit. */
+const TWIST_CAUTION = 10
+const TWIST_STOP = 20
+/** Typed angles are compared a hair above, so that 20° is not above 20°. */
+const HAIR = 1e-12
 const FATIGUE_SHARE = 0.3
 const FATIGUE_FACTOR = 1.5
 const SMALL_MARGIN = 0.05
 
+interface Rotation { c: CaseSolution, level: 'limit' | 'ultimate', state: WagnerState | null }
+
 export function loadingGuards(s: Solution): Guard[] {
-  return [...endGuards(s), ...yieldGuard(s), ...fatigue(s), ...s.cases.flatMap(c => wagner(c)), ...s.cases.flatMap(c => totalTwist(c)), ...margins(s)]
+  return [...endGuards(s), ...yieldGuard(s), ...fatigue(s), ...wagner(s), ...totalTwist(s), ...margins(s)]
 }
 
 function endGuards(s: Solution): Guard[] {
@@ -30,8 +37,7 @@ function endGuards(s: Solution): Guard[] {
     if (ends === 'restrained' && s.kL !== null && s.kL >= LONG_BAR) {
       guards.push(fired('G-17', { values: { kL: s.kL }, message: `kL = ${figure(s.kL)}, at or above ${LONG_BAR}: the restrained end changes the twist little but carries a normal stress.` }))
     }
-  }
-  else if (declarations.builtIn) {
+  } else if (declarations.builtIn) {
     guards.push(fired('G-18', {
       values: s.kL === null ? {} : { kL: s.kL },
       message: `A support is declared to hold the section, and free warping is assumed there${s.kL === null ? '' : ` (kL = ${figure(s.kL)})`}.`,
@@ -73,28 +79,31 @@ function fatigue(s: Solution): Guard[] {
   return guards
 }
 
-function wagner(c: CaseSolution): Guard[] {
-  const at = (level: 'limit' | 'ultimate', w: WagnerState | null): { level: string, w: WagnerState }[] => w && w.ratio > WAGNER_CAUTION ? [{ level, w }] : []
-  // One guard per case: the level that is worse says it all, and the ultimate ratio is never the smaller one.
-  const worst = [...at('limit', c.wagnerLimit), ...at('ultimate', c.wagnerUltimate)].sort((a, b) => b.w.ratio - a.w.ratio)[0]
-  if (!worst) return []
-  const { level, w } = worst
-  const stop = w.ratio > WAGNER_STOP
-  const stress = w.stress === null ? '' : `, with a longitudinal stress of ${figure(w.stress)} MPa`
+/** One guard for the calculation, naming the worst case and level: what is written for it covers the milder ones. */
+function wagner(s: Solution): Guard[] {
+  const states = s.cases.flatMap((c): Rotation[] => [{ c, level: 'limit', state: c.wagnerLimit }, { c, level: 'ultimate', state: c.wagnerUltimate }])
+  const worst = states.reduce<Rotation | undefined>((high, next) => next.state && next.state.ratio > (high?.state?.ratio ?? WAGNER_CAUTION) ? next : high, undefined)
+  if (!worst?.state) return []
+  const { c, level, state } = worst
+  const stop = state.ratio > WAGNER_STOP
+  const stress = state.stress === null ? '' : `, with a longitudinal stress of ${figure(state.stress)} MPa`
   return [fired('G-28', {
-    of: c.model.id, caseId: c.model.id, severity: stop ? 'stop' : 'caution', values: { ratio: w.ratio },
-    message: `At ${level} load case ${c.model.id} has a Wagner ratio of ${figure(w.ratio)}, above ${stop ? WAGNER_STOP : WAGNER_CAUTION}: at this rate of twist the section carries ${figure(w.torque)} N·mm${stress}.`,
+    caseId: c.model.id, severity: stop ? 'stop' : 'caution', values: { ratio: state.ratio },
+    message: `At ${level} load case ${c.model.id} has a Wagner ratio of ${figure(state.ratio)}, above ${stop ? WAGNER_STOP : WAGNER_CAUTION}: at this rate of twist the section carries ${figure(state.torque)} N·mm${stress}.`,
   })]
 }
 
-function totalTwist(c: CaseSolution): Guard[] {
-  if (c.twist === null) return []
-  const twist = degrees(Math.abs(c.twist) * c.toLimit)
-  if (twist <= 10 * (1 + 1e-12)) return []
-  const stop = twist > 20 * (1 + 1e-12)
+/** One guard for the calculation, naming the case that twists the bar most. */
+function totalTwist(s: Solution): Guard[] {
+  const twistOf = (c: CaseSolution) => degrees(Math.abs(c.twist ?? 0) * c.toLimit)
+  const worst = s.cases.reduce<CaseSolution | undefined>((high, next) => high && twistOf(high) >= twistOf(next) ? high : next, undefined)
+  if (!worst) return []
+  const twist = twistOf(worst)
+  if (twist <= TWIST_CAUTION * (1 + HAIR)) return []
+  const stop = twist > TWIST_STOP * (1 + HAIR)
   return [fired('G-29', {
-    of: c.model.id, caseId: c.model.id, severity: stop ? 'stop' : 'caution', deviable: stop, values: { 'twist, °': twist },
-    message: `At limit load case ${c.model.id} twists the bar by ${figure(twist)}°, more than ${stop ? 20 : 10}°.`,
+    caseId: worst.model.id, severity: stop ? 'stop' : 'caution', deviable: stop, values: { 'twist, °': twist },
+    message: `At limit load case ${worst.model.id} twists the bar by ${figure(twist)}°, more than ${stop ? TWIST_STOP : TWIST_CAUTION}°.`,
   })]
 }
 

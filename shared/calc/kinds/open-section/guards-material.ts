@@ -56,25 +56,36 @@ function constants(m: MaterialModel): Guard[] {
   })]
 }
 
+/** One guard per material, naming the case furthest outside its data and how many others are outside too. */
 function temperatures(s: Solution, m: MaterialModel): Guard[] {
-  return s.model.cases.flatMap((c): Guard[] => {
-    const reason = temperatureFault(m, c)
-    return reason === null || !c.temperature
-      ? []
-      : [fired('G-30', { of: `${m.id}:${c.id}`, caseId: c.id, values: { 'T, °C': c.temperature.value }, message: `Case ${c.id} is at ${figure(c.temperature.value)} °C: ${reason}.` })]
+  const outside = s.model.cases.flatMap((c) => {
+    const fault = temperatureFault(m, c)
+    return fault === null ? [] : [{ c, ...fault }]
   })
+  const [worst] = outside.sort((a, b) => b.beyond - a.beyond)
+  if (!worst) return []
+  const others = outside.length - 1
+  const more = others === 0 ? '' : others === 1 ? '; 1 more case is outside too' : `; ${others} more cases are outside too`
+  return [fired('G-30', {
+    of: m.id, caseId: worst.c.id, values: { 'T, °C': worst.T },
+    message: `Case ${worst.c.id} is at ${figure(worst.T)} °C: ${worst.reason}${more}.`,
+  })]
 }
 
-function temperatureFault(m: MaterialModel, c: CaseModel): string | null {
+interface TemperatureFault { T: number, beyond: number, reason: string }
+
+function temperatureFault(m: MaterialModel, c: CaseModel): TemperatureFault | null {
   const T = c.temperature?.value
   if (T === undefined) return null
   const first = m.knockdown[0]?.temperature
   const last = m.knockdown[m.knockdown.length - 1]?.temperature
   const from = m.temperatureFrom ?? first ?? null
   const to = m.temperatureTo ?? last ?? null
-  if (from !== null && T < from - 1e-9) return `below the range of material ${m.id}, which begins at ${figure(from)} °C`
-  if (to !== null && T > to + 1e-9) return `above the range of material ${m.id}, which ends at ${figure(to)} °C`
-  if (m.family === 'aluminium' && T > HOT_ALUMINIUM && (last === undefined || last < T)) return `above ${HOT_ALUMINIUM} °C, where material ${m.id} (aluminium) has no knock-down factor`
+  if (from !== null && T < from - 1e-9) return { T, beyond: from - T, reason: `below the range of material ${m.id}, which begins at ${figure(from)} °C` }
+  if (to !== null && T > to + 1e-9) return { T, beyond: T - to, reason: `above the range of material ${m.id}, which ends at ${figure(to)} °C` }
+  if (m.family === 'aluminium' && T > HOT_ALUMINIUM && (last === undefined || last < T)) {
+    return { T, beyond: T - HOT_ALUMINIUM, reason: `above ${HOT_ALUMINIUM} °C, where material ${m.id} (aluminium) has no knock-down factor` }
+  }
   return null
 }
 
@@ -88,8 +99,7 @@ function factorGuards(s: Solution): Guard[] {
         message: `The basis is declared to work with partial factors (${figure(factors.ultimate)} on loads), and its paragraph is not quoted.`,
       }))
     }
-  }
-  else {
+  } else {
     if (factors.ultimate < USUAL_FACTOR - HAIR) guards.push(fired('G-35', { of: 'safety', values: { 'factor of safety': factors.ultimate }, message: `The factor of safety is ${figure(factors.ultimate)}, below ${USUAL_FACTOR}.` }))
     if (declarations.fitting && factors.special < FITTING_FACTOR - HAIR) guards.push(fired('G-35', { of: 'fitting', values: { 'special factor': factors.special }, message: `The part is declared a fitting and the special factor in force is ${figure(factors.special)}, below ${FITTING_FACTOR}.` }))
   }

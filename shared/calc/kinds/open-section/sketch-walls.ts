@@ -91,8 +91,7 @@ function closeEnd(s: Solution, wall: ModelWall, end: End, left: Pt[], right: Pt[
   if (end.atStart) {
     left.splice(0, 1, node, ccw)
     right.splice(0, 1, node, cw)
-  }
-  else {
+  } else {
     left.splice(-1, 1, cw, node)
     right.splice(-1, 1, ccw, node)
   }

@@ -22,7 +22,7 @@ describe('drawing as SVG', () => {
     for (const theme of ['light', 'dark', 'print'] as const) {
       const svg = drawingToSvg(drawingOf(hatInputs()), { width: 300, theme })
       expect(svg).toMatch(/^<svg xmlns="http:\/\/www\.w3\.org\/2000\/svg" width="300" height="[\d.]+" viewBox="0 0 300 [\d.]+" role="img" aria-label="[^"]+">.*<\/svg>$/)
-      expect(svg).not.toMatch(/<script|<style|style=|href|url\(|var\(|NaN|undefined/)
+      expect(svg).not.toMatch(/<script|<style|\sstyle=|href|url\(|var\(|NaN|undefined/)
     }
   })
   it('escapes every text that people give', () => {
@@ -31,7 +31,8 @@ describe('drawing as SVG', () => {
       shapes: [{ type: 'label', at: [1, 1], text: '<script>&"\'\u0000', role: 'note' }, { type: 'balloon', at: [2, 2], text: '</text><x>', leaderTo: [3, 3] }],
     }
     const svg = drawingToSvg(drawing, { width: 100, theme: 'light' })
-    expect(svg).not.toMatch(/<script|<x>|\u0000/)
+    expect(svg).not.toMatch(/<script|<x>/)
+    expect(svg).not.toContain('\u0000')
     expect(svg).toContain('&lt;script&gt;&amp;&quot;&#39;')
     expect(parsed(svg).querySelector('svg')?.getAttribute('aria-label')).toBe('"><script>alert(1)</script>')
   })
