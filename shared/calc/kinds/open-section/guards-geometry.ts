@@ -2,6 +2,7 @@
 import type { Guard } from '#shared/calc/types'
 import { fired } from '#shared/calc/kinds/open-section/guard-catalogue'
 import { SEAM_TOLERANCE } from '#shared/calc/kinds/open-section/parse-geometry'
+import type { Unusual } from '#shared/calc/kinds/open-section/model'
 import type { CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'
 import { degrees, figure, lengthShown } from '#shared/calc/kinds/open-section/say'
 
@@ -128,11 +129,25 @@ function outsideTheory(s: Solution): Guard[] {
   ]
 }
 
+/** One per field; the load cases share one, which names the most unusual and how many others there are. */
 function unusual(s: Solution): Guard[] {
-  return s.model.unusual.map(u => fired('G-44', {
-    of: u.path, values: { value: u.value },
-    message: `${capital(u.label)} is ${figure(Math.abs(u.value) / u.typical)} times what is usual for its kind; the unit “${u.unit}” may be wrong.`,
-  }))
+  const fields = new Map<string, Unusual[]>()
+  for (const u of s.model.unusual) {
+    const field = u.path.replace(/^loading\.cases\.\d+\./, 'loading.')
+    fields.set(field, [...fields.get(field) ?? [], u])
+  }
+  return [...fields].flatMap(([field, found]) => {
+    const [worst] = [...found].sort((a, b) => strangeness(b) - strangeness(a))
+    if (!worst) return []
+    const more = found.length === 1 ? '' : ` ${found.length - 1} more ${found.length === 2 ? 'case is' : 'cases are'} as unusual.`
+    return [fired('G-44', {
+      of: field, values: { value: worst.value },
+      message: `${capital(worst.label)} is ${figure(Math.abs(worst.value) / worst.typical)} times what is usual for its kind; the unit “${worst.unit}” may be wrong.${more}`,
+    })]
+  })
 }
+
+/** How far from the usual size, up or down alike. */
+const strangeness = (u: Unusual) => Math.abs(Math.log(Math.abs(u.value) / u.typical))
 
 const capital = (sentence: string) => sentence.charAt(0).toUpperCase() + sentence.slice(1)

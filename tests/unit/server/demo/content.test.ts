@@ -97,6 +97,24 @@ describe.each(ISSUES.filter(({ issue }) => released(issue)))('$name', ({ note, i
   })
 })
 
+describe.each(ISSUES)('$name', ({ note, issue }) => {
+  it('answers no guard that does not fire, and none twice', () => {
+    let sections: DemoSection[] = []
+    const idle: string[] = []
+    for (const act of issue.acts) {
+      if (act.act === 'save') sections = act.sections
+      if (act.act !== 'answer') continue
+      const fired = [...evaluated(note, sections).results].flatMap(([calc, result]) => result.guards.filter(toAnswer).map(guard => ({ calc, guard })))
+      for (const answer of act.answers) {
+        const met = fired.filter(({ calc, guard }) => (answer.calc === '*' || answer.calc === calc) && (answer.guard === guard.id || answer.guard === guard.key))
+        if (met.length === 0) idle.push(`${answer.calc} ${answer.guard}`)
+      }
+      expect(new Set(act.answers.map(answer => `${answer.calc} ${answer.guard}`)).size).toBe(act.answers.length)
+    }
+    expect(idle).toEqual([])
+  })
+})
+
 /** Least margin of a calculation as the register shows it. */
 function shown(note: DemoNote, letter: string, calculation: string, key: string): string {
   const issue = note.issues.find(one => one.letter === letter)

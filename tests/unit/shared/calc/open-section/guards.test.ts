@@ -106,6 +106,9 @@ describe('geometry', () => {
   it('G-44 unusual size', () => {
     fires(strip({ length: quantity('501', 'm') }), 'G-44:length', 'information')
     silent(strip({ length: quantity('499', 'm') }), 'G-44:length')
+    const cases = ['0.04', '0.03', '1000'].map((text, i) => ({ id: `L${i}`, title: '', source: '', level: 'limit' as const, torque: quantity(text, 'N·m'), temperature: null }))
+    const odd = guardsOf(strip({ loading: { by: 'cases', cases } })).filter(g => g.id === 'G-44')
+    expect(odd).toMatchObject([{ key: 'G-44:loading.torque', message: expect.stringMatching(/case L1 .* 1 more case is/) }])
   })
 })
 
