@@ -93,9 +93,12 @@ export type Shape
     | { type: 'label', at: [number, number], text: string, role: ShapeRole, anchor?: 'start' | 'middle' | 'end' }
     | { type: 'balloon', at: [number, number], text: string, leaderTo: [number, number] }
     | { type: 'dimension', from: [number, number], to: [number, number], offset: number, text: string }
-    | { type: 'centroid' | 'shear-centre', at: [number, number] }
+    | { type: 'centroid', at: [number, number] }
+    /** `side`: on which side its letter stands, +1 right and up. */
+    | { type: 'shear-centre', at: [number, number], side?: [number, number] }
     /** `away` points from the material to where the flag stands; up where absent. */
-    | { type: 'peak', at: [number, number], text: string, away?: [number, number] }
+    /** `flag`: where the leader bends, and where the line under the value ends. */
+    | { type: 'peak', at: [number, number], text: string, away?: [number, number], flag?: { knee: [number, number], end: [number, number] } }
     | { type: 'torque', at: [number, number], radius: number, text: string }
 export type ShapeRole = 'wall' | 'axis' | 'dimension' | 'flow' | 'note'
 export interface Drawing {

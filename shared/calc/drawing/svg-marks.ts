@@ -90,29 +90,38 @@ function drawCentroid(canvas: Canvas, shape: Spot): string {
     + text(canvas, [x + 9, y + 12], 'C', { ground: true })
 }
 
-function drawShearCentre(canvas: Canvas, shape: Spot): string {
+function drawShearCentre(canvas: Canvas, shape: Of<'shear-centre'>): string {
   const [x, y] = canvas.px(shape.at)
   const { ink } = canvas.palette
+  const [right, up] = shape.side ?? [1, 1]
   return `<circle cx="${n(x)}" cy="${n(y)}" r="3.6" fill="none" stroke="${ink}" stroke-width=".9"/>`
     + segment([x - 7, y], [x + 7, y], ink, 0.9) + segment([x, y - 7], [x, y + 7], ink, 0.9)
-    + text(canvas, [x + 9, y - 6], 'S', { ground: true })
+    + text(canvas, [x + 9 * right, y + (up > 0 ? -6 : 14)], 'S', { ground: true, anchor: right > 0 ? 'start' : 'end' })
 }
 
-/** A solid wedge on the face, a leader and a flag with the value; the flag turns where the edge is near. */
+/** A solid wedge on the face, a leader and a flag with the value. */
 function drawPeak(canvas: Canvas, shape: Of<'peak'>): string {
   const [x, y] = canvas.px(shape.at)
   const { ink } = canvas.palette
   const out = unit(shape.away ? [shape.away[0], -shape.away[1]] : [0, -1])
-  const long = textWidth(shape.text, 11.5 * canvas.mark) * 1.12 + 6
-  const wanted = out[0] < -0.3 ? -1 : 1
-  const fits = (way: number) => x + way * (26 + long) > 4 && x + way * (26 + long) < canvas.width - 4
-  const way = fits(wanted) ? wanted : -wanted
-  const knee: Pixel = [x + way * 26, y + (out[1] > 0.3 ? 26 : -26)]
-  const tip: Pixel = [knee[0] + way * long, knee[1]]
+  const { knee, way } = flagPlace(canvas, shape, out)
+  const tip: Pixel = [knee[0] + way * flagLength(canvas, shape.text), knee[1]]
   const base: Pixel = [x + out[0] * 8.5, y + out[1] * 8.5]
   return segment([x, y], knee, ink, 0.7) + segment(knee, tip, ink, 0.7)
     + polygon([[x + out[0] * 0.5, y + out[1] * 0.5], [base[0] - out[1] * 4.5, base[1] + out[0] * 4.5], [base[0] + out[1] * 4.5, base[1] - out[0] * 4.5]], `fill="${ink}"`)
     + text(canvas, [way > 0 ? knee[0] + 2 : tip[0] + 2, knee[1] - 4], shape.text, { weight: 600, ground: true })
+}
+
+const flagLength = (canvas: Canvas, value: string) => textWidth(value, 11.5 * canvas.mark) * 1.12 + 6
+
+/** The place the sketch chose; without one the flag stands aside of the face and turns where the edge is near. */
+function flagPlace(canvas: Canvas, { at: peak, text: value, flag }: Of<'peak'>, out: Pixel): { knee: Pixel, way: number } {
+  if (flag) return { knee: canvas.px(flag.knee), way: flag.end[0] < flag.knee[0] ? -1 : 1 }
+  const [x, y] = canvas.px(peak)
+  const wanted = out[0] < -0.3 ? -1 : 1
+  const tip = (way: number) => x + way * (26 + flagLength(canvas, value))
+  const way = tip(wanted) > 4 && tip(wanted) < canvas.width - 4 ? wanted : -wanted
+  return { knee: [x + way * 26, y + (out[1] > 0.3 ? 26 : -26)], way }
 }
 
 /** Right-hand about z, which points out of the page: counter-clockwise, over the top. */

@@ -8,10 +8,25 @@ import { significant } from '#shared/units/display'
 import { fromEngine } from '#shared/units/units'
 
 /** Section space as the sketch sees it: millimetres per pixel at nominal size, and what is already taken. */
-export interface Room { pixel: number, centre: Pt, taken: { at: Pt, radius: number }[] }
+export interface Room { pixel: number, centre: Pt, taken: Spot[] }
+export interface Spot { at: Pt, radius: number }
 
 const MOST_MARKED = 24
 const distance = (a: Pt, b: Pt) => Math.hypot(a[0] - b[0], a[1] - b[1])
+
+/** Distance of the nearest of these spots from any of the points, negative where one lies inside. */
+export const clearOf = (points: Pt[], spots: Spot[]): number => Math.min(...points.flatMap(p => spots.map(spot => distance(p, spot.at) - spot.radius)))
+
+/** The walls as rows of spots that reach `beyond` pixels over their faces. */
+export function wallSpots(s: Solution, room: Room, beyond: number): Spot[] {
+  return s.walls.flatMap(({ wall }) => {
+    const count = Math.min(Math.max(1, Math.ceil(wall.length / (8 * room.pixel))), 60)
+    return Array.from({ length: count + 1 }, (_, i) => {
+      const m = middleOf(s, wall, i / count)
+      return { at: m.at, radius: m.half + beyond * room.pixel }
+    })
+  })
+}
 
 interface Middle { at: Pt, direction: number, half: number }
 export function middleOf(s: Solution, wall: ModelWall, part = 0.5): Middle {
@@ -44,8 +59,9 @@ export function dimensions(s: Solution, room: Room, extent: { min: Pt, max: Pt }
     const offset = freeOffset(m, room)
     const [from, to] = midLine(s, wall).map(st => st.at)
     if (!from || !to) return []
-    for (const part of [0.15, 0.5, 0.85]) room.taken.push({ at: polar(middleOf(s, wall, part).at, m.direction + Math.PI / 2, offset), radius: 9 * room.pixel })
-    return [{ type: 'dimension', from, to, offset, text: value }]
+    const shape = { type: 'dimension' as const, from, to, offset, text: value }
+    keepClear(shape, room)
+    return [shape]
   })
   return [...walls, ...overall(extent, unit, seen, room)]
 }
@@ -65,7 +81,18 @@ function overall({ min, max }: { min: Pt, max: Pt }, unit: 'mm' | 'cm' | 'm' | '
   const height = short(fromEngine(max[1] - min[1], unit))
   if (max[0] - min[0] > 20 * room.pixel && !seen.has(width)) shapes.push({ type: 'dimension', from: [min[0], min[1]], to: [max[0], min[1]], offset: -52 * room.pixel, text: width })
   if (max[1] - min[1] > 20 * room.pixel && !seen.has(height)) shapes.push({ type: 'dimension', from: [min[0], min[1]], to: [min[0], max[1]], offset: 52 * room.pixel, text: height })
+  for (const shape of shapes) if (shape.type === 'dimension') keepClear(shape, room)
   return shapes
+}
+
+/** Keeps other marks off the line of a dimension, and further off its value. */
+function keepClear({ from, to, offset }: Extract<Shape, { type: 'dimension' }>, room: Room): void {
+  const normal = Math.atan2(to[1] - from[1], to[0] - from[0]) + Math.PI / 2
+  const count = 2 * Math.ceil(distance(from, to) / (12 * room.pixel))
+  for (let i = 0; i <= count; i++) {
+    const at: Pt = [from[0] + (to[0] - from[0]) * i / count, from[1] + (to[1] - from[1]) * i / count]
+    room.taken.push({ at: polar(at, normal, offset), radius: (i === count / 2 ? 9 : 3) * room.pixel })
+  }
 }
 
 const short = (value: number) => significant(Number(value.toPrecision(4)), 4).replace(/(\.\d*?)0+(?=$|×)/u, '$1').replace(/\.(?=$|×)/u, '')

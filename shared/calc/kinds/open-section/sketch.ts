@@ -2,11 +2,11 @@
 import type { Drawing, Shape } from '#shared/calc/types'
 import { decisiveCases } from '#shared/calc/kinds/open-section/working-cases'
 import { shownUnits } from '#shared/calc/kinds/open-section/shown-units'
-import { axes, balloons, dimensions, flowArrows, middleOf, outerSide, thicknessNotes, type Room } from '#shared/calc/kinds/open-section/sketch-marks'
-import { filletShapes, leavingDirection, midLine, polar, wallShapes, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
-import type { CaseSolution, CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'
-import { significant, showQuantity, withUnit } from '#shared/units/display'
-import { fromEngine } from '#shared/units/units'
+import { axes, balloons, dimensions, flowArrows, thicknessNotes, type Room } from '#shared/calc/kinds/open-section/sketch-marks'
+import { letterSide, peakMark } from '#shared/calc/kinds/open-section/sketch-peak'
+import { filletShapes, midLine, polar, wallShapes, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
+import type { CaseSolution, Solution } from '#shared/calc/kinds/open-section/solution'
+import { showQuantity, withUnit } from '#shared/units/display'
 
 /** Pixels of the picture at its nominal size, and of the section inside it. */
 const PICTURE = 470
@@ -52,7 +52,7 @@ function centreMarks(s: Solution, room: Room): Shape[] {
   if (!p) return []
   const [C, S]: [Pt, Pt] = [[p.centroid.x, p.centroid.y], [p.shearCentre.x, p.shearCentre.y]]
   room.taken.push({ at: C, radius: 14 * room.pixel }, { at: S, radius: 20 * room.pixel }, { at: polar(C, Math.PI / 4, 20 * room.pixel), radius: 20 * room.pixel })
-  return [...axes(C, room), { type: 'centroid', at: C }, { type: 'shear-centre', at: S }]
+  return [...axes(C, room), { type: 'centroid', at: C }, { type: 'shear-centre', at: S, side: letterSide(s, S, room) }]
 }
 
 /** The torque stands over everything else, above the shear centre where that lies within the width of the section. */
@@ -62,46 +62,6 @@ function torqueMark(s: Solution, shown: CaseSolution | null, extent: { min: Pt, 
   const top = Math.max(...below.flatMap(shape => reachOf(shape, pixel)).map(point => point[1]))
   const x = Math.min(Math.max(s.sectorial.shearCentre.x, extent.min[0]), extent.max[0])
   return [{ type: 'torque', at: [x, top - 20 * pixel], radius: 40 * pixel, text: `T ${showQuantity(shown.torque, 'torque', unit)}` }]
-}
-
-/** The highest stress of the case shown: at a corner where its factor makes it the largest, else on the outer face of its wall. */
-function peakMark(s: Solution, c: CaseSolution, room: Room): Shape[] {
-  if (!(c.tauMax > 0)) return []
-  const unit = shownUnits(s.model).stress
-  const say = (tau: number) => `${significant(fromEngine(tau, unit), 3)}\u2009${unit} peak`
-  const corner = c.tauCorner !== null && c.tauCorner > c.tauMax ? s.corners.find(k => k.node === c.tauCornerNode) : undefined
-  const inner = corner && innerPoint(s, corner)
-  if (inner && c.tauCorner !== null) return peakAt(inner.at, inner.away, say(c.tauCorner), room)
-  const wall = s.walls.find(w => w.wall.id === c.tauMaxWall)?.wall
-  if (!wall) return []
-  const m = middleOf(s, wall, 0.75)
-  const normal = m.direction + outerSide(m, room.centre) * Math.PI / 2
-  return peakAt(polar(m.at, normal, m.half), polar([0, 0], normal, 1), say(c.tauMax), room)
-}
-
-function peakAt(at: Pt, away: Pt, text: string, room: Room): Shape[] {
-  const direction = Math.atan2(away[1], away[0])
-  const flag = polar(at, direction, 26 * room.pixel)
-  const side = away[0] < -0.3 ? -1 : 1
-  for (const step of [0, 26, 52, 78]) room.taken.push({ at: [flag[0] + side * step * room.pixel, flag[1]], radius: 14 * room.pixel })
-  return [{ type: 'peak', at, text, away }]
-}
-
-/** The inner surface of a two-walled corner, in the direction that halves the angle between its walls. */
-function innerPoint(s: Solution, corner: CornerSolution): { at: Pt, away: Pt } | null {
-  const node = s.model.nodes.find(n => n.id === corner.node)
-  const [a, b] = corner.walls
-  if (!node || !a || !b) return null
-  const [u, v] = [polar([0, 0], leavingDirection(a, corner.node), 1), polar([0, 0], leavingDirection(b, corner.node), 1)]
-  const middle: Pt = [u[0] + v[0], u[1] + v[1]]
-  const long = Math.hypot(middle[0], middle[1])
-  if (long < 1e-6) return null
-  const away: Pt = [middle[0] / long, middle[1] / long]
-  const half = Math.acos(Math.min(Math.max(u[0] * away[0] + u[1] * away[1], -1), 1))
-  // From the node to the inner surface: half the thickness, and what the radius fills.
-  const r = corner.junction?.radius.value ?? 0
-  const depth = (corner.worst.t.value / 2 + r) / Math.sin(half) - r
-  return { at: [node.x + away[0] * depth, node.y + away[1] * depth], away }
 }
 
 /** Everything that is drawn, with room for its lettering, at least as wide as the nominal picture. */
@@ -130,7 +90,7 @@ function reachOf(shape: Shape, p: number): Pt[] {
       return [shape.from, shape.to].flatMap(end => around(polar(end, along + Math.PI / 2, out), 12 * p))
     }
     case 'centroid': case 'shear-centre': return around(shape.at, 18 * p)
-    case 'peak': return around(shape.at, 34 * p, 44 * p)
+    case 'peak': return [...around(shape.at, 12 * p), ...(shape.flag ? [shape.flag.knee, shape.flag.end].flatMap(end => around(end, 2 * p, 18 * p)) : around(shape.at, 34 * p, 44 * p))]
     case 'torque': return [...around(shape.at, Math.max(shape.radius, shape.text.length * 3.2 * p), 0), [shape.at[0], shape.at[1] + shape.radius + 24 * p]]
   }
 }
