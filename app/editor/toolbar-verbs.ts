@@ -65,13 +65,13 @@ export function toolbarVerbs(newId: () => string, opened: (calcId: string) => vo
     ] },
     { label: 'Marks', verbs: [
       mark('bold', 'Bold', 'Bold', 'Ctrl B'), mark('italic', 'Italic', 'Italic', 'Ctrl I'), mark('underline', 'Underline', 'Underline', 'Ctrl U'),
-      mark('strike', 'Strike', 'Strike through'), mark('subscript', 'Sub', 'Subscript'), mark('superscript', 'Super', 'Superscript'),
+      mark('strike', 'Strike', 'Strike through'), mark('subscript', 'Subscript', 'Subscript'), mark('superscript', 'Superscript', 'Superscript'),
       { id: 'link', words: 'Link', run: editor => open(editor, { kind: 'link' }), on: editor => editor.isActive('link') },
     ] },
     { label: 'Insert', verbs: [
       { id: 'table', words: 'Table', label: 'Insert table', run: editor => chain(editor).insertTable({ rows: 3, cols: 3, withHeaderRow: true }).run() },
       { id: 'equation', words: 'Equation', label: 'Insert equation', run: editor => open(editor, { kind: 'equation', pos: null, inline: false }) },
-      { id: 'symbol', words: 'Symbol', label: 'Insert equation in the line', run: editor => open(editor, { kind: 'equation', pos: null, inline: true }) },
+      { id: 'symbol', words: 'Symbol', label: 'Symbol: insert an equation in the line', run: editor => open(editor, { kind: 'equation', pos: null, inline: true }) },
       { id: 'figure', words: 'Figure', label: 'Insert figure', run: editor => open(editor, { kind: 'figure', pos: null }) },
       { id: 'calculation', words: 'Calculation', label: 'Insert calculation', run: addCalculation },
       { id: 'tied', words: 'Tied value', label: 'Insert tied value', keys: 'Ctrl Shift E', run: openTie },

@@ -91,7 +91,7 @@ class SectionView implements NodeView {
     verb.className = 't small writing-only'
     const title = this.template?.title ?? ''
     verb.textContent = reason === null ? 'Not applicable' : 'Write this section'
-    verb.setAttribute('aria-label', reason === null ? `Mark ${title} not applicable` : `Write ${title} after all`)
+    verb.setAttribute('aria-label', reason === null ? `Mark ${title} not applicable` : `Write this section: ${title}`)
     verb.addEventListener('click', () => {
       this.setReason(reason === null ? '' : null)
       if (reason === null) this.aside.querySelector('textarea')?.focus()
