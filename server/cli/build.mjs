@@ -24,9 +24,20 @@ export function sourceHash() {
   return hash.digest('hex').slice(0, 16)
 }
 
-/** Keeps the newest few builds: an older one may still be running, the oldest are not. */
+const lives = (pid) => {
+  try {
+    return process.kill(pid, 0)
+  } catch {
+    return false
+  }
+}
+
+/** Whether a server runs from this build: each leaves its process number in it. */
+const runs = build => readdirSync(build).some(name => name.startsWith('running-') && lives(Number(name.slice(8))))
+
+/** Keeps the newest few builds, and every one that runs. */
 function forgetOld(folder, keep) {
-  const builds = readdirSync(folder).filter(name => /^[0-9a-f]{16}$/.test(name)).map(name => ({ name, at: statSync(join(folder, name)).mtimeMs })).sort((a, b) => b.at - a.at)
+  const builds = readdirSync(folder).filter(name => /^[0-9a-f]{16}$/.test(name) && !runs(join(folder, name))).map(name => ({ name, at: statSync(join(folder, name)).mtimeMs })).sort((a, b) => b.at - a.at)
   for (const { name } of builds.slice(keep)) rmSync(join(folder, name), { recursive: true, force: true })
 }
 

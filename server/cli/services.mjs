@@ -1,4 +1,5 @@
 // The running parts of Torquill: server, job worker, mail catcher. Started in order, stopped in the reverse order.
+import { rmSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { root, start, stop, until } from './shell.mjs'
 
@@ -26,11 +27,14 @@ export async function startServices(build, env, { port, onLine = () => {}, onEnd
   const worker = start(process.execPath, [join(build, 'worker.mjs')], { env }, line => onLine(`worker: ${line}`))
   const server = start(process.execPath, [join(build, 'server/index.mjs')], { env: { ...env, HOST: '127.0.0.1', PORT: String(port), NITRO_HOST: '127.0.0.1', NITRO_PORT: String(port) } }, line => onLine(`server: ${line}`))
   const children = [server, worker]
+  const mark = join(build, `running-${process.pid}`)
+  writeFileSync(mark, '')
   let stopping = false
   for (const child of children) child.once('exit', code => !stopping && onEnd(code))
   const stopAll = async () => {
     stopping = true
     for (const child of children) await stop(child)
+    rmSync(mark, { force: true })
   }
   try {
     await until(async () => {

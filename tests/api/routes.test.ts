@@ -71,6 +71,13 @@ describe('every route', () => {
   })
 })
 
+describe('files and PDFs', () => {
+  it.each(['/files/', '/pdf/'])('%s answers 401 to a stranger and 404 to somebody of another project', async (path) => {
+    expect((await new Client().get(`${path}${issue.id}`)).status).toBe(401)
+    expect((await outsider.get(`${path}${issue.id}`)).status).toBe(404)
+  })
+})
+
 describe('a body', () => {
   it('that is no JSON is refused in words', async () => {
     const response = await analyst.raw('POST', '/api/notes', { body: '{"title":', headers: { 'content-type': 'application/json' } })
