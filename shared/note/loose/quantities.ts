@@ -80,9 +80,16 @@ function isForeign(beside: Beside): boolean {
   return beside.equated && beside.symbol !== null && (beside.symbol.length <= 2 || /^(?=.*[A-Z\u0370-\u03ff])\p{L}[\p{L}\p{N}]{1,3}$/u.test(beside.symbol))
 }
 
-/** A bare number counts only where it is clearly set equal: `J of 3 walls` is none. */
+/** What stands between the first equality and the last: `= 186/(1.5 × 65.7) − 1 =`. */
+const ARITHMETIC = /=[\d\s.,()+\u2212\u2013\-×·*/]{1,100}=\s*$/u
+
+/** The words before a number, a line of plain arithmetic left out, so that its result stands beside its symbol. */
+const before = (text: string, at: number): string => text.slice(Math.max(0, at - 140), at).replace(ARITHMETIC, '= ')
+
+/** A bare number counts only where it is clearly set equal: `J of 3 walls` is none, nor is a term of a sum or product. */
 function bareCounts(read: Read, beside: Beside, text: string): boolean {
   const { token } = read
+  if (/^\s?[/×·*+\u2212\u2013]/u.test(text.slice(read.to, read.to + 2))) return false
   if (!token.plain) return true
   return beside.equated && !/^\s\p{Ll}/u.test(text.slice(read.to, read.to + 2))
 }
@@ -108,7 +115,7 @@ function quantityOf(read: Read, scanned: ScannedText, index: FactIndex): Quantit
     const cell = fromHeadings(read, scanned, index)
     if (cell) return [cell]
   }
-  const beside = besideNumber(scanned.text.slice(Math.max(0, token.from - 140), token.from))
+  const beside = besideNumber(before(scanned.text, token.from))
   const near = factsBeside(beside, index)
   const { unit } = read
   const place = { token, from: token.from, to: read.to }

@@ -18,13 +18,13 @@ const FAULTS: [sort: string, sentence: string, found: string, key: string][] = [
   ['wrong digit', 'At kL = 5.774 the root effect has died out before mid-span.', '5.774', 'kL'],
   ['wrong digit', 'The shear centre, y, lies at 36.447 mm from the brims.', '36.447 mm', 'y_S'],
   ['wrong digit', 'Case L09 brings a torque of 27 340 N·mm to the free end.', '27 340 N·mm', 'T@L09'],
-  ['wrong digit', 'The corner factor at node 2 is 1.0329.', '1.0329', 'Kc:2'],
+  ['wrong digit', 'The torsional stiffness GJ is 101.74 N·m² for the whole bar.', '101.74 N·m²', 'GJ'],
   ['wrong digit', 'In B02 the clip carries a peak shear stress of 7.667 ksi.', '7.667 ksi', 'tau_max@B02'],
   // Digits that changed places.
   ['transposed', 'The torsion constant J is 3846.2 mm⁴.', '3846.2 mm⁴', 'J'],
   ['transposed', 'The torque in L07 is 64 350 N·mm at limit.', '64 350 N·mm', 'T@L07'],
   ['transposed', 'The end of the carrier turns through 15.81° over its length in L07, which is 0.2362 rad.', '0.2362 rad', 'twist@L07'],
-  ['transposed', 'Developed, the mid-line has a length of 134.87 mm.', '134.87 mm', 'developed'],
+  ['transposed', 'The developed mid-line length is 134.87 mm.', '134.87 mm', 'developed'],
   ['transposed', 'The largest sectorial coordinate is 352.66 mm², at the brim tip.', '352.66 mm²', 'omega_max'],
   ['transposed', 'In B02 the torque on the clip is 421.6 lbf·in.', '421.6 lbf·in', 'T@B02'],
   // The right digits with the wrong unit.
@@ -35,7 +35,7 @@ const FAULTS: [sort: string, sentence: string, found: string, key: string][] = [
   ['wrong unit', 'With G = 26.2 MPa the stiffness follows.', '26.2 MPa', 'G:QM-107'],
   ['wrong unit', 'The clip sees a torque of 412.6 lbf·ft in B02.', '412.6 lbf·ft', 'T@B02'],
   ['wrong unit', 'Γ = 2.7536×10⁶ mm⁴ includes the secondary part.', '2.7536×10⁶ mm⁴', 'Gamma'],
-  ['wrong unit', 'The developed length of the mid-line is 143.87 in.', '143.87 in', 'developed'],
+  ['wrong unit', 'The developed mid-line length, 143.87 in, is that of the blank.', '143.87 in', 'developed'],
   ['wrong unit', 'The torsional stiffness GJ is 101.24 N·mm².', '101.24 N·mm²', 'GJ'],
   ['wrong unit', 'The peak shear stress of the clip in B02 is 7.967 psi.', '7.967 psi', 'tau_max@B02'],
   // The right value of the wrong case, or wall.
@@ -79,6 +79,10 @@ const FAULTS: [sort: string, sentence: string, found: string, key: string][] = [
   ['sign', 'The margin in L07 is −0.88.', '−0.88', 'MS:shear-ultimate@L07'],
 ]
 
+/** The same result stands under more than one key: in rad and in degrees, as the largest and as that of its wall. */
+const values = new Map(Object.values(RESULTS).flatMap(evaluation => evaluation.ok ? evaluation.result.outputs.map(output => [output.key, output.value] as const) : []))
+const valueOf = (key: string) => values.get(key)
+
 describe('sixty sentences with a planted fault', () => {
   it('are sixty', () => expect(FAULTS).toHaveLength(60))
   it.each(FAULTS)('%s: %s', (_, sentence, found, key) => {
@@ -86,7 +90,8 @@ describe('sixty sentences with a planted fault', () => {
     const loose = scanLooseNumbers(doc, RESULTS)
     const number = loose.find(({ text }) => text === found)
     expect(loose.map(({ text, verdict }) => `${text} ${verdict}`)).toContain(`${found} disagreeing`)
-    expect(number?.candidates.map(candidate => candidate.key)).toContain(key)
+    const named = number?.candidates.map(candidate => valueOf(candidate.key)) ?? []
+    expect(named.some(value => value !== undefined && Math.abs(value - valueOf(key)!) <= 1e-4 * Math.abs(value))).toBe(true)
     expect(number?.reason).toMatch(/\.$/)
   })
 })
