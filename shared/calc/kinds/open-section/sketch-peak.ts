@@ -12,9 +12,12 @@ const LETTER = 7.9
 const LINE_RADIUS = 9
 /** Room that the arrows beside a face take. */
 const ARROWS = 6
+const CROSSING = -30
+/** Pixels of air beyond which more is no better. */
+const CLEAR = 3
 const DEGREE = Math.PI / 180
 const TURNS = [0, 20, -20, 40, -40, 60, -60, 80, -80]
-const REACHES = [32, 46, 60, 78, 100]
+const REACHES = [32, 46, 60, 78, 100, 130]
 
 /** At a corner where its factor makes it the largest, else on the outer face of its wall. */
 export function peakMark(s: Solution, c: CaseSolution, room: Room): Shape[] {
@@ -31,27 +34,38 @@ export function peakMark(s: Solution, c: CaseSolution, room: Room): Shape[] {
   return [peakAt(s, polar(m.at, normal, m.half), polar([0, 0], normal, 1), say(c.tauMax), room)]
 }
 
-interface Flag { knee: Pt, end: Pt, cost: number }
+interface Flag { knee: Pt, end: Pt, leaderFrom: Pt, cost: number }
 
 /** Of many places round the peak, the nearest whose leader and lettering are clear of walls and marks. */
 function peakAt(s: Solution, at: Pt, away: Pt, text: string, room: Room): Shape {
   const p = room.pixel
   const walls = wallSpots(s, room, 1)
   const hidden = [...wallSpots(s, room, ARROWS), ...room.taken]
-  const long = (text.length * LETTER + 6) * p
-  const direction = Math.atan2(away[1], away[0])
-  const flags = TURNS.flatMap(turn => REACHES.flatMap(reach => ([1, -1] as const).map((side): Flag => {
-    const knee = polar(at, direction + turn * DEGREE, reach * p)
-    const end: Pt = [knee[0] + side * long, knee[1]]
-    const lettering = clearOf(along(knee, end, 8 * p).map(([x, y]): Pt => [x, y + 5 * p]), hidden)
-    // The leader starts on a wall and may pass close by marks, but not through another wall.
-    const leader = clearOf(along(polar(at, direction + turn * DEGREE, 14 * p), knee, 6 * p), walls)
-    const clear = Math.min(lettering / p - LINE_RADIUS, leader / p)
-    return { knee, end, cost: reach / 60 + Math.abs(turn) / 60 - Math.min(clear, 3) }
-  })))
-  const best = flags.reduce((a, b) => b.cost < a.cost - 1e-9 ? b : a)
+  const hides = ({ knee, end, leaderFrom }: Flag) => {
+    const lettering = clearOf(along(knee, end, 8 * p).map(([x, y]): Pt => [x, y + 5 * p]), hidden) / p - LINE_RADIUS
+    // The leader starts on a wall and may pass through marks, but through a wall only if nothing else serves.
+    const leader = clearOf(along(leaderFrom, knee, 6 * p), walls) < 0 ? CROSSING : CLEAR
+    return CLEAR - Math.min(lettering, leader, CLEAR)
+  }
+  let [best, least]: [Flag | undefined, number] = [undefined, Infinity]
+  for (const flag of flagPlaces(at, Math.atan2(away[1], away[0]), text, p)) {
+    // The places come in order of their cost where they hide nothing: none that follows can be better.
+    if (flag.cost >= least) break
+    const cost = flag.cost + hides(flag)
+    if (cost < least) [best, least] = [flag, cost]
+  }
+  if (!best) return { type: 'peak', at, text, away }
   room.taken.push(...along(best.knee, best.end, 10 * p).map(([x, y]) => ({ at: [x, y + 5 * p] as Pt, radius: LINE_RADIUS * p })))
   return { type: 'peak', at, text, away, flag: { knee: best.knee, end: best.end } }
+}
+
+function flagPlaces(at: Pt, direction: number, text: string, p: number): Flag[] {
+  const long = (text.length * LETTER + 6) * p
+  const places = TURNS.flatMap(turn => REACHES.flatMap(reach => ([1, -1] as const).map((side): Flag => {
+    const knee = polar(at, direction + turn * DEGREE, reach * p)
+    return { knee, end: [knee[0] + side * long, knee[1]], leaderFrom: polar(at, direction + turn * DEGREE, 14 * p), cost: reach / 60 + Math.abs(turn) / 60 }
+  })))
+  return places.sort((a, b) => a.cost - b.cost)
 }
 
 function along(a: Pt, b: Pt, step: number): Pt[] {

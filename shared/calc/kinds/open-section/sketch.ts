@@ -23,9 +23,10 @@ export function openSectionSketch(s: Solution): Drawing | null {
   const level = (wall: string) => shown && shown.tauMax > 0 ? Math.min((shown.tau.get(wall) ?? 0) / shown.tauMax, 1) : 0
   const room: Room = { pixel, centre: [(extent.min[0] + extent.max[0]) / 2, (extent.min[1] + extent.max[1]) / 2], taken: [] }
   const centres = centreMarks(s, room)
+  const measured = dimensions(s, room, extent)
   const peak = shown ? peakMark(s, shown, room) : []
   const marked: Shape[] = [
-    ...wallShapes(s, level), ...filletShapes(s, level), ...dimensions(s, room, extent), ...flowArrows(s, room), ...centres, ...peak,
+    ...wallShapes(s, level), ...filletShapes(s, level), ...measured, ...flowArrows(s, room), ...centres, ...peak,
     ...thicknessNotes(s, room), ...balloons(s, room),
   ]
   const shapes = [...marked, ...torqueMark(s, shown, extent, marked, pixel)]

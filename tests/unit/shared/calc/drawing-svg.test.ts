@@ -1,6 +1,6 @@
 import { Window } from 'happy-dom'
 import { describe, expect, it } from 'vitest'
-import { angleInputs, hatInputs, lippedChannelInputs, stripInputs } from '../../../factories/open-section'
+import { angleInputs, bracketInputs, hatInputs, lippedChannelInputs, stripInputs } from '../../../factories/open-section'
 import { rampColour, paletteOf } from '#shared/calc/drawing/svg-theme'
 import { drawingToSvg } from '#shared/calc/drawing-svg'
 import { evaluateCalculation } from '#shared/calc/registry'
@@ -54,6 +54,18 @@ describe('drawing as SVG', () => {
     const loose = (inputs: unknown) => drawingOf(inputs).shapes.filter(s => s.type === 'path' && s.role === 'wall' && s.wall === undefined).length
     expect(loose(angleInputs())).toBe(1)
     expect(loose(hatInputs())).toBe(0)
+  })
+  it('sets the flag of the peak clear of axes, marks and walls', () => {
+    for (const inputs of [angleInputs(), bracketInputs(), hatInputs(), lippedChannelInputs(), stripInputs()]) {
+      const { shapes, box } = drawingOf(inputs)
+      const flag = shapes.flatMap(s => s.type === 'peak' && s.flag ? [s.flag] : [])[0]
+      if (!flag) throw new Error('the peak has no flag')
+      // Lettering of 11.5 px over the line, in a picture of 470 px.
+      const top = flag.knee[1] + 11.5 * box.width / 470
+      const [left, right] = [Math.min(flag.knee[0], flag.end[0]), Math.max(flag.knee[0], flag.end[0])]
+      const marks = shapes.flatMap(s => s.type === 'path' ? s.points : s.type === 'line' ? [s.from, s.to] : s.type === 'centroid' || s.type === 'shear-centre' || s.type === 'label' || s.type === 'balloon' ? [s.at] : [])
+      expect(marks.filter(([x, y]) => x > left && x < right && y > flag.knee[1] && y < top)).toEqual([])
+    }
   })
   it('carries no ramp when nothing is loaded', () => {
     const inputs = stripInputs()
