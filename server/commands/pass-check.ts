@@ -1,10 +1,9 @@
 import type { Pass } from '#shared/schemas/acts'
-import { confirmPassword } from '#server/access/confirm-password'
 import { recordAct } from '#server/audit/record'
 import { deviationsIn, shownMargin } from '#server/mail/issue-mails'
 import { issueMailProps } from '#server/mail/issue-props'
 import { queueMail } from '#server/mail/queue-mail'
-import { actOnIssue } from '#server/notes/act-on-issue'
+import { signOnIssue } from '#server/notes/act-on-issue'
 import { refuseMovedEngine } from '#server/notes/engine-check'
 import { expectSeen } from '#server/notes/expect-seen'
 import { addPart } from '#server/notes/parts'
@@ -13,10 +12,9 @@ import type { CommandContext } from '#server/utils/command-context'
 
 /** The checker signs that every step was followed; the content hash is fixed here. */
 export function passCheck(context: CommandContext, issueId: string, input: Pass): Promise<void> {
-  return actOnIssue(context, issueId, 'pass', ['pass'], async (inside, issue, name, standing) => {
+  return signOnIssue(context, issueId, 'pass', ['pass'], input.password, async (inside, issue, name, standing) => {
     const { em, actor, clock } = inside
     expectSeen(issue, input.expect)
-    await confirmPassword(inside, input.password)
     refuseMovedEngine(issue)
     await addPart(inside, issue, 'checker')
     const { hash } = standing.content

@@ -1,8 +1,7 @@
 import type { Release } from '#shared/schemas/acts'
-import { confirmPassword } from '#server/access/confirm-password'
 import { recordAct } from '#server/audit/record'
 import { sendJob } from '#server/jobs/queue'
-import { actOnIssue } from '#server/notes/act-on-issue'
+import { signOnIssue } from '#server/notes/act-on-issue'
 import { refuseMovedEngine } from '#server/notes/engine-check'
 import { expectSeen } from '#server/notes/expect-seen'
 import { addPart } from '#server/notes/parts'
@@ -21,10 +20,9 @@ function acceptDeviations({ actor, clock }: CommandContext, { answers }: Standin
 
 /** The approver signs the release. The issue is locked and a job is left for the worker, which makes the PDF and only then flips the state. */
 export function requestRelease(context: CommandContext, issueId: string, input: Release): Promise<void> {
-  return actOnIssue(context, issueId, 'sign release', ['release'], async (inside, issue, name, standing) => {
+  return signOnIssue(context, issueId, 'sign release', ['release'], input.password, async (inside, issue, name, standing) => {
     const { em, clock } = inside
     expectSeen(issue, input.expect)
-    await confirmPassword(inside, input.password)
     if (standing.content.hash !== issue.contentHash) throw new DomainError('stale', 'The content is not what the checker passed. Return the issue.')
     refuseMovedEngine(issue)
     acceptDeviations(inside, standing, input.acceptedDeviations)

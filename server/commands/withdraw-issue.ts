@@ -1,20 +1,18 @@
 import type { Withdraw } from '#shared/schemas/acts'
-import { confirmPassword } from '#server/access/confirm-password'
 import { recordAct } from '#server/audit/record'
 import { concerned } from '#server/mail/issue-mails'
 import { issueMailProps } from '#server/mail/issue-props'
 import { queueMail } from '#server/mail/queue-mail'
-import { actOnIssue } from '#server/notes/act-on-issue'
+import { signOnIssue } from '#server/notes/act-on-issue'
 import { expectSeen } from '#server/notes/expect-seen'
 import { sign } from '#server/notes/signatures'
 import type { CommandContext } from '#server/utils/command-context'
 
 /** An approver takes a released issue out of force, with a reason and a signature. Its PDF stays. */
 export function withdrawIssue(context: CommandContext, issueId: string, input: Withdraw): Promise<void> {
-  return actOnIssue(context, issueId, 'withdraw', ['withdraw'], async (inside, issue, name, standing) => {
+  return signOnIssue(context, issueId, 'withdraw', ['withdraw'], input.password, async (inside, issue, name, standing) => {
     const { em, actor, clock } = inside
     expectSeen(issue, input.expect)
-    await confirmPassword(inside, input.password)
     await sign(inside, issue, 'withdrawn', issue.contentHash ?? '')
     Object.assign(issue, { state: 'withdrawn', lastChangeAt: clock() })
     await em.flush()

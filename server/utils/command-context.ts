@@ -48,7 +48,8 @@ function asRefusal(error: unknown): DomainError | null {
   return new DomainError('stale', 'Somebody else did this a moment ago. Load the page again to see it.')
 }
 
-async function recordRefusal(context: CommandContext, name: ActName, refusal: DomainError) {
+/** Leaves a refusal in the trail, in a transaction of its own. */
+export async function recordRefusal(context: CommandContext, name: ActName, refusal: DomainError) {
   await context.em.fork().transactional(async (em) => {
     await recordAct({ ...context, em }, { ...name, outcome: 'refused', reason: `${refusal.code}: ${refusal.message}` })
   })
