@@ -4,7 +4,7 @@ import { fired } from '#shared/calc/kinds/open-section/guard-catalogue'
 import { SEAM_TOLERANCE } from '#shared/calc/kinds/open-section/parse-geometry'
 import type { Unusual } from '#shared/calc/kinds/open-section/model'
 import type { CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'
-import { degrees, figure, lengthShown } from '#shared/calc/kinds/open-section/say'
+import { below, degrees, figure, lengthShown } from '#shared/calc/kinds/open-section/say'
 
 const SLENDER = 10
 const STOCKY = 5
@@ -31,9 +31,9 @@ function refusedInputs(s: Solution): Guard[] {
 
 function slenderness(s: Solution): Guard[] {
   return s.walls.flatMap(({ wall, slenderness: ratio }): Guard[] => {
-    if (ratio >= SLENDER) return []
+    if (!below(ratio, SLENDER)) return []
     const about = { of: wall.id, wall: wall.id, values: { 'L/t': ratio } }
-    return ratio < STOCKY
+    return below(ratio, STOCKY)
       ? [fired('G-03', { ...about, message: `Wall ${wall.id} has L/t = ${figure(ratio)}, below ${STOCKY}: thin-wall theory does not hold for it.` })]
       : [fired('G-02', { ...about, message: `Wall ${wall.id} has L/t = ${figure(ratio)}; thin-wall theory asks for ${SLENDER}.` })]
   })
@@ -86,7 +86,7 @@ function corner(s: Solution, c: CornerSolution): Guard[] {
       message: `No corner factor at node ${c.node} (r/t = ${figure(c.ratio)}): ${c.factor.reason} No corner margin is given.`,
     }))
   }
-  if (c.ratio < SMALL_RADIUS) {
+  if (below(c.ratio, SMALL_RADIUS)) {
     const used = c.factor.ok ? ` The factor used is ${figure(c.factor.K)}.` : ''
     guards.push(fired('G-09', {
       of: c.node, values: { 'r/t': c.ratio },

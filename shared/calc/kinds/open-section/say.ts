@@ -9,3 +9,6 @@ export const degrees = (radians: number): number => radians * 180 / Math.PI
 
 /** A length in the unit system of the calculation. */
 export const lengthShown = (solution: Solution, mm: number): string => showQuantity(mm, 'length', solution.model.units === 'SI' ? 'mm' : 'in')
+
+/** Below a threshold by more than the last digits of binary arithmetic, so that a value typed to sit on it passes. */
+export const below = (value: number, threshold: number): boolean => value < threshold * (1 - 1e-12)
