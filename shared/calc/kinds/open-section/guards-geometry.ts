@@ -9,8 +9,6 @@ import { below, degrees, figure, lengthShown } from '#shared/calc/kinds/open-sec
 const SLENDER = 10
 const STOCKY = 5
 const CURVED = 2
-/** Ratios of typed sizes are compared a hair below, so that 2.4 + 0.8 over 1.6 is not below 2. */
-const HAIR = 1e-12
 const SMALL_RADIUS = 0.25
 const CORRECTION_SHARE = 0.15
 const TAPER = 10 * Math.PI / 180
@@ -55,14 +53,14 @@ function curvature(s: Solution): Guard[] {
   const arcs = s.model.walls.flatMap((wall): Guard[] => {
     if (!wall.arc) return []
     const ratio = wall.arc.radius / wall.t.value
-    return ratio < CURVED - HAIR
+    return below(ratio, CURVED)
       ? [fired('G-08', { of: wall.id, wall: wall.id, values: { 'r/t': ratio }, message: `Arc ${wall.id} has a mean radius of ${figure(ratio)} times its thickness, below ${CURVED}.` })]
       : []
   })
   const bends = s.corners.flatMap((c): Guard[] => {
     if (!c.junction || c.junction.make !== 'bent' || c.junction.radius.value <= 0) return []
     const ratio = c.ratio + 0.5
-    return ratio < CURVED - HAIR
+    return below(ratio, CURVED)
       ? [fired('G-08', { of: `bend:${c.node}`, values: { 'r/t': ratio }, message: `The bend at node ${c.node} has a mean radius of ${figure(ratio)} times the thickness, below ${CURVED}.` })]
       : []
   })
