@@ -9,7 +9,7 @@ const alias = { '~': `${root}app`, '@': `${root}app` }
 export default defineConfig({
   test: {
     projects: [
-      { plugins: [vue()], resolve: { alias }, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], testTimeout: 60_000 } },
+      { plugins: [vue()], resolve: { alias }, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], setupFiles: ['tests/unit/seeds.ts'], testTimeout: 60_000 } },
       {
         resolve: { alias },
         test: {

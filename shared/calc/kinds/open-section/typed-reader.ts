@@ -67,11 +67,14 @@ export function typedReader(): TypedReader {
       fault(path, `G-01: ${rule.label} must be greater than zero; “${read.typed}” is not.`)
       return null
     }
-    if (read && read.value < 1e-9) {
-      fault(path, `G-01: ${rule.label} is too small to compute with; check the number and its unit.`)
-      return null
-    }
-    return read
+    return read && largeEnough(read, path, rule)
+  }
+
+  /** A ratio to something next to nothing leaves the range of numbers. */
+  function largeEnough(read: Measured, path: string, rule: Rule): Measured | null {
+    if (read.value >= 1e-9) return read
+    fault(path, `G-01: ${rule.label} is too small to compute with; check the number and its unit.`)
+    return null
   }
 
   function optional(typed: TypedQuantity | null, path: string, rule: Rule): Measured | null {
@@ -84,7 +87,7 @@ export function typedReader(): TypedReader {
       refused.push({ path, label: rule.label, typed: `${read.typed} ${read.unit}`.trim(), value: read.value })
       return null
     }
-    return read
+    return read && largeEnough(read, path, rule)
   }
 
   return { faults, refused, unusual, fault, number, positive, optionalPositive, optional }

@@ -95,6 +95,11 @@ describe.each(calcKindNames())('calculation kind %s', (name) => {
       }
     }
   })
+  it('refuses an allowable next to nothing, whose ratio would leave the range of numbers', () => {
+    const inputs = channelInputs()
+    inputs.materials.forEach((material) => { material.Fsu = { text: '5e-324', unit: 'MPa' } })
+    expect(evaluateCalculation({ kind: 'open-section', kindVersion: 1, inputs })).toMatchObject({ ok: false, faults: [{ path: 'materials.0.Fsu' }] })
+  })
   it('never throws on anything put in place of one or two fields', () => {
     fc.assert(fc.property(fc.constantFrom(...given), fc.nat(), anything, fc.nat(), anything, (inputs, i, first, j, second) => {
       const paths = leaves(inputs)
@@ -102,7 +107,7 @@ describe.each(calcKindNames())('calculation kind %s', (name) => {
       const twice = withLeaf(once, paths[j % paths.length] ?? [], second)
       judged(kind.evaluate(once))
       judged(kind.evaluate(twice))
-    }), { numRuns: 400 })
+    }), { numRuns: 400, seed: 1800133696 })
   })
   it('never throws on any JSON at all', () => {
     fc.assert(fc.property(fc.jsonValue(), value => judged(kind.evaluate(value))), { numRuns: 200 })
