@@ -17,7 +17,10 @@ export interface Clash {
   after: string | null
 }
 
-/** What of `mine`, written on `base`, differs from it, each beside what the newest save says there. */
+/**
+ * What of `mine`, written on `base`, differs from it and is not in the newest
+ * save already, each beside what that save says there.
+ */
 export function clashes(base: Node, mine: Node, theirs: Node): Clash[] {
   const before = byKey(base)
   const now = byKey(theirs)
@@ -27,10 +30,11 @@ export function clashes(base: Node, mine: Node, theirs: Node): Clash[] {
     const was = before.get(block.key)
     if (was && was.node.eq(block.node)) continue
     const there = now.get(block.key)
+    if (there?.node.eq(block.node)) continue
     found.push(clash(was ? 'changed' : 'added', block, was, block.node, there))
   }
   for (const was of before.values()) {
-    if (own.has(was.key)) continue
+    if (own.has(was.key) || !now.has(was.key)) continue
     found.push(clash('removed', was, was, null, now.get(was.key)))
   }
   return found
@@ -43,17 +47,23 @@ function clash(kind: Clash['kind'], at: BlockAt, was: BlockAt | undefined, mine:
 
 const byKey = (doc: Node) => new Map(blocksOf(doc).map(block => [block.key, block]))
 
-/** Puts the chosen changes on the newest save, as one transaction, so that one undo takes them back. */
+/**
+ * Puts the chosen changes on the newest save, as one transaction, so that one
+ * undo takes them back. They may come from another editor: each block is read
+ * anew with the schema of this document.
+ */
 export function reapply(tr: Transaction, chosen: readonly Clash[]): Transaction {
+  const { schema } = tr.doc.type
   for (const change of chosen) {
     const now = byKey(tr.doc)
     const there = now.get(change.key)
-    if (change.mine === null) {
+    const mine = change.mine && schema.nodeFromJSON(change.mine.toJSON())
+    if (mine === null) {
       if (there) tr.delete(there.pos, there.pos + there.node.nodeSize)
     } else if (there) {
-      tr.replaceWith(there.pos, there.pos + there.node.nodeSize, Fragment.from(change.mine))
+      tr.replaceWith(there.pos, there.pos + there.node.nodeSize, Fragment.from(mine))
     } else {
-      tr.insert(placeFor(tr.doc, change, now), change.mine)
+      tr.insert(placeFor(tr.doc, change, now), mine)
     }
   }
   return tr

@@ -93,6 +93,12 @@ export class Saver {
     this.cancelTimers()
   }
 
+  /** Sends again after a refusal whose cause may be gone, such as a session that had ended. */
+  async resume(): Promise<boolean> {
+    this.stopped = false
+    return this.flush()
+  }
+
   /** Drops what is unsent, after the person has taken it elsewhere. */
   drop() {
     this.stop()
