@@ -40,6 +40,7 @@ export interface LevelFactors {
 
 /** What one action (torque, stress or rate of twist) becomes at each level; null where the level does not exist for the case. */
 export interface FactoredAction {
+  readonly ok: true
   readonly limit: number | null
   readonly ultimate: number
   /** What the given value was multiplied by. */
@@ -61,5 +62,5 @@ export function factorAction(given: number, level: 'limit' | 'ultimate', factors
   const atLimit = specialAtLimit ? special : 1
   const ultimateFactor = level === 'limit' ? safety * special : special
   const limitFactor = level === 'limit' ? atLimit : limitConfirmed ? atLimit / safety : null
-  return { limit: limitFactor === null ? null : given * limitFactor, ultimate: given * ultimateFactor, limitFactor, ultimateFactor }
+  return { ok: true, limit: limitFactor === null ? null : given * limitFactor, ultimate: given * ultimateFactor, limitFactor, ultimateFactor }
 }

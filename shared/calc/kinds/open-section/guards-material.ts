@@ -4,10 +4,9 @@ import { fired } from '#shared/calc/kinds/open-section/guard-catalogue'
 import type { CaseModel, MaterialModel } from '#shared/calc/kinds/open-section/model'
 import { below, figure } from '#shared/calc/kinds/open-section/say'
 import type { Solution } from '#shared/calc/kinds/open-section/solution'
+import { leastFittingFactor, usualFactorOfSafety } from '#shared/torsion/factors'
 
 const HOT_ALUMINIUM = 70
-const USUAL_FACTOR = 1.5
-const FITTING_FACTOR = 1.15
 
 export function materialGuards(s: Solution): Guard[] {
   const used = s.model.materials.filter(m => s.model.walls.some(w => w.material === m))
@@ -98,8 +97,8 @@ function factorGuards(s: Solution): Guard[] {
       }))
     }
   } else {
-    if (below(factors.ultimate, USUAL_FACTOR)) guards.push(fired('G-35', { of: 'safety', values: { 'factor of safety': factors.ultimate }, message: `The factor of safety is ${figure(factors.ultimate)}, below ${USUAL_FACTOR}.` }))
-    if (declarations.fitting && below(factors.special, FITTING_FACTOR)) guards.push(fired('G-35', { of: 'fitting', values: { 'special factor': factors.special }, message: `The part is declared a fitting and the special factor in force is ${figure(factors.special)}, below ${FITTING_FACTOR}.` }))
+    if (below(factors.ultimate, usualFactorOfSafety)) guards.push(fired('G-35', { of: 'safety', values: { 'factor of safety': factors.ultimate }, message: `The factor of safety is ${figure(factors.ultimate)}, below ${usualFactorOfSafety}.` }))
+    if (declarations.fitting && below(factors.special, leastFittingFactor)) guards.push(fired('G-35', { of: 'fitting', values: { 'special factor': factors.special }, message: `The part is declared a fitting and the special factor in force is ${figure(factors.special)}, below ${leastFittingFactor}.` }))
   }
   const applied = factors.specials.filter(f => f.value > 1)
   if (applied.length > 1) {

@@ -1,6 +1,7 @@
 import type { LoadingInput, OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
 import type { CaseModel, FactorModel } from '#shared/calc/kinds/open-section/model'
 import type { TypedReader } from '#shared/calc/kinds/open-section/typed-reader'
+import { specialFactor } from '#shared/torsion/factors'
 
 /** The id under which results of a single torque stand. */
 export const SINGLE_CASE = 'T'
@@ -39,7 +40,7 @@ export function parseFactors(input: OpenSectionInputs['factors'], read: TypedRea
   })
   if (ultimate && ultimate.value < 1) read.fault('factors.ultimate', 'The factor of safety must be at least 1.')
   if (!ultimate) return null
-  const special = Math.max(1, ...specials.map(s => s.value))
+  const special = specialFactor(Object.fromEntries(specials.map(s => [s.name, s.value]))).value
   return {
     ultimate: ultimate.value, specials, special, specialAtLimit: input.onLimit ? special : 1,
     onLimit: input.onLimit, divideUltimate: input.divideUltimate, partial: input.partial, reason: input.reason.trim(),

@@ -1,6 +1,7 @@
 import type { MaterialInput } from '#shared/calc/kinds/open-section/schema'
 import type { KnockdownPoint, MaterialModel } from '#shared/calc/kinds/open-section/model'
 import type { TypedReader } from '#shared/calc/kinds/open-section/typed-reader'
+import { shearYieldFromTension } from '#shared/torsion/allowables'
 
 /** A material record as numbers. Missing strengths stay missing: no default is invented (methods §7.2). */
 export function parseMaterial(input: MaterialInput, i: number, read: TypedReader): MaterialModel | null {
@@ -26,7 +27,7 @@ export function parseMaterial(input: MaterialInput, i: number, read: TypedReader
     basis: input.basis, loadPath: input.loadPath, source: input.source, edition: input.edition,
     E: E?.value ?? null, G: G.value, nu: nu?.value ?? null,
     Ftu: Ftu?.value ?? null, Fty: Fty?.value ?? null, Fsu: Fsu?.value ?? null,
-    Fsy: Fsy?.value ?? (Fty ? Fty.value / Math.sqrt(3) : null), FsyGiven: Fsy !== null,
+    Fsy: Fsy?.value ?? (Fty ? shearYieldFromTension(Fty.value) : null), FsyGiven: Fsy !== null,
     temperatureFrom, temperatureTo, knockdown, knockdownSource: input.knockdownSource,
     units: { E: E?.unit ?? G.unit, G: G.unit, strength: (Fsu ?? Fty ?? Ftu)?.unit ?? 'MPa' },
   }

@@ -1,6 +1,6 @@
 /** The solved section, in N, mm, MPa, rad: what margins, guards, outputs, working and sketch all read. */
 import type { MarginRow } from '#shared/calc/types'
-import type { CaseModel, MaterialModel, ModelJunction, ModelWall, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import type { CaseModel, ModelJunction, ModelWall, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 
 export interface WallSolution {
   wall: ModelWall
@@ -102,5 +102,3 @@ export interface Solution {
   margins: MarginRow[]
   governing: MarginRow | null
 }
-
-export const materialOf = (solution: Solution, id: string): MaterialModel | undefined => solution.model.materials.find(m => m.id === id)

@@ -1,12 +1,15 @@
 /** From the section as numbers to its solution: torsion, sectorial properties, corners, every case. Pure; failures are values. */
 import type { Fault } from '#shared/calc/types'
 import { marginRows } from '#shared/calc/kinds/open-section/margins'
-import type { CaseModel, MaterialModel, ModelWall, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import type { CaseModel, MaterialModel, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 import { cornersOf } from '#shared/calc/kinds/open-section/solve-corners'
 import type { CaseSolution, CornerSolution, Sectorial, Solution, WagnerState, WallSolution } from '#shared/calc/kinds/open-section/solution'
 import { knockDownAt } from '#shared/torsion/allowables'
 import { stripFactor } from '#shared/torsion/bend-factor'
+import { factorAction } from '#shared/torsion/factors'
 import { torsionOfOpenSection, type OpenSection, type OpenTorsion } from '#shared/torsion/open-section'
+import { respondToRate, respondToTorque, type SectionResponse } from '#shared/torsion/response'
+import type { Refusal } from '#shared/torsion/section'
 import { checkSection } from '#shared/torsion/section-check'
 import { sectorialProperties, type SectorialProperties } from '#shared/torsion/sectorial'
 import { wagner } from '#shared/torsion/wagner'
@@ -22,7 +25,11 @@ export function solveOpenSection(model: OpenSectionModel): Solved {
   const properties = sectorialProperties(section)
   const sectorial = properties.ok ? toSectorial(properties) : null
   const G = model.walls.every(w => w.G === model.walls[0]?.G) ? model.walls[0]?.G ?? null : null
-  const cases = model.cases.map(c => solveCase(model, c, torsion, walls, corners, properties.ok ? properties : null))
+  const loads = model.cases.map(c => ({ c, response: responseOf(c, torsion), levels: levelsOf(model, c) }))
+  const refused = loads.flatMap(({ response, levels }, i) => [response, levels].flatMap(one => one.ok ? [] : [{ path: `cases.${i}`, message: one.reason }]))
+  if (refused.length > 0) return { ok: false, faults: refused }
+  const cases = loads.flatMap(({ c, response, levels }) =>
+    response.ok && levels.ok ? [solveCase(model, c, response, levels, torsion, walls, corners, properties.ok ? properties : null)] : [])
   const base = {
     model, G, GJ: torsion.GJ, walls, corners, sectorial, cases,
     J: sum(walls.map(w => w.J)), Jplain: sum(walls.map(w => w.Jplain)),
@@ -109,22 +116,24 @@ function decay(model: OpenSectionModel, torsion: OpenTorsion, sectorial: Sectori
   return Number.isFinite(kL) ? kL : null
 }
 
-function solveCase(model: OpenSectionModel, c: CaseModel, torsion: OpenTorsion, walls: WallSolution[], corners: CornerSolution[], p: SectorialProperties | null): CaseSolution {
-  const rate = c.rate ? c.rate.value : (c.torque?.value ?? 0) / torsion.GJ
-  const tau = new Map(walls.map(w => [w.wall.id, flatStress(w.wall, rate) * w.faceFactor]))
-  const corner = new Map(corners.flatMap(k => k.factor.ok ? [[k.node, k.factor.K * flatStress(k.worst, rate)] as const] : []))
+/** A part that follows the structure has its rate of twist given, any other its torque. */
+const responseOf = (c: CaseModel, torsion: OpenTorsion) =>
+  c.rate ? respondToRate(torsion, c.rate.value) : respondToTorque(torsion, c.torque?.value ?? 0)
+
+function solveCase(model: OpenSectionModel, c: CaseModel, response: SectionResponse, { toLimit, toUltimate }: Levels, torsion: OpenTorsion, walls: WallSolution[], corners: CornerSolution[], p: SectorialProperties | null): CaseSolution {
+  const { rate, torque } = response
+  const flat = new Map(response.perWall.map(w => [w.id, w.tau]))
+  const tau = new Map(walls.map(w => [w.wall.id, (flat.get(w.wall.id) ?? 0) * w.faceFactor]))
+  const corner = new Map(corners.flatMap(k => k.factor.ok ? [[k.node, k.factor.K * (flat.get(k.worst.id) ?? 0)] as const] : []))
   const [tauMaxWall, tauMax] = largest(tau) ?? ['', 0]
   const worstCorner = largest(corner)
-  const levels = levelsOf(model, c)
   return {
-    model: c, torque: c.torque?.value ?? torsion.GJ * rate, rate, twist: model.length ? rate * model.length.value : null, ...levels,
+    model: c, torque, rate, twist: model.length ? rate * model.length.value : null, toLimit, toUltimate,
     tau, corner, tauMax, tauMaxWall, tauCorner: worstCorner?.[1] ?? null, tauCornerNode: worstCorner?.[0] ?? null,
     knockdown: new Map(model.materials.map(m => [m.id, knockdownOf(m, c)])),
-    wagnerLimit: wagnerAt(torsion, p, rate * levels.toLimit), wagnerUltimate: wagnerAt(torsion, p, rate * levels.toUltimate),
+    wagnerLimit: wagnerAt(torsion, p, rate * toLimit), wagnerUltimate: wagnerAt(torsion, p, rate * toUltimate),
   }
 }
-
-const flatStress = (wall: ModelWall, rate: number) => wall.G * wall.t.value * Math.abs(rate)
 
 function largest(values: Map<string, number>): [string, number] | null {
   let best: [string, number] | null = null
@@ -134,11 +143,16 @@ function largest(values: Map<string, number>): [string, number] | null {
   return best
 }
 
-/** Ultimate loads are not raised again; they are divided for the checks at limit only where the author confirms it (methods §8). */
-function levelsOf(model: OpenSectionModel, c: CaseModel): { toLimit: number, toUltimate: number } {
+interface Levels { ok: true, toLimit: number, toUltimate: number }
+
+/**
+ * Ultimate loads are not raised again; they are divided for the checks at limit only where the author confirms it (methods §8).
+ * Special factors act per mode, in the margins; here only the step from the given level to the other.
+ */
+function levelsOf(model: OpenSectionModel, c: CaseModel): Levels | Refusal {
   const { ultimate, divideUltimate } = model.factors
-  if (c.level === 'limit') return { toLimit: 1, toUltimate: ultimate }
-  return { toLimit: divideUltimate ? 1 / ultimate : 1, toUltimate: 1 }
+  const unit = factorAction(1, c.level, { safety: ultimate, special: 1, specialAtLimit: false }, divideUltimate)
+  return unit.ok ? { ok: true, toLimit: unit.limit ?? 1, toUltimate: unit.ultimate } : unit
 }
 
 /** Beyond the table the nearest point is used and G-30 stops the note. */
