@@ -2,6 +2,7 @@ import type { Abandon } from '#shared/schemas/acts'
 import { recordAct } from '#server/audit/record'
 import { actOnIssue } from '#server/notes/act-on-issue'
 import { expectSeen } from '#server/notes/expect-seen'
+import { moveIssue } from '#server/notes/move-issue'
 import { layPen } from '#server/notes/pen'
 import type { CommandContext } from '#server/utils/command-context'
 
@@ -9,9 +10,9 @@ import type { CommandContext } from '#server/utils/command-context'
 export function abandonIssue(context: CommandContext, issueId: string, input: Abandon): Promise<void> {
   return actOnIssue(context, issueId, 'abandon', ['abandon'], async (inside, issue, name) => {
     expectSeen(issue, input.expect)
-    Object.assign(issue, { state: 'abandoned', lastChangeAt: inside.clock() })
+    const { from, to } = moveIssue(issue, 'abandon', inside.clock())
     await inside.em.flush()
     await layPen(inside, issue)
-    await recordAct(inside, { ...name, old: { state: 'draft' }, new: { state: 'abandoned' }, reason: input.reason })
+    await recordAct(inside, { ...name, old: { state: from }, new: { state: to }, reason: input.reason })
   })
 }

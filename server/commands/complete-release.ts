@@ -11,6 +11,7 @@ import { queueMail } from '#server/mail/queue-mail'
 import { candidateOf } from '#server/notes/candidates'
 import { lockIssue } from '#server/notes/find-issue'
 import { loadStanding, type Standing } from '#server/notes/standing'
+import { moveIssue } from '#server/notes/move-issue'
 import { DomainError } from '#server/utils/domain-error'
 
 export interface MadePdf { fileId: string, storageKey: string, name: string, size: number, sha256: string }
@@ -31,11 +32,11 @@ async function supersede(worker: Worker, issue: Issue, by: Signature): Promise<I
   const { em } = worker
   const earlier = await em.findOne(IssueSchema, { note: issue.note.id, state: 'released' }, { populate: ['analyst', 'checker', 'approver', 'note', 'note.project'] })
   if (!earlier) return null
-  Object.assign(earlier, { state: 'superseded', lastChangeAt: worker.clock() })
+  const { from, to } = moveIssue(earlier, 'supersede', worker.clock())
   await em.flush()
   await recordAct({ ...worker, actor: by.person }, {
     chain: noteChain(issue.note.id), act: 'supersede', subject: { type: 'issue', id: earlier.id, label: `${issue.note.number} ${earlier.letter}` },
-    old: { state: 'released' }, new: { state: 'superseded', by: issue.letter },
+    old: { state: from }, new: { state: to, by: issue.letter },
   })
   return earlier
 }
@@ -70,11 +71,12 @@ export function completeRelease(worker: Worker, { issueId, signatureId, pdf }: M
     await recheck(em, standing, signature)
     const earlier = await supersede(inside, issue, signature)
     em.create(StoredFileSchema, { id: pdf.fileId, issue, purpose: 'released-pdf', name: pdf.name, mime: 'application/pdf', size: pdf.size, sha256: pdf.sha256, storageKey: pdf.storageKey, uploadedBy: signature.person, at: worker.clock() })
-    Object.assign(issue, { state: 'released', releasedAt: signature.at, pdfFileId: pdf.fileId, releaseFailure: null, lastChangeAt: worker.clock() })
+    const { from, to } = moveIssue(issue, 'complete-release', worker.clock())
+    Object.assign(issue, { releasedAt: signature.at, pdfFileId: pdf.fileId, releaseFailure: null })
     await em.flush()
     await recordAct({ ...inside, actor: signature.person }, {
       chain: noteChain(issue.note.id), act: 'release', subject: { type: 'issue', id: issue.id, label: `${issue.note.number} ${issue.letter}` },
-      old: { state: 'for approval' }, new: { state: 'released', contentHash: issue.contentHash, pdf: pdf.sha256, save: issue.saveNumber },
+      old: { state: from }, new: { state: to, contentHash: issue.contentHash, pdf: pdf.sha256, save: issue.saveNumber },
     })
     await writeMails(inside, standing, signature, earlier)
     return 'released'

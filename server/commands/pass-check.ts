@@ -6,6 +6,7 @@ import { queueMail } from '#server/mail/queue-mail'
 import { signOnIssue } from '#server/notes/act-on-issue'
 import { refuseMovedEngine } from '#server/notes/engine-check'
 import { expectSeen } from '#server/notes/expect-seen'
+import { moveIssue } from '#server/notes/move-issue'
 import { addPart } from '#server/notes/parts'
 import { sign } from '#server/notes/signatures'
 import type { CommandContext } from '#server/utils/command-context'
@@ -19,9 +20,10 @@ export function passCheck(context: CommandContext, issueId: string, input: Pass)
     await addPart(inside, issue, 'checker')
     const { hash } = standing.content
     await sign(inside, issue, 'passed', hash)
-    Object.assign(issue, { state: 'for approval', contentHash: hash, lastChangeAt: clock() })
+    const { from, to } = moveIssue(issue, 'pass', clock())
+    issue.contentHash = hash
     await em.flush()
-    await recordAct(inside, { ...name, old: { state: 'in check' }, new: { state: 'for approval', save: issue.saveNumber, contentHash: hash } })
+    await recordAct(inside, { ...name, old: { state: from }, new: { state: to, save: issue.saveNumber, contentHash: hash } })
     if (!issue.approver) return
     await queueMail(inside, {
       template: 'passed', to: issue.approver, event: `pass:${issue.id}:${clock().toISOString()}`,

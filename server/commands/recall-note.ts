@@ -9,8 +9,7 @@ import type { CommandContext } from '#server/utils/command-context'
 export function recallNote(context: CommandContext, issueId: string, input: Recall): Promise<void> {
   return actOnIssue(context, issueId, 'recall', ['recall'], async (inside, issue, name) => {
     expectSeen(issue, input.expect)
-    const old = issue.state
-    await backToDraft(inside, issue, `recalled by ${inside.actor.name}`)
-    await recordAct(inside, { ...name, old: { state: old }, new: { state: 'draft' } })
+    const { from, to } = await backToDraft(inside, issue, 'recall', `recalled by ${inside.actor.name}`)
+    await recordAct(inside, { ...name, old: { state: from }, new: { state: to } })
   })
 }

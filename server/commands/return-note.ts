@@ -12,15 +12,13 @@ export function returnNote(context: CommandContext, issueId: string, input: Retu
   return actOnIssue(context, issueId, 'return', ['return'], async (inside, issue, name, standing) => {
     const { actor, clock } = inside
     expectSeen(issue, input.expect)
-    const old = issue.state
-    const role = old === 'in check' ? 'checker' as const : 'approver' as const
-    await backToDraft(inside, issue, `returned by ${actor.name}: ${input.reason}`)
-    await recordAct(inside, { ...name, old: { state: old }, new: { state: 'draft' }, reason: input.reason })
+    const { from, to } = await backToDraft(inside, issue, 'return', `returned by ${actor.name}: ${input.reason}`)
+    await recordAct(inside, { ...name, old: { state: from }, new: { state: to }, reason: input.reason })
     const analyst = issue.analyst
     if (!analyst) return
     await queueMail(inside, {
       template: 'returned', to: analyst, event: `return:${issue.id}:${clock().toISOString()}`,
-      props: { ...issueMailProps(issue), by: actor.name, role, reason: input.reason, openRemarks: standing.remarks.filter(r => r.state !== 'closed').length },
+      props: { ...issueMailProps(issue), by: actor.name, role: from === 'in check' ? 'checker' : 'approver', reason: input.reason, openRemarks: standing.remarks.filter(r => r.state !== 'closed').length },
     })
   })
 }

@@ -6,6 +6,7 @@ import { queueMail } from '#server/mail/queue-mail'
 import { actOnIssue } from '#server/notes/act-on-issue'
 import { eligible } from '#server/notes/candidates'
 import { expectSeen } from '#server/notes/expect-seen'
+import { moveIssue } from '#server/notes/move-issue'
 import { addPart } from '#server/notes/parts'
 import { layPen } from '#server/notes/pen'
 import { sign } from '#server/notes/signatures'
@@ -23,10 +24,11 @@ export function submitNote(context: CommandContext, issueId: string, input: Subm
     if ([checker.id, approver.id].includes(actor.id)) throw new DomainError('not-eligible', 'You submit this issue, so others must check and release it.')
     await addPart(inside, issue, 'contributor')
     await sign(inside, issue, 'submitted', standing.content.hash)
-    Object.assign(issue, { state: 'in check', analyst: actor, checker, approver, contentHash: null, lastChangeAt: clock() })
+    const { from, to } = moveIssue(issue, 'submit', clock())
+    Object.assign(issue, { analyst: actor, checker, approver, contentHash: null })
     await em.flush()
     await layPen(inside, issue)
-    await recordAct(inside, { ...name, old: { state: 'draft' }, new: { state: 'in check', save: issue.saveNumber, checker: checker.id, approver: approver.id, contentHash: standing.content.hash, documentHash: issue.documentHash } })
+    await recordAct(inside, { ...name, old: { state: from }, new: { state: to, save: issue.saveNumber, checker: checker.id, approver: approver.id, contentHash: standing.content.hash, documentHash: issue.documentHash } })
     await queueMail(inside, {
       template: 'submitted', to: checker, event: `submit:${issue.id}:${name.subject.label}:${issue.saveNumber}:${clock().toISOString()}`,
       props: { ...issueMailProps(issue), analyst: actor.name, approver: approver.name, save: issue.saveNumber, leastMargin: shownMargin(issue), cautions: issue.cautions, deviations: deviationsIn(standing) },

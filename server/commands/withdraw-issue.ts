@@ -5,6 +5,7 @@ import { issueMailProps } from '#server/mail/issue-props'
 import { queueMail } from '#server/mail/queue-mail'
 import { signOnIssue } from '#server/notes/act-on-issue'
 import { expectSeen } from '#server/notes/expect-seen'
+import { moveIssue } from '#server/notes/move-issue'
 import { sign } from '#server/notes/signatures'
 import type { CommandContext } from '#server/utils/command-context'
 
@@ -14,9 +15,9 @@ export function withdrawIssue(context: CommandContext, issueId: string, input: W
     const { em, actor, clock } = inside
     expectSeen(issue, input.expect)
     await sign(inside, issue, 'withdrawn', issue.contentHash ?? '')
-    Object.assign(issue, { state: 'withdrawn', lastChangeAt: clock() })
+    const { from, to } = moveIssue(issue, 'withdraw', clock())
     await em.flush()
-    await recordAct(inside, { ...name, old: { state: 'released' }, new: { state: 'withdrawn' }, reason: input.reason })
+    await recordAct(inside, { ...name, old: { state: from }, new: { state: to }, reason: input.reason })
     for (const to of concerned(standing, actor)) {
       await queueMail(inside, { template: 'withdrawn', to, event: `withdraw:${issue.id}`, props: { ...issueMailProps(issue), approver: actor.name, reason: input.reason } })
     }

@@ -91,11 +91,3 @@ export function wrongStateSentence(state: IssueState, act: MachineAct): string {
   const states = movesOf(act).map(row => inWords[row.from])
   return `This issue is ${inWords[state]}; it can be ${actInWords[act]} only while it is ${listed(states)}.`
 }
-
-export type Transition = { ok: true, to: IssueState } | { ok: false, why: string }
-
-/** The state after an act, or the sentence that says in which states it can be done. */
-export function transition(state: IssueState, act: MachineAct): Transition {
-  const row = moveOf(state, act)
-  return row ? { ok: true, to: row.to } : { ok: false, why: wrongStateSentence(state, act) }
-}
