@@ -7,6 +7,7 @@ import { findIssue } from '#server/notes/find-issue'
 import { gatherPdfData } from '#server/notes/gather-pdf-data'
 import { renderNotePdf } from '#server/pdf/render'
 import type { Signer } from '#server/pdf/signing/local-authority'
+import { verifyNotePdf } from '#server/pdf/signing/verify'
 import { putFile } from '#server/storage/files'
 import { DomainError } from '#server/utils/domain-error'
 import type { JobData } from './queue-names'
@@ -26,6 +27,8 @@ export async function makeRelease({ em, clock, signer }: WorkerContext, { issueI
     if (!signature || issue.state !== 'for approval' || !issue.releaseRequestedAt) return
     const data = await gatherPdfData(em, issue, { at: signature.at, releasedAt: signature.at })
     const pdf = await renderNotePdf(data, { signer })
+    const verdict = verifyNotePdf(pdf, signer.root)
+    if (!verdict.valid) throw new Error(`The signed PDF does not verify: ${verdict.reason}`)
     const fileId = randomUUID()
     const storageKey = `released/${issueId}/${fileId}.pdf`
     await putFile(storageKey, pdf)
