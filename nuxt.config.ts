@@ -29,17 +29,6 @@ export default defineNuxtConfig({
     },
   },
   css: ['katex/dist/katex.min.css', '~/assets/css/fonts.css', '~/assets/css/tokens.css', '~/assets/css/base.css'],
-  runtimeConfig: {
-    authSecret: '',
-    databaseUrl: '',
-    baseUrl: 'http://127.0.0.1:3000',
-    dataDir: '',
-    smtpUrl: '',
-    mailFrom: 'Torquill <torquill@localhost>',
-    demonstration: '',
-    caughtMailDir: '',
-    public: { demonstration: false },
-  },
   // A build goes to a folder of its own, so that it never overwrites one that is running.
   buildDir: process.env.TORQUILL_WORK_DIR ?? '.nuxt',
   future: { compatibilityVersion: 4 },

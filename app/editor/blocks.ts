@@ -29,14 +29,3 @@ export function blocksOf(doc: Node): BlockAt[] {
   })
   return blocks
 }
-
-/** Position before the node that carries this id, or null. */
-export function positionOf(doc: Node, id: string): number | null {
-  let found: number | null = null
-  doc.descendants((node, pos) => {
-    if (found !== null) return false
-    if (node.attrs.id === id) found = pos
-    return found === null
-  })
-  return found
-}

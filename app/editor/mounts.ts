@@ -1,4 +1,4 @@
-import type { InjectionKey, ShallowRef } from 'vue'
+import type { ShallowRef } from 'vue'
 import { shallowReactive, shallowRef } from 'vue'
 import type { Editor } from '@tiptap/core'
 import type { Node } from '@tiptap/pm/model'
@@ -71,5 +71,3 @@ export class Mounts {
     this.observer?.unobserve(target)
   }
 }
-
-export const mountsKey: InjectionKey<Mounts> = Symbol('mounts')

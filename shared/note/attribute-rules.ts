@@ -81,6 +81,3 @@ export const MARK_RULES: Record<string, Record<string, AttributeRule>> = {
   superscript: {},
   link: { href },
 }
-
-/** Nodes that carry an id of their own. */
-export const IDENTIFIED_NODES = Object.keys(NODE_RULES).filter(name => NODE_RULES[name]?.id !== undefined)

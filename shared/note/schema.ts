@@ -9,9 +9,6 @@ import type { AttributeRule } from '#shared/note/attribute-rules'
 import { isAllowedHref, MARK_RULES, NODE_RULES } from '#shared/note/attribute-rules'
 import { CalculationNode, EquationNode, FigureNode, InlineEquationNode, NoteDocument, SectionNode, TiedNode } from '#shared/note/nodes'
 
-/** Kept in one place so that a stored document can name the form it was written in. */
-export const SCHEMA_VERSION = 1
-
 // Calculations, tables, figures and headings stand in a section, not inside a list or a cell: they are numbered and printed from there.
 const LIST_ITEM_CONTENT = 'paragraph (paragraph | bulletList | orderedList)*'
 const CELL_CONTENT = '(paragraph | bulletList | orderedList)+'

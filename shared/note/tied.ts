@@ -1,7 +1,7 @@
 /** What a tied value shows, and which tied values point nowhere. */
 import type { Node } from '@tiptap/pm/model'
 import type { Evaluation, Output } from '#shared/calc/types'
-import type { NoteCalculation, TiedValue } from '#shared/note/calculations'
+import type { TiedValue } from '#shared/note/calculations'
 import { calculationsOf, tiedValuesOf } from '#shared/note/calculations'
 import { showQuantity } from '#shared/units/display'
 import { isUnit, unitFits } from '#shared/units/units'
@@ -35,16 +35,6 @@ export function tiedText(tied: Pick<TiedValue, 'calcId' | 'key' | 'unit'>, resul
   const output = evaluation.result.outputs.find(({ key }) => key === tied.key)
   if (!output) return missing('The calculation no longer gives this result.')
   return { text: showQuantity(output.value, output.dimension, unitOf(tied, output)), missing: false, label: output.label, output }
-}
-
-export interface TieChoice { calculation: NoteCalculation, outputs: Output[] }
-
-/** Everything a text can be tied to, by calculation in the order of the note. */
-export function tieChoices(doc: Node, results: Results): TieChoice[] {
-  return calculationsOf(doc).map((calculation) => {
-    const evaluation = Object.hasOwn(results, calculation.id) ? results[calculation.id] : undefined
-    return { calculation, outputs: evaluation?.ok ? evaluation.result.outputs : [] }
-  })
 }
 
 export interface BrokenTie extends TiedValue { reason: string }

@@ -82,13 +82,3 @@ export function verdictFault(verdict: CheckVerdict, evidence: string): string | 
   if (evidence.trim() !== '' || verdict === 'ok') return null
   return verdict === 'not applicable' ? 'Say why this does not apply to this note.' : 'Say what is not ok, so that the analyst can mend it.'
 }
-
-/** What the sheet still needs before the pass. */
-export function sheetGaps(lines: readonly SheetLine[]): { open: number[], lapsed: number[], notOk: number[] } {
-  const standing = lines.filter(line => line.verdict !== null && !line.lapsed)
-  return {
-    open: lines.filter(line => line.verdict === null).map(line => line.item),
-    lapsed: lines.filter(line => line.verdict !== null && line.lapsed).map(line => line.item),
-    notOk: standing.filter(line => line.verdict === 'not ok' || verdictFault(line.verdict ?? 'ok', line.evidence) !== null).map(line => line.item),
-  }
-}

@@ -11,9 +11,6 @@ export const isOnItsWay = (state: IssueState): state is OnItsWay => (ON_ITS_WAY 
 /** Whether the issue was released once: its content and PDF stay as they are for good. */
 export const wasReleased = (state: IssueState): boolean => state === 'released' || state === 'superseded' || state === 'withdrawn'
 
-/** Narrows text from outside, such as a filter, to a state. */
-export const isIssueState = (text: string): text is IssueState => (ISSUE_STATES as readonly string[]).includes(text)
-
 /** The state inside a sentence: `This issue is in check.` */
 export const inWords: Record<IssueState, string> = {
   'draft': 'a draft',

@@ -41,4 +41,3 @@ export type SetMember = z.infer<typeof setMemberSchema>
 
 export const forgottenSchema = z.object({ email: emailSchema })
 export const setPasswordSchema = z.object({ token: z.string().min(20).max(200), password: passwordSchema })
-export const signInSchema = z.object({ email: z.string().min(1, 'Type your e-mail address.'), password: z.string().min(1, 'Type your password.') })

@@ -7,7 +7,6 @@ import { createNote } from '#server/commands/create-note'
 import { fillCheckItem } from '#server/commands/fill-check-item'
 import { judgeAnswer } from '#server/commands/judge-answer'
 import { passCheck } from '#server/commands/pass-check'
-import { requestRelease } from '#server/commands/request-release'
 import { saveNote } from '#server/commands/save-note'
 import { submitNote } from '#server/commands/submit-note'
 import { tickCalculation } from '#server/commands/tick-calculation'
@@ -66,11 +65,5 @@ export async function checked(orm: MikroORM, team: Team) {
 export async function forApproval(orm: MikroORM, team: Team) {
   const draft = await checked(orm, team)
   await passCheck(contextOf(orm, team.checker), draft.id, { expect: expectOf(await issueOf(orm, draft.id)), password })
-  return draft
-}
-
-export async function releasing(orm: MikroORM, team: Team) {
-  const draft = await forApproval(orm, team)
-  await requestRelease(contextOf(orm, team.approver), draft.id, { expect: expectOf(await issueOf(orm, draft.id)), password, acceptedDeviations: [] })
   return draft
 }
