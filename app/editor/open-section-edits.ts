@@ -1,5 +1,8 @@
 import type { TypedQuantity } from '#shared/calc/types'
-import type { LoadingInput, MaterialInput, OpenSectionInputs, WallEndInput, WallInput } from '#shared/calc/kinds/open-section/schema'
+import type { LoadingInput } from '#shared/calc/parts/loading-fields'
+import type { MaterialInput } from '#shared/calc/parts/material-fields'
+import type { OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import type { WallEndInput, WallInput } from '#shared/calc/parts/wall-fields'
 import type { UnitId } from '#shared/units/units'
 
 const empty = (unit: UnitId): TypedQuantity => ({ text: '', unit })

@@ -56,7 +56,7 @@ export type LoadLevel = 'limit' | 'ultimate'
 
 export interface MarginRow {
   key: string
-  /** `shear-ultimate` · `shear-yield` · `corner-ultimate` · `corner-yield` · `twist` */
+  /** Named by the kind, e.g. `shear-ultimate`, `twist`. */
   mode: string
   /** `Shear on the flats, ultimate` */
   modeLabel: string
@@ -143,12 +143,50 @@ export interface CaseRow {
   leastMargin: number | null
 }
 
+/** A table of results that is neither walls nor cases: stations, cells, members, parts. */
+export interface ResultTable {
+  /** Stable within the kind, e.g. `stations`. */
+  key: string
+  title: string
+  /** A column of numbers has a dimension; of words none. */
+  columns: { key: string, label: string, symbol?: string, dimension: Dimension | null, unit: UnitId }[]
+  /** Cells in the order of the columns, numbers in engine units; null where there is no value. */
+  rows: { id: string, cells: (number | string | null)[] }[]
+}
+
+export interface PlotAxis { label: string, symbol: string, dimension: Dimension, unit: UnitId }
+/** A quantity along the span, or a margin against a variable: values in engine units. */
+export interface Plot {
+  key: string
+  title: string
+  x: PlotAxis
+  y: PlotAxis
+  series: { name: string, caseId?: string, points: [number, number][] }[]
+}
+
+/** The same quantity by a remembered or simpler formula, shown beside the value that is used. */
+export interface ComparedValue {
+  key: string
+  /** What is compared, e.g. `Peak shear by the handbook polynomial`. */
+  label: string
+  used: number
+  compared: number
+  dimension: Dimension
+  unit: UnitId
+  /** Where the compared value comes from, and whether it is safe here. */
+  source: string
+}
+
 export interface CalcResult {
   kind: string
   methodRevision: string
   outputs: Output[]
+  /** Walls and cases of a section; empty for kinds that have none. */
   walls: WallRow[]
   cases: CaseRow[]
+  tables?: ResultTable[]
+  plots?: Plot[]
+  compared?: ComparedValue[]
   margins: MarginRow[]
   /** Key of the governing row in `margins`, or null when nothing is loaded. */
   governing: string | null

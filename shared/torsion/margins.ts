@@ -11,12 +11,15 @@ export type Reserve
     | { readonly ok: true, readonly loaded: false, readonly rf: null, readonly ms: null }
     | Refusal
 
+/** RF = allowable / |applied| unchecked; Infinity where nothing is applied. For loops over many margins. */
+export const bareReserve = (allowable: number, applied: number): number => allowable / Math.abs(applied)
+
 /** RF = allowable / |applied|, MS = RF − 1; both in the same unit, allowable > 0. */
 export function reserveFactor(allowable: number, applied: number): Reserve {
   if (!Number.isFinite(applied)) return refusal('The applied value is not a finite number.')
   if (!Number.isFinite(allowable) || allowable <= 0) return refusal('The allowable must be greater than zero.')
   if (applied === 0) return { ok: true, loaded: false, rf: null, ms: null }
-  const rf = allowable / Math.abs(applied)
+  const rf = bareReserve(allowable, applied)
   if (!Number.isFinite(rf)) return { ok: true, loaded: false, rf: null, ms: null }
   return { ok: true, loaded: true, rf, ms: rf - 1 }
 }

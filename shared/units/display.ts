@@ -15,8 +15,8 @@ export const noValue = '–'
 
 /** Significant figures by dimension. Length is for computed lengths: a typed one is shown as typed. */
 const figures: Record<Exclude<Dimension, 'ratio' | 'margin' | 'temperature'>, number> = {
-  length: 5, area: 5, inertia: 5, warping: 5, sectorial: 5, torsionalStiffness: 5, number: 5,
-  force: 4, torque: 4, stress: 4, rateOfTwist: 4, bimoment: 4, shearFlow: 4, density: 4,
+  length: 5, area: 5, firstMoment: 5, inertia: 5, warping: 5, sectorial: 5, torsionalStiffness: 5, rotationalStiffness: 5, warpingStiffness: 5, decay: 5, number: 5,
+  force: 4, torque: 4, distributedTorque: 4, stress: 4, rateOfTwist: 4, rateGradient: 4, bimoment: 4, shearFlow: 4, density: 4,
   angle: 3,
 }
 const ratioPlaces = 3

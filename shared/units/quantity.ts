@@ -31,6 +31,8 @@ const dimensionNames: Record<Dimension, string> = {
   sectorial: 'a sectorial coordinate', force: 'a force', torque: 'a torque', stress: 'a stress', angle: 'an angle',
   rateOfTwist: 'a rate of twist', temperature: 'a temperature', ratio: 'a ratio', density: 'a density', bimoment: 'a bimoment',
   shearFlow: 'a shear flow', torsionalStiffness: 'a torsional stiffness', margin: 'a margin', number: 'a bare number',
+  firstMoment: 'a third power of length', distributedTorque: 'a distributed torque', rotationalStiffness: 'a rotational stiffness',
+  warpingStiffness: 'a stiffness against warping', decay: 'a reciprocal length', rateGradient: 'a change of the rate of twist',
 }
 
 const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹'

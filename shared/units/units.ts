@@ -11,6 +11,7 @@
 export type Dimension
   = | 'length' | 'area' | 'inertia' | 'warping' | 'sectorial' | 'force' | 'torque' | 'stress' | 'angle' | 'rateOfTwist'
     | 'temperature' | 'ratio' | 'density' | 'bimoment' | 'shearFlow' | 'torsionalStiffness' | 'margin' | 'number'
+    | 'firstMoment' | 'distributedTorque' | 'rotationalStiffness' | 'warpingStiffness' | 'decay' | 'rateGradient'
 
 /** Engine value = (typed value − offset) · multiply / divide. */
 interface Conversion { readonly multiply: number, readonly divide: number, readonly offset?: number }
@@ -80,6 +81,16 @@ const table = {
   torsionalStiffness: momentsTimesLength,
   margin: plain,
   number: plain,
+  /** Torsional modulus, statical moment. */
+  firstMoment: { 'mm³': per(1), 'cm³': per(1000), 'in³': per(16387064, 1000) },
+  distributedTorque: { 'N·mm/mm': per(1), 'N·m/m': per(1), 'kN·m/m': per(1000), 'lbf·in/in': per(poundForce), 'lbf·ft/ft': per(poundForce) },
+  /** Torque per angle of a torsional spring. */
+  rotationalStiffness: { 'N·mm/rad': per(1), 'N·m/rad': per(1000), 'kN·m/rad': per(1e6), 'N·m/°': per(1000 * 180, Math.PI), 'lbf·in/rad': per(112.9848290276167) },
+  /** Bimoment per rate of twist of a spring against warping. */
+  warpingStiffness: { 'N·mm³/rad': per(1), 'N·m³/rad': per(1e9), 'lbf·in³/rad': per(72893.29229545717) },
+  decay: { '1/mm': per(1), '1/m': per(1, 1000), '1/in': per(10, 254) },
+  /** Change of the rate of twist along the bar, φ″. */
+  rateGradient: { 'rad/mm²': per(1), 'rad/m²': per(1, 1e6), '°/m²': per(degree, 1e6), 'rad/in²': per(100, 64516) },
 } as const satisfies Record<Dimension, Record<string, Conversion>>
 
 type Table = typeof table
@@ -105,7 +116,8 @@ homes.set('', 'number')
 const engineUnits = {
   length: 'mm', area: 'mm²', inertia: 'mm⁴', warping: 'mm⁶', sectorial: 'mm²', force: 'N', torque: 'N·mm', stress: 'MPa',
   angle: 'rad', rateOfTwist: 'rad/mm', temperature: '°C', ratio: '', density: 'kg/m³', bimoment: 'N·mm²', shearFlow: 'N/mm',
-  torsionalStiffness: 'N·mm²', margin: '', number: '',
+  torsionalStiffness: 'N·mm²', margin: '', number: '', firstMoment: 'mm³', distributedTorque: 'N·mm/mm', rotationalStiffness: 'N·mm/rad',
+  warpingStiffness: 'N·mm³/rad', decay: '1/mm', rateGradient: 'rad/mm²',
 } as const satisfies { [D in Dimension]: UnitOf<D> }
 
 /** The unit in which the engine holds this dimension. */

@@ -2,7 +2,8 @@
  * Inputs of open sections for tests: a strip, the hat and the lipped channel of the demonstration,
  * a machined angle, a channel and a bracket in US customary units. Each call makes a fresh object.
  */
-import type { OpenSectionInputs, WallInput } from '#shared/calc/kinds/open-section/schema'
+import type { OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import type { WallInput } from '#shared/calc/parts/wall-fields'
 import type { UnitId } from '#shared/units/units'
 
 type Material = OpenSectionInputs['materials'][number]

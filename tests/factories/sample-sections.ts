@@ -1,5 +1,7 @@
 /** Inputs of open sections for tests that need a whole, credible calculation. All values are invented. */
-import type { LoadingInput, MaterialInput, OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import type { LoadingInput } from '#shared/calc/parts/loading-fields'
+import type { MaterialInput } from '#shared/calc/parts/material-fields'
+import type { OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
 import type { UnitId } from '#shared/units/units'
 
 const typed = (text: string, unit: UnitId) => ({ text, unit })

@@ -2,7 +2,7 @@
  * Records of the invented maker's material data. Values are of handbook level
  * and are marked as demonstration data: none may be used for a real part.
  */
-import type { MaterialInput } from '#shared/calc/kinds/open-section/schema'
+import type { MaterialInput } from '#shared/calc/parts/material-fields'
 import type { UnitId } from '#shared/units/units'
 
 type Strength = { text: string, unit: UnitId }

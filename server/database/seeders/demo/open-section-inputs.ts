@@ -1,5 +1,8 @@
 /** Inputs of the demonstration's open sections, from few words. */
-import type { JunctionInput, LoadingInput, MaterialInput, OpenSectionInputs, WallInput } from '#shared/calc/kinds/open-section/schema'
+import type { JunctionInput, WallInput } from '#shared/calc/parts/wall-fields'
+import type { LoadingInput } from '#shared/calc/parts/loading-fields'
+import type { MaterialInput } from '#shared/calc/parts/material-fields'
+import type { OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
 import type { UnitId } from '#shared/units/units'
 import type { DemoCase } from './load-cases'
 

@@ -2,24 +2,19 @@
  * Everything a text may be tied to, under keys that stay the same when a calculation is edited:
  * `J`, `tau:a@L04` (wall a, case L04), `MS:twist@L04`, `Fsu:QM-107`. Values are in engine units.
  */
-import type { LoadLevel, MarginRow, Output } from '#shared/calc/types'
+import type { LoadLevel, Output } from '#shared/calc/types'
 import type { CaseSolution, Solution, WagnerState } from '#shared/calc/kinds/open-section/solution'
-import { MODES, type Mode } from '#shared/calc/kinds/open-section/margins'
-import { shownUnits, type ShownUnits } from '#shared/calc/kinds/open-section/shown-units'
+import { caseLabel, factorOutputs, marginOutputs, materialOutputs, output, type Extra } from '#shared/calc/parts/output'
+import { SINGLE_CASE } from '#shared/calc/parts/parse-loading'
+import { shownUnits, type ShownUnits } from '#shared/calc/parts/shown-units'
+import { sub } from '#shared/calc/parts/tex'
 import type { Dimension, UnitId } from '#shared/units/units'
-
-type Extra = Partial<Pick<Output, 'caseId' | 'wall' | 'primary'>>
-
-/** An output, or nothing where the value does not exist. */
-function output(key: string, symbol: string, label: string, value: number | null, dimension: Dimension, unit: UnitId, method: string, extra: Extra = {}): Output[] {
-  return value === null || !Number.isFinite(value) ? [] : [{ key, symbol, label, value, dimension, unit, method, ...extra }]
-}
 
 export function openSectionOutputs(s: Solution): Output[] {
   const units = shownUnits(s.model)
   return [
     ...sectionOutputs(s, units), ...sectorialOutputs(s, units), ...wallOutputs(s, units), ...cornerOutputs(s),
-    ...materialOutputs(s), ...s.cases.flatMap(c => caseOutputs(s, c, units)), ...envelope(s, units), ...marginOutputs(s),
+    ...materialOutputs(s.model.materials), ...s.cases.flatMap(c => caseOutputs(s, c, units)), ...envelope(s, units), ...marginOutputs(s.margins, s.governing),
   ]
 }
 
@@ -33,8 +28,7 @@ function sectionOutputs(s: Solution, u: ShownUnits): Output[] {
     ...output('developed', 'L_d', 'Developed mid-line length', s.developed, 'length', u.length, '§1.9'),
     ...output('length', 'L', 'Length of the bar', s.model.length?.value ?? null, 'length', s.model.length?.unit ?? u.length, '§5.1'),
     ...output('twist_allowed', '\\varphi_{a}', 'Twist allowed', s.model.twistAllowed?.value ?? null, 'angle', s.model.twistAllowed?.unit ?? '°', '§7.8'),
-    ...output('f_FS', 'f_{FS}', 'Factor of safety', s.model.factors.ultimate, 'number', '', '§7.1'),
-    ...output('f_sp', 'f_{sp}', 'Special factor in force', s.model.factors.special, 'number', '', '§7.1'),
+    ...factorOutputs(s.model.factors),
   ]
 }
 
@@ -71,25 +65,9 @@ function cornerOutputs(s: Solution): Output[] {
   return s.corners.flatMap(c => c.factor.ok ? output(`Kc:${c.node}`, `K_{c,${sub(c.node)}}`, `Corner factor, node ${c.node}`, c.factor.K, 'number', '', '§1.10') : [])
 }
 
-function materialOutputs(s: Solution): Output[] {
-  return s.model.materials.flatMap((m) => {
-    const strength = (name: 'Fsu' | 'Fsy' | 'Ftu' | 'Fty', index: string, label: string) =>
-      output(`${name}:${m.id}`, `F_{${index}}`, `${label}, ${m.id}`, m[name], 'stress', m.units.strength, '§7.2')
-    return [
-      ...output(`E:${m.id}`, 'E', `Modulus of elasticity, ${m.id}`, m.E, 'stress', m.units.E, '§9'),
-      ...output(`G:${m.id}`, 'G', `Shear modulus, ${m.id}`, m.G, 'stress', m.units.G, '§9'),
-      ...output(`nu:${m.id}`, '\\nu', `Poisson’s ratio, ${m.id}`, m.nu, 'number', '', '§9'),
-      ...strength('Ftu', 'tu', 'Ultimate tension strength'),
-      ...strength('Fty', 'ty', 'Yield strength in tension'),
-      ...strength('Fsu', 'su', 'Ultimate shear strength'),
-      ...strength('Fsy', 'sy', m.FsyGiven ? 'Yield strength in shear' : 'Yield strength in shear, Fty/√3'),
-    ]
-  })
-}
-
 function caseOutputs(s: Solution, c: CaseSolution, u: ShownUnits): Output[] {
   const id = c.model.id
-  const of = caseLabel(s, c)
+  const of = caseLabel(s.cases.length, c.model, SINGLE_CASE)
   const extra = { caseId: id }
   const torque = c.model.torque?.unit ?? u.torque
   const on = (key: string, symbol: string, label: string, value: number | null, dimension: Dimension, unit: UnitId, method: string, more: Extra = {}) =>
@@ -123,12 +101,6 @@ function wagnerOutputs(w: WagnerState | null, level: LoadLevel, suffix: string, 
   ]
 }
 
-/** Single torques need no case in their label; a case given at ultimate says so. */
-function caseLabel(s: Solution, c: CaseSolution): string {
-  const level = c.model.level === 'ultimate' ? ', given at ultimate' : ''
-  return s.cases.length === 1 && c.model.id === 'T' ? level : `, case ${c.model.id}${level}`
-}
-
 /** Largest of all cases, at the level each was given. */
 function envelope(s: Solution, u: ShownUnits): Output[] {
   const worst = s.cases.reduce<CaseSolution | null>((top, c) => top === null || c.tauMax > top.tauMax ? c : top, null)
@@ -139,26 +111,3 @@ function envelope(s: Solution, u: ShownUnits): Output[] {
     ...output('tau_corner', '\\tau_{c,max}', `Largest corner stress of all cases (${corner?.model.id ?? ''})`, corner?.tauCorner ?? null, 'stress', u.stress, '§1.10', { primary: true }),
   ]
 }
-
-function marginOutputs(s: Solution): Output[] {
-  const least = new Map<string, MarginRow>()
-  const lower = (key: string, row: MarginRow) => {
-    const held = least.get(key)
-    if (row.rf !== null && (held?.rf === undefined || held.rf === null || row.rf < held.rf)) least.set(key, row)
-  }
-  for (const row of s.margins) {
-    lower(`MS:${row.mode}@${row.caseId}`, row)
-    lower(`MS:${row.mode}`, row)
-    lower(`MS@${row.caseId}`, row)
-  }
-  const rows = [...least].flatMap(([key, row]) => marginOutput(key, row, key.includes('@') ? {} : { primary: true }))
-  return s.governing ? [...rows, ...marginOutput('MS', s.governing, { primary: true })] : rows
-}
-
-function marginOutput(key: string, row: MarginRow, extra: Extra): Output[] {
-  const label = key === 'MS' ? `Least margin (${MODES[row.mode as Mode].label.toLowerCase()}, case ${row.caseId})` : `Margin, ${row.modeLabel.toLowerCase()}, case ${row.caseId}`
-  return output(key, 'MS', label, row.ms, 'margin', '', '§7.3', { caseId: row.caseId, ...(row.wall === undefined ? {} : { wall: row.wall }), ...extra })
-}
-
-/** Names inside TeX indices; ids hold only letters, digits and . _ + / -. */
-export const sub = (id: string): string => `\\text{${id.replaceAll('_', '\\_')}}`

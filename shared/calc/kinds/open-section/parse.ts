@@ -1,11 +1,11 @@
 /** From typed inputs to numbers in N, mm, MPa, rad, °C; or every fault, each with the path of its field. */
 import type { Fault } from '#shared/calc/types'
 import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
-import { parseGeometry } from '#shared/calc/kinds/open-section/parse-geometry'
-import { parseCases, parseFactors } from '#shared/calc/kinds/open-section/parse-loading'
-import { parseMaterial } from '#shared/calc/kinds/open-section/parse-material'
+import { parseWalls } from '#shared/calc/parts/parse-walls'
+import { parseCases, parseFactors } from '#shared/calc/parts/parse-loading'
+import { parseMaterial } from '#shared/calc/parts/parse-material'
 import { openSectionSchema, type OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
-import { typedReader } from '#shared/calc/kinds/open-section/typed-reader'
+import { typedReader } from '#shared/calc/parts/typed-reader'
 
 export type Parsed = { ok: true, model: OpenSectionModel } | { ok: false, faults: Fault[] }
 
@@ -26,7 +26,7 @@ function parseChecked(inputs: OpenSectionInputs): Parsed {
   const length = read.optionalPositive(inputs.length, 'length', { label: 'the length of the bar', dimension: 'length', typical: 'bar length' })
   const twistAllowed = read.optionalPositive(inputs.twistAllowed, 'twistAllowed', { label: 'the twist allowed', dimension: 'angle', typical: 'twist' })
   const taper = read.optional(inputs.declarations.taper, 'declarations.taper', { label: 'the half-angle of taper', dimension: 'angle' })
-  const geometry = parseGeometry(inputs, materials, read)
+  const geometry = parseWalls(inputs, materials, read)
   if (!geometry || !factors || read.faults.length > 0) return { ok: false, faults: read.faults }
   return {
     ok: true,

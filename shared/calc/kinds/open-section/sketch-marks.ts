@@ -1,7 +1,7 @@
 /** Balloons, dimensions, arrows and flags around the walls, placed where they hide nothing. */
 import type { Shape } from '#shared/calc/types'
-import type { ModelWall } from '#shared/calc/kinds/open-section/model'
-import { shownUnits } from '#shared/calc/kinds/open-section/shown-units'
+import type { ModelWall } from '#shared/calc/parts/wall-model'
+import { shownUnits } from '#shared/calc/parts/shown-units'
 import { midLine, polar, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
 import type { Solution } from '#shared/calc/kinds/open-section/solution'
 import { significant } from '#shared/units/display'

@@ -1,6 +1,6 @@
 /** The highest stress of the case shown: where it is, and a place for its flag that hides nothing. */
 import type { Shape } from '#shared/calc/types'
-import { shownUnits } from '#shared/calc/kinds/open-section/shown-units'
+import { shownUnits } from '#shared/calc/parts/shown-units'
 import { clearOf, middleOf, outerSide, wallSpots, type Room, type Spot } from '#shared/calc/kinds/open-section/sketch-marks'
 import { leavingDirection, polar, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
 import type { CaseSolution, CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'

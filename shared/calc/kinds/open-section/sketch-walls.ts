@@ -1,6 +1,6 @@
 /** Outlines of the walls: faces at half the thickness either side of the mid-line, bends round, corners mitred, fillets filled. */
 import type { Shape } from '#shared/calc/types'
-import type { ModelWall } from '#shared/calc/kinds/open-section/model'
+import type { ModelWall } from '#shared/calc/parts/wall-model'
 import type { CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'
 
 export type Pt = [number, number]

@@ -1,7 +1,7 @@
 /** The section to scale: walls with their stress, names, dimensions, centroid, shear centre, torque and peak. */
 import type { Drawing, Shape } from '#shared/calc/types'
 import { decisiveCases } from '#shared/calc/kinds/open-section/working-cases'
-import { shownUnits } from '#shared/calc/kinds/open-section/shown-units'
+import { shownUnits } from '#shared/calc/parts/shown-units'
 import { axes, balloons, dimensions, flowArrows, thicknessNotes, type Room } from '#shared/calc/kinds/open-section/sketch-marks'
 import { letterSide, peakMark } from '#shared/calc/kinds/open-section/sketch-peak'
 import { filletShapes, midLine, polar, wallShapes, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'

@@ -1,6 +1,8 @@
 /** The solved section, in N, mm, MPa, rad: what margins, guards, outputs, working and sketch all read. */
 import type { MarginRow } from '#shared/calc/types'
-import type { CaseModel, ModelJunction, ModelWall, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import type { CaseModel } from '#shared/calc/parts/model'
+import type { ModelJunction, ModelWall } from '#shared/calc/parts/wall-model'
+import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 
 export interface WallSolution {
   wall: ModelWall

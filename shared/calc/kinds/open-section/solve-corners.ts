@@ -1,5 +1,6 @@
 /** Inner corners: where walls meet, how far the material turns there, and the stress factor or the reason why none is given. */
-import type { ModelJunction, ModelWall, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import type { ModelJunction, ModelWall } from '#shared/calc/parts/wall-model'
+import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 import type { CornerSolution } from '#shared/calc/kinds/open-section/solution'
 import type { OpenTorsion } from '#shared/torsion/open-section'
 

@@ -1,15 +1,14 @@
 /** From the section as numbers to its solution: torsion, sectorial properties, corners, every case. Pure; failures are values. */
 import type { Fault } from '#shared/calc/types'
 import { marginRows } from '#shared/calc/kinds/open-section/margins'
-import type { CaseModel, MaterialModel, OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import type { CaseModel } from '#shared/calc/parts/model'
+import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 import { cornersOf } from '#shared/calc/kinds/open-section/solve-corners'
+import { knockdownOf, levelsOf, type Levels } from '#shared/calc/parts/strength'
 import type { CaseSolution, CornerSolution, Sectorial, Solution, WagnerState, WallSolution } from '#shared/calc/kinds/open-section/solution'
-import { knockDownAt } from '#shared/torsion/allowables'
 import { stripFactor } from '#shared/torsion/bend-factor'
-import { factorAction } from '#shared/torsion/factors'
 import { torsionOfOpenSection, type OpenSection, type OpenTorsion } from '#shared/torsion/open-section'
 import { respondToRate, respondToTorque, type SectionResponse } from '#shared/torsion/response'
-import type { Refusal } from '#shared/torsion/section'
 import { checkSection } from '#shared/torsion/section-check'
 import { sectorialProperties, type SectorialProperties } from '#shared/torsion/sectorial'
 import { wagner } from '#shared/torsion/wagner'
@@ -25,7 +24,7 @@ export function solveOpenSection(model: OpenSectionModel): Solved {
   const properties = sectorialProperties(section)
   const sectorial = properties.ok ? toSectorial(properties) : null
   const G = model.walls.every(w => w.G === model.walls[0]?.G) ? model.walls[0]?.G ?? null : null
-  const loads = model.cases.map(c => ({ c, response: responseOf(c, torsion), levels: levelsOf(model, c) }))
+  const loads = model.cases.map(c => ({ c, response: responseOf(c, torsion), levels: levelsOf(model.factors, c.level) }))
   const refused = loads.flatMap(({ response, levels }, i) => [response, levels].flatMap(one => one.ok ? [] : [{ path: `cases.${i}`, message: one.reason }]))
   if (refused.length > 0) return { ok: false, faults: refused }
   const cases = loads.flatMap(({ c, response, levels }) =>
@@ -130,7 +129,7 @@ function solveCase(model: OpenSectionModel, c: CaseModel, response: SectionRespo
   return {
     model: c, torque, rate, twist: model.length ? rate * model.length.value : null, toLimit, toUltimate,
     tau, corner, tauMax, tauMaxWall, tauCorner: worstCorner?.[1] ?? null, tauCornerNode: worstCorner?.[0] ?? null,
-    knockdown: new Map(model.materials.map(m => [m.id, knockdownOf(m, c)])),
+    knockdown: new Map(model.materials.map(m => [m.id, knockdownOf(m, c.temperature?.value)])),
     wagnerLimit: wagnerAt(torsion, p, rate * toLimit), wagnerUltimate: wagnerAt(torsion, p, rate * toUltimate),
   }
 }
@@ -141,29 +140,6 @@ function largest(values: Map<string, number>): [string, number] | null {
     if (best === null || value > best[1]) best = [key, value]
   }
   return best
-}
-
-interface Levels { ok: true, toLimit: number, toUltimate: number }
-
-/**
- * Ultimate loads are not raised again; they are divided for the checks at limit only where the author confirms it (methods §8).
- * Special factors act per mode, in the margins; here only the step from the given level to the other.
- */
-function levelsOf(model: OpenSectionModel, c: CaseModel): Levels | Refusal {
-  const { ultimate, divideUltimate } = model.factors
-  const unit = factorAction(1, c.level, { safety: ultimate, special: 1, specialAtLimit: false }, divideUltimate)
-  return unit.ok ? { ok: true, toLimit: unit.limit ?? 1, toUltimate: unit.ultimate } : unit
-}
-
-/** Beyond the table the nearest point is used and G-30 stops the note. */
-function knockdownOf(m: MaterialModel, c: CaseModel): number {
-  const T = c.temperature?.value
-  const [first, last] = [m.knockdown[0], m.knockdown.at(-1)]
-  if (T === undefined || !first || !last) return 1
-  if (T <= first.temperature) return first.factor
-  if (T >= last.temperature) return last.factor
-  const at = knockDownAt(m.knockdown, T)
-  return at.ok ? at.factor : Math.min(first.factor, last.factor)
 }
 
 function wagnerAt(torsion: OpenTorsion, p: SectorialProperties | null, rate: number): WagnerState | null {

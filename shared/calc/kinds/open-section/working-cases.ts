@@ -1,26 +1,17 @@
 /** Rate of twist, twist, torque shares and stresses of the cases that decide a margin. */
 import type { WorkingLine, WorkingStep } from '#shared/calc/types'
 import type { CaseSolution, CornerSolution, Solution, WallSolution } from '#shared/calc/kinds/open-section/solution'
-import { degrees } from '#shared/calc/kinds/open-section/say'
+import { leastOfModes } from '#shared/calc/parts/margin-rows'
+import { degrees } from '#shared/calc/parts/say'
 import { machinedCornerTable } from '#shared/torsion/published'
-import { line, num, qty, res, sym } from '#shared/calc/kinds/open-section/tex'
+import { line, num, qty, res, sym } from '#shared/calc/parts/tex'
 
 /** The case of the governing margin first, then those of the other modes; without margins the first case. */
 export function decisiveCases(s: Solution): CaseSolution[] {
-  const least = leastOfModes(s)
+  const least = leastOfModes(s.margins)
   const ids = [s.governing?.caseId, ...least.map(row => row.caseId)]
   const found = [...new Set(ids)].flatMap(id => s.cases.find(c => c.model.id === id) ?? [])
   return found.length > 0 ? found : s.cases.slice(0, 1)
-}
-
-/** The least row of every mode, governing mode first. */
-export function leastOfModes(s: Solution): Solution['margins'] {
-  const least = new Map<string, Solution['margins'][number]>()
-  for (const row of s.margins) {
-    const held = least.get(row.mode)
-    if (row.rf !== null && (!held || row.rf < (held.rf ?? Infinity))) least.set(row.mode, row)
-  }
-  return [...least.values()].sort((a, b) => (a.rf ?? 0) - (b.rf ?? 0))
 }
 
 export function caseSteps(s: Solution): WorkingStep[] {
@@ -59,12 +50,12 @@ function shareLine(s: Solution, c: CaseSolution, w: WallSolution): WorkingLine {
 
 /** All walls for the governing case; for the others only walls that hold a least margin. */
 function stressWalls(s: Solution, all: boolean): WallSolution[] {
-  const decisive = new Set(leastOfModes(s).map(row => row.wall))
+  const decisive = new Set(leastOfModes(s.margins).map(row => row.wall))
   return all ? s.walls : s.walls.filter(w => decisive.has(w.wall.id))
 }
 
 function cornersShown(s: Solution, all: boolean): CornerSolution[] {
-  const decisive = new Set(leastOfModes(s).map(row => row.place))
+  const decisive = new Set(leastOfModes(s.margins).map(row => row.place))
   return all ? s.corners : s.corners.filter(k => decisive.has(`corner ${k.node}`))
 }
 

@@ -1,7 +1,7 @@
 /** Lengths, junction bulges and the torsion constant, wall by wall. */
 import type { WorkingLine, WorkingStep } from '#shared/calc/types'
 import type { CornerSolution, Solution, WallSolution } from '#shared/calc/kinds/open-section/solution'
-import { addends, line, num, qty, res, sym } from '#shared/calc/kinds/open-section/tex'
+import { addends, line, num, qty, res, sym } from '#shared/calc/parts/tex'
 import { bulgeL, bulgeT } from '#shared/torsion/published'
 
 export function sectionSteps(s: Solution): WorkingStep[] {

@@ -1,9 +1,8 @@
 /** The derivation with the numbers put in: from the load through J, the rate of twist and the stress to the margin. */
 import type { WorkingLine, WorkingStep } from '#shared/calc/types'
-import type { Measured } from '#shared/calc/kinds/open-section/model'
-import { sub } from '#shared/calc/kinds/open-section/outputs'
+import type { Measured } from '#shared/calc/parts/model'
+import { sub, line, num, qty, res, sym } from '#shared/calc/parts/tex'
 import type { Solution } from '#shared/calc/kinds/open-section/solution'
-import { line, num, qty, res, sym } from '#shared/calc/kinds/open-section/tex'
 import { caseSteps, decisiveCases } from '#shared/calc/kinds/open-section/working-cases'
 import { marginSteps } from '#shared/calc/kinds/open-section/working-margins'
 import { sectionSteps } from '#shared/calc/kinds/open-section/working-section'

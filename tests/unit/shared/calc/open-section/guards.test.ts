@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, quantity, stripInputs } from '../../../../factories/open-section'
 import { evaluateOpenSection } from '#shared/calc/kinds/open-section/evaluate'
-import { GUARDS } from '#shared/calc/kinds/open-section/guard-catalogue'
+import { GUARDS } from '#shared/calc/guards/catalogue'
 import type { OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
 import type { Guard, Severity } from '#shared/calc/types'
 

@@ -1,6 +1,6 @@
 /** Reads typed fields and gathers every fault with its path, so that a form can show all of them at once. */
 import type { Fault, TypedQuantity } from '#shared/calc/types'
-import type { Measured, Refused, Unusual } from '#shared/calc/kinds/open-section/model'
+import type { Measured, Refused, Unusual } from '#shared/calc/parts/model'
 import { parseQuantity } from '#shared/units/quantity'
 import type { Dimension } from '#shared/units/units'
 

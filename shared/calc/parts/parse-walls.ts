@@ -1,7 +1,8 @@
-/** Places the nodes of an open section from its wall table. */
-import type { JunctionInput, OpenSectionInputs, WallEndInput, WallInput } from '#shared/calc/kinds/open-section/schema'
-import type { MaterialModel, ModelJunction, ModelNode, ModelWall, Seam } from '#shared/calc/kinds/open-section/model'
-import type { TypedReader } from '#shared/calc/kinds/open-section/typed-reader'
+/** Reads a wall table and places its nodes. */
+import type { JunctionInput, WallEndInput, WallInput, WallTable } from '#shared/calc/parts/wall-fields'
+import type { ModelJunction, ModelNode, ModelWall, Seam } from '#shared/calc/parts/wall-model'
+import type { MaterialModel } from '#shared/calc/parts/model'
+import type { TypedReader } from '#shared/calc/parts/typed-reader'
 
 export interface Geometry { nodes: ModelNode[], walls: ModelWall[], junctions: ModelJunction[], seams: Seam[] }
 interface Point { x: number, y: number }
@@ -12,7 +13,11 @@ const FULL_TURN = 2 * Math.PI
 /** Two ends are one when they are closer than this share of the section's size (G-07). */
 export const SEAM_TOLERANCE = 1e-6
 
-export function parseGeometry(inputs: OpenSectionInputs, materials: MaterialModel[], read: TypedReader): Geometry | null {
+/**
+ * Numbers, places and materials of every wall; null where a fault was noted. A wall that ends on a node
+ * placed elsewhere is a seam: its end stands at a node of its own, and the gap is told.
+ */
+export function parseWalls(inputs: WallTable & { materials: readonly { id: string }[] }, materials: MaterialModel[], read: TypedReader): Geometry | null {
   checkNames(inputs, read)
   const x = read.number(inputs.start.x, 'start.x', { label: 'the x of the first node', dimension: 'length' })
   const y = read.number(inputs.start.y, 'start.y', { label: 'the y of the first node', dimension: 'length' })
@@ -53,7 +58,7 @@ function directionsOf({ arc }: Reach, from: Point, to: Point): { startDirection:
   return arc ? { startDirection: arc.direction, endDirection: arc.direction + arc.sweep } : { startDirection: straight, endDirection: straight }
 }
 
-function checkNames(inputs: OpenSectionInputs, read: TypedReader) {
+function checkNames(inputs: WallTable, read: TypedReader) {
   const ids = new Set<string>()
   inputs.walls.forEach((wall, i) => {
     if (ids.has(wall.id)) read.fault(`walls.${i}.id`, `Wall ${wall.id} is named twice; give each wall its own letter.`)

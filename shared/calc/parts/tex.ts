@@ -1,6 +1,5 @@
 /** TeX of the working: six figures, engine units, negative numbers in brackets. */
 import type { WorkingLine } from '#shared/calc/types'
-import { sub } from '#shared/calc/kinds/open-section/outputs'
 import { texNumber, texQuantity } from '#shared/units/display'
 import { fromEngine, type UnitId } from '#shared/units/units'
 
@@ -24,6 +23,9 @@ export const qty = (value: number, unit: UnitId): string => value < 0 ? `(${res(
 
 /** The result at the end of a line, in any unit of its dimension; the value is in engine units. */
 export const res = (value: number, unit: UnitId): string => texQuantity(value, unit, figures(fromEngine(value, unit)))
+
+/** Names inside TeX indices; ids hold only letters, digits and . _ + / -. */
+export const sub = (id: string): string => `\\text{${id.replaceAll('_', '\\_')}}`
 
 /** A symbol with a name as its index, e.g. `t_{\text{a}}`. */
 export const sym = (letter: string, id: string): string => `${letter}_{${sub(id)}}`

@@ -1,6 +1,6 @@
-import type { MaterialInput } from '#shared/calc/kinds/open-section/schema'
-import type { KnockdownPoint, MaterialModel } from '#shared/calc/kinds/open-section/model'
-import type { TypedReader } from '#shared/calc/kinds/open-section/typed-reader'
+import type { MaterialInput } from '#shared/calc/parts/material-fields'
+import type { KnockdownPoint, MaterialModel } from '#shared/calc/parts/model'
+import type { TypedReader } from '#shared/calc/parts/typed-reader'
 import { shearYieldFromTension } from '#shared/torsion/allowables'
 
 /** A material record as numbers. Missing strengths stay missing: no default is invented (methods §7.2). */

@@ -1,6 +1,6 @@
-import type { LoadingInput, OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
-import type { CaseModel, FactorModel } from '#shared/calc/kinds/open-section/model'
-import type { TypedReader } from '#shared/calc/kinds/open-section/typed-reader'
+import type { FactorsInput, LoadingInput } from '#shared/calc/parts/loading-fields'
+import type { CaseModel, FactorModel } from '#shared/calc/parts/model'
+import type { TypedReader } from '#shared/calc/parts/typed-reader'
 import { specialFactor } from '#shared/torsion/factors'
 
 /** The id under which results of a single torque stand. */
@@ -32,7 +32,7 @@ export function parseCases(loading: LoadingInput, read: TypedReader): CaseModel[
 const SPECIALS = ['fitting', 'casting', 'bearing'] as const
 
 /** Factors in force: the highest special factor, never a product of two (methods §7.1). */
-export function parseFactors(input: OpenSectionInputs['factors'], read: TypedReader): FactorModel | null {
+export function parseFactors(input: FactorsInput, read: TypedReader): FactorModel | null {
   const ultimate = read.positive({ text: input.ultimate, unit: '' }, 'factors.ultimate', { label: 'the factor of safety', dimension: 'ratio' })
   const specials = SPECIALS.flatMap((name) => {
     const factor = read.optionalPositive({ text: input[name], unit: '' }, `factors.${name}`, { label: `the ${name} factor`, dimension: 'ratio' })

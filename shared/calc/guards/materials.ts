@@ -1,19 +1,25 @@
-/** Guards on materials and factors: basis, source, temperature, elastic constants, factors in force. */
+/** Guards on material records: basis, source, strengths, temperature, elastic constants. */
 import type { Guard } from '#shared/calc/types'
-import { fired } from '#shared/calc/kinds/open-section/guard-catalogue'
-import type { CaseModel, MaterialModel } from '#shared/calc/kinds/open-section/model'
-import { below, figure } from '#shared/calc/kinds/open-section/say'
-import type { Solution } from '#shared/calc/kinds/open-section/solution'
-import { leastFittingFactor, usualFactorOfSafety } from '#shared/torsion/factors'
+import { fired } from '#shared/calc/guards/catalogue'
+import type { CaseHead, MaterialModel } from '#shared/calc/parts/model'
+import { figure } from '#shared/calc/parts/say'
 
 const HOT_ALUMINIUM = 70
 
-export function materialGuards(s: Solution): Guard[] {
-  const used = s.model.materials.filter(m => s.model.walls.some(w => w.material === m))
-  return [...used.flatMap(m => [...record(s, m), ...constants(m), ...temperatures(s, m)]), ...factorGuards(s)]
+/** What is judged: the materials in use, the temperatures of the cases, and whether the basis works with partial factors. */
+export interface MaterialUse {
+  materials: readonly MaterialModel[]
+  cases: readonly CaseHead[]
+  partial: boolean
+  /** Strengths that the margins of this calculation need: shear, unless said otherwise. */
+  needs?: readonly ('Fsu' | 'Fsy' | 'Ftu' | 'Fty')[]
 }
 
-function record(s: Solution, m: MaterialModel): Guard[] {
+export function materialGuards(use: MaterialUse): Guard[] {
+  return use.materials.flatMap(m => [...record(use, m), ...constants(m), ...temperatures(use, m)])
+}
+
+function record(use: MaterialUse, m: MaterialModel): Guard[] {
   const guards: Guard[] = []
   const missing = [
     ...(m.basis === 'none' ? ['a basis'] : []),
@@ -22,7 +28,7 @@ function record(s: Solution, m: MaterialModel): Guard[] {
     ...(m.edition.trim() === '' ? ['an edition'] : []),
   ]
   if (missing.length > 0) guards.push(fired('G-23', { of: m.id, values: { missing: missing.length }, message: `Material ${m.id} has no ${missing.map(w => w.replace(/^an? /, '')).join(', no ')}.` }))
-  const strengths = missingStrengths(s, m)
+  const strengths = missingStrengths(use, m)
   if (strengths.length > 0) {
     guards.push(fired('G-23', {
       of: `strength:${m.id}`, title: 'Strength missing', values: { missing: strengths.length },
@@ -35,12 +41,11 @@ function record(s: Solution, m: MaterialModel): Guard[] {
   return guards
 }
 
+const STRENGTHS = { Fsu: 'ultimate shear strength', Fsy: 'yield strength', Ftu: 'ultimate tension strength', Fty: 'yield strength in tension' } as const
+
 /** With partial factors the basis may be checked on yield alone. */
-function missingStrengths(s: Solution, m: MaterialModel): string[] {
-  return [
-    ...(m.Fsu === null && !s.model.factors.partial ? ['ultimate shear strength'] : []),
-    ...(m.Fsy === null ? ['yield strength'] : []),
-  ]
+function missingStrengths({ partial, needs = ['Fsu', 'Fsy'] }: MaterialUse, m: MaterialModel): string[] {
+  return needs.filter(name => m[name] === null && !(partial && (name === 'Fsu' || name === 'Ftu'))).map(name => STRENGTHS[name])
 }
 
 function constants(m: MaterialModel): Guard[] {
@@ -54,8 +59,8 @@ function constants(m: MaterialModel): Guard[] {
 }
 
 /** One guard per material, naming the case furthest outside its data and how many others are outside too. */
-function temperatures(s: Solution, m: MaterialModel): Guard[] {
-  const outside = s.model.cases.flatMap((c) => {
+function temperatures(use: MaterialUse, m: MaterialModel): Guard[] {
+  const outside = use.cases.flatMap((c) => {
     const fault = temperatureFault(m, c)
     return fault === null ? [] : [{ c, ...fault }]
   })
@@ -71,7 +76,7 @@ function temperatures(s: Solution, m: MaterialModel): Guard[] {
 
 interface TemperatureFault { T: number, beyond: number, reason: string }
 
-function temperatureFault(m: MaterialModel, c: CaseModel): TemperatureFault | null {
+function temperatureFault(m: MaterialModel, c: CaseHead): TemperatureFault | null {
   const T = c.temperature?.value
   if (T === undefined) return null
   const first = m.knockdown[0]?.temperature
@@ -84,28 +89,4 @@ function temperatureFault(m: MaterialModel, c: CaseModel): TemperatureFault | nu
     return { T, beyond: T - HOT_ALUMINIUM, reason: `above ${HOT_ALUMINIUM} °C, where material ${m.id} (aluminium) has no knock-down factor` }
   }
   return null
-}
-
-function factorGuards(s: Solution): Guard[] {
-  const { factors, declarations } = s.model
-  const guards: Guard[] = []
-  if (factors.partial) {
-    if (factors.reason === '') {
-      guards.push(fired('G-35', {
-        of: 'partial', values: { 'factor of safety': factors.ultimate }, title: 'Partial factors without their paragraph',
-        message: `The basis is declared to work with partial factors (${figure(factors.ultimate)} on loads), and its paragraph is not quoted.`,
-      }))
-    }
-  } else {
-    if (below(factors.ultimate, usualFactorOfSafety)) guards.push(fired('G-35', { of: 'safety', values: { 'factor of safety': factors.ultimate }, message: `The factor of safety is ${figure(factors.ultimate)}, below ${usualFactorOfSafety}.` }))
-    if (declarations.fitting && below(factors.special, leastFittingFactor)) guards.push(fired('G-35', { of: 'fitting', values: { 'special factor': factors.special }, message: `The part is declared a fitting and the special factor in force is ${figure(factors.special)}, below ${leastFittingFactor}.` }))
-  }
-  const applied = factors.specials.filter(f => f.value > 1)
-  if (applied.length > 1) {
-    guards.push(fired('G-36', {
-      values: Object.fromEntries(applied.map(f => [f.name, f.value])),
-      message: `Two or more special factors are given (${applied.map(f => `${f.name} ${figure(f.value)}`).join(', ')}); the highest, ${figure(factors.special)}, is used.`,
-    }))
-  }
-  return guards
 }
