@@ -41,8 +41,8 @@ export interface OutlineEdge {
   readonly arc: EdgeArc | null
 }
 
-/** A bulge below this is straight: the arc leaves its chord by less than rounding. */
-const straightBulge = 1e-9
+/** A bulge below this is straight: the arc leaves its chord by 5e-8 of it at most. */
+const straightBulge = 1e-7
 
 /** The arc over a chord by its bulge; null for a straight edge. */
 export function edgeArc(a: PlanePoint, b: PlanePoint, bulge = 0): EdgeArc | null {
