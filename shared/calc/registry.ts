@@ -1,5 +1,6 @@
 /** All calculation kinds. One line per kind; a second registration of a name is a programmer's error. */
 import { openSection } from '#shared/calc/kinds/open-section/kind'
+import { noLinks, type Links } from '#shared/calc/links'
 import type { CalcKind, Evaluation } from '#shared/calc/types'
 
 /** Changes whenever any kind may give another number than before. */
@@ -41,7 +42,7 @@ export const calcKindNames = (): string[] => registry.names()
  * Evaluates one calculation of a document. Never throws: an unknown kind or a newer version than this
  * engine knows is a fault, and the calculation is shown locked rather than dropped.
  */
-export function evaluateCalculation(calculation: { kind: string, kindVersion: number, inputs: unknown }): Evaluation {
+export function evaluateCalculation(calculation: { kind: string, kindVersion: number, inputs: unknown }, links: Links = noLinks): Evaluation {
   if (!registry.has(calculation.kind)) {
     return { ok: false, faults: [{ path: 'kind', message: `This version does not know the calculation kind “${calculation.kind.slice(0, 60)}”; it is kept as it is and cannot be changed here.` }] }
   }
@@ -49,5 +50,5 @@ export function evaluateCalculation(calculation: { kind: string, kindVersion: nu
   if (calculation.kindVersion !== kind.version) {
     return { ok: false, faults: [{ path: 'kindVersion', message: `This calculation was written for version ${calculation.kindVersion} of “${kind.title}”; this engine has version ${kind.version}. It is kept as it is.` }] }
   }
-  return kind.evaluate(calculation.inputs)
+  return kind.evaluate(calculation.inputs, links)
 }

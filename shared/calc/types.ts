@@ -3,10 +3,11 @@
  * the server read the same object, and nothing in it depends on a locale.
  * Engine values are in N, mm, MPa, rad, K-free °C; `unit` says how to show them.
  */
+import type { LinkSource, Links } from '#shared/calc/links'
 import type { Dimension, UnitId } from '#shared/units/units'
 
 /** What a person typed: kept as typed, parsed by the server. */
-export interface TypedQuantity { text: string, unit: UnitId }
+export interface TypedQuantity { text: string, unit: UnitId, from?: LinkSource }
 
 export interface Output {
   /** Stable within the calculation: `J`, `theta@L04`, `tau:a@L04`, `MS:shear-ultimate@L04`. */
@@ -214,5 +215,5 @@ export interface CalcKind<Inputs> {
   /** Inputs of a fresh calculation: valid JSON, sensible units, fields empty. */
   blank: () => Inputs
   /** Pure; never throws on bad inputs, never returns NaN or Infinity. */
-  evaluate: (inputs: unknown) => Evaluation
+  evaluate: (inputs: unknown, links?: Links) => Evaluation
 }

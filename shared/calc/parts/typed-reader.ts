@@ -1,8 +1,10 @@
 /** Reads typed fields and gathers every fault with its path, so that a form can show all of them at once. */
+import { fitsDimension, noLinks, type LinkSource, type Links } from '#shared/calc/links'
 import type { Fault, TypedQuantity } from '#shared/calc/types'
 import type { Measured, Refused, Unusual } from '#shared/calc/parts/model'
 import { parseQuantity } from '#shared/units/quantity'
-import type { Dimension } from '#shared/units/units'
+import { showQuantity } from '#shared/units/display'
+import { unitFits, engineUnit, type Dimension } from '#shared/units/units'
 
 /** Usual size of an input in engine units; three decades either way are let pass (G-44, common practice). */
 export type Typical = 'thickness' | 'wall length' | 'radius' | 'torque' | 'rate' | 'modulus' | 'strength' | 'bar length' | 'twist'
@@ -28,7 +30,31 @@ export interface TypedReader {
   optional: (typed: TypedQuantity | null, path: string, rule: Rule) => Measured | null
 }
 
-export function typedReader(): TypedReader {
+type Got = { ok: true, read: Measured } | { ok: false, message: string }
+const unread = (message: string): Got => ({ ok: false, message })
+
+/** The value of one field, linked or typed, in engine units. */
+function readValue(typed: TypedQuantity, rule: Rule, links: Links): Got {
+  const got = typed.from ? linkedValue(typed.from, typed, rule, links) : typedValue(typed, rule)
+  return got.ok && Math.abs(got.read.value) > 1e15 ? unread(`G-01: ${rule.label} is too large to compute with; check the number and its unit.`) : got
+}
+
+function typedValue(typed: TypedQuantity, rule: Rule): Got {
+  if (typed.text.trim() === '') return unread(`Give ${rule.label}.`)
+  const read = parseQuantity(typed, rule.dimension)
+  return read.ok ? { ok: true, read: { value: read.engine, unit: read.unit, typed: typed.text.trim() } } : unread(read.message)
+}
+
+function linkedValue(source: LinkSource, typed: TypedQuantity, rule: Rule, links: Links): Got {
+  const got = links.value(source)
+  if (!got.ok) return unread(got.reason)
+  if (!fitsDimension(got.dimension, rule.dimension)) return unread(`What is linked for ${rule.label} is of another dimension; choose a value that fits, or type one.`)
+  const unit = unitFits(typed.unit, rule.dimension) ? typed.unit : engineUnit(rule.dimension)
+  return { ok: true, read: { value: got.value, unit, typed: showQuantity(got.value, rule.dimension, unit) } }
+}
+
+/** `links` gives the values of fields that are linked instead of typed. */
+export function typedReader(links: Links = noLinks): TypedReader {
   const faults: Fault[] = []
   const refused: Refused[] = []
   const unusual: Unusual[] = []
@@ -37,21 +63,13 @@ export function typedReader(): TypedReader {
   }
 
   function number(typed: TypedQuantity, path: string, rule: Rule): Measured | null {
-    if (typed.text.trim() === '') {
-      fault(path, `Give ${rule.label}.`)
+    const got = readValue(typed, rule, links)
+    if (!got.ok) {
+      fault(path, got.message)
       return null
     }
-    const read = parseQuantity(typed, rule.dimension)
-    if (!read.ok) {
-      fault(path, read.message)
-      return null
-    }
-    if (Math.abs(read.engine) > 1e15) {
-      fault(path, `G-01: ${rule.label} is too large to compute with; check the number and its unit.`)
-      return null
-    }
-    noteUnusual(read.engine, read.unit, path, rule)
-    return { value: read.engine, unit: read.unit, typed: typed.text.trim() }
+    noteUnusual(got.read.value, got.read.unit, path, rule)
+    return got.read
   }
 
   function noteUnusual(value: number, unit: Unusual['unit'], path: string, rule: Rule) {
@@ -78,7 +96,7 @@ export function typedReader(): TypedReader {
   }
 
   function optional(typed: TypedQuantity | null, path: string, rule: Rule): Measured | null {
-    return typed === null || typed.text.trim() === '' ? null : number(typed, path, rule)
+    return typed === null || (!typed.from && typed.text.trim() === '') ? null : number(typed, path, rule)
   }
 
   function optionalPositive(typed: TypedQuantity | null, path: string, rule: Rule): Measured | null {

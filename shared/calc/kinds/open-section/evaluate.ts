@@ -1,3 +1,4 @@
+import { noLinks, type Links } from '#shared/calc/links'
 import type { CalcResult, Evaluation } from '#shared/calc/types'
 import { openSectionGuards } from '#shared/calc/kinds/open-section/guards'
 import { METHOD_REVISION } from '#shared/calc/kinds/open-section/method'
@@ -10,8 +11,8 @@ import { solveOpenSection } from '#shared/calc/kinds/open-section/solve'
 import { openSectionWorking } from '#shared/calc/kinds/open-section/working'
 
 /** Typed inputs to results with their working, guards and sketch; or the faults that prevent it. Never throws. */
-export function evaluateOpenSection(inputs: unknown): Evaluation {
-  const parsed = parseOpenSection(inputs)
+export function evaluateOpenSection(inputs: unknown, links: Links = noLinks): Evaluation {
+  const parsed = parseOpenSection(inputs, links)
   if (!parsed.ok) return { ok: false, faults: parsed.faults }
   const solved = solveOpenSection(parsed.model)
   if (!solved.ok) return { ok: false, faults: solved.faults }

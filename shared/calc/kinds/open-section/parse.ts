@@ -1,4 +1,5 @@
 /** From typed inputs to numbers in N, mm, MPa, rad, °C; or every fault, each with the path of its field. */
+import { noLinks, type Links } from '#shared/calc/links'
 import type { Fault } from '#shared/calc/types'
 import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 import { parseWalls } from '#shared/calc/parts/parse-walls'
@@ -9,16 +10,16 @@ import { typedReader } from '#shared/calc/parts/typed-reader'
 
 export type Parsed = { ok: true, model: OpenSectionModel } | { ok: false, faults: Fault[] }
 
-export function parseOpenSection(value: unknown): Parsed {
+export function parseOpenSection(value: unknown, links: Links = noLinks): Parsed {
   const checked = openSectionSchema.safeParse(value)
   if (!checked.success) {
     return { ok: false, faults: checked.error.issues.slice(0, 50).map(issue => ({ path: issue.path.join('.'), message: issue.message })) }
   }
-  return parseChecked(checked.data)
+  return parseChecked(checked.data, links)
 }
 
-function parseChecked(inputs: OpenSectionInputs): Parsed {
-  const read = typedReader()
+function parseChecked(inputs: OpenSectionInputs, links: Links): Parsed {
+  const read = typedReader(links)
   checkMaterialNames(inputs, read.fault)
   const materials = inputs.materials.flatMap((m, i) => parseMaterial(m, i, read) ?? [])
   const cases = parseCases(inputs.loading, read)
