@@ -2,14 +2,11 @@
 import fc from 'fast-check'
 import katex from 'katex'
 import { describe, expect, it } from 'vitest'
-import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, stripInputs } from '../../../factories/open-section'
+import { calcSamples } from '../../../factories/calc-samples'
+import { stripInputs } from '../../../factories/open-section'
 import { drawingToSvg } from '#shared/calc/drawing-svg'
 import { calcKind, calcKindNames, evaluateCalculation } from '#shared/calc/registry'
 import type { CalcResult, Evaluation } from '#shared/calc/types'
-
-const samples: Record<string, () => unknown[]> = {
-  'open-section': () => [stripInputs(), hatInputs(), lippedChannelInputs(), angleInputs(), channelInputs(), bracketInputs()],
-}
 
 /** Every path to a leaf of a JSON value. */
 function leaves(value: unknown, path: (string | number)[] = []): (string | number)[][] {
@@ -64,7 +61,7 @@ function judged(evaluation: Evaluation) {
 
 describe.each(calcKindNames())('calculation kind %s', (name) => {
   const kind = calcKind(name)
-  const given = samples[name]?.() ?? []
+  const given = Object.values(calcSamples[name] ?? {}).map(make => make())
 
   it('has samples here', () => expect(given.length).toBeGreaterThan(0))
   it('begins blank with inputs its own schema takes, and asks for what is missing', () => {
@@ -89,16 +86,11 @@ describe.each(calcKindNames())('calculation kind %s', (name) => {
     for (const inputs of given) {
       const evaluation = kind.evaluate(inputs)
       if (!evaluation.ok) continue
-      expect(evaluation.result.working.length).toBeGreaterThan(0)
+      expect(evaluation.result.working.length > 0).toBe(!kind.record)
       for (const { symbols, numbers, result } of evaluation.result.working.flatMap(s => s.lines)) {
         expect(() => katex.renderToString(`${symbols} = ${numbers} = ${result}`, { throwOnError: true, strict: 'error' })).not.toThrow()
       }
     }
-  })
-  it('refuses an allowable next to nothing, whose ratio would leave the range of numbers', () => {
-    const inputs = channelInputs()
-    inputs.materials.forEach((material) => { material.Fsu = { text: '5e-324', unit: 'MPa' } })
-    expect(evaluateCalculation({ kind: 'open-section', kindVersion: 1, inputs })).toMatchObject({ ok: false, faults: [{ path: 'materials.0.Fsu' }] })
   })
   it('never throws on anything put in place of one or two fields', () => {
     fc.assert(fc.property(fc.constantFrom(...given), fc.nat(), anything, fc.nat(), anything, (inputs, i, first, j, second) => {

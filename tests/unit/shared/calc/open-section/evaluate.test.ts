@@ -181,4 +181,10 @@ describe('faults', () => {
     inputs.materials.push(inputs.materials[0]!)
     expect(faultsOf(inputs).map(f => f.path).sort()).toEqual(['loading.cases.1.id', 'materials.1.id', 'walls.1.id'])
   })
+
+  it('refuses an allowable next to nothing, whose ratio would leave the range of numbers', () => {
+    const inputs = channelInputs()
+    inputs.materials.forEach((material) => { material.Fsu = { text: '5e-324', unit: 'MPa' } })
+    expect(faultsOf(inputs).map(f => f.path)).toEqual(['materials.0.Fsu'])
+  })
 })

@@ -1,0 +1,19 @@
+/**
+ * Realistic inputs of every calculation kind, for what all kinds have to keep to: the contract test, the golden
+ * results and the batch. A kind without samples here fails the contract test.
+ */
+import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, sheet2024, sheet6061, stripInputs } from './open-section'
+import { loadCasesInputs, materialInputs } from './records'
+
+/** A name says what the sample shows; each call makes fresh inputs. */
+export type Samples = Record<string, () => unknown>
+
+export const calcSamples: Record<string, Samples> = {
+  'open-section': { strip: stripInputs, hat: hatInputs, 'lipped channel': () => lippedChannelInputs(), angle: angleInputs, channel: channelInputs, 'bracket in inches': bracketInputs },
+  'material': { 'sheet': materialInputs, 'sheet with knock-down': sheet2024, 'another sheet': sheet6061 },
+  'load-cases': { 'torques and forces': loadCasesInputs },
+}
+
+/** Every sample with the kind it is of. */
+export const allSamples = (): { kind: string, name: string, inputs: unknown }[] =>
+  Object.entries(calcSamples).flatMap(([kind, samples]) => Object.entries(samples).map(([name, make]) => ({ kind, name, inputs: make() })))
