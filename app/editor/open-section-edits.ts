@@ -55,6 +55,15 @@ export function endBy(by: string, end: WallEndInput, unit: UnitId): WallEndInput
   return { by: 'length', length: 'length' in end ? end.length : empty(unit), direction }
 }
 
+interface Head { id: string, title: string, source: string, level: 'limit' | 'ultimate', temperature: TypedQuantity | null }
+const headOf = ({ id, title, source, level, temperature }: Head): Head => ({ id, title, source, level, temperature })
+
+/** The cases typed so far; those of a linked table are not this calculation's own. */
+function headsOf(loading: LoadingInput): Head[] {
+  if (loading.by === 'table') return []
+  return loading.by === 'torque' ? [{ id: 'L01', title: '', source: loading.source, level: loading.level, temperature: loading.temperature }] : loading.cases.map(headOf)
+}
+
 /** Another way to load the section, keeping the torque or the cases already typed. */
 export function loadingBy(by: string, inputs: OpenSectionInputs): LoadingInput {
   const now = inputs.loading
@@ -62,20 +71,15 @@ export function loadingBy(by: string, inputs: OpenSectionInputs): LoadingInput {
     const first = now.by === 'cases' ? now.cases[0] : undefined
     return { by: 'torque', torque: first?.torque ?? empty(torqueUnit(inputs)), level: first?.level ?? 'limit', temperature: first?.temperature ?? null, source: first?.source ?? '' }
   }
-  if (by === 'cases') {
-    const cases = now.by === 'torque'
-      ? [{ id: 'L01', title: '', source: now.source, level: now.level, temperature: now.temperature, torque: now.torque }]
-      : now.cases.map(({ id, title, source, level, temperature }) => ({ id, title, source, level, temperature, torque: empty(torqueUnit(inputs)) }))
-    return { by: 'cases', cases }
-  }
-  const heads = now.by === 'torque' ? [{ id: 'L01', title: '', source: now.source, level: now.level, temperature: now.temperature }] : now.cases
-  return { by: 'rate', cases: heads.map(({ id, title, source, level, temperature }) => ({ id, title, source, level, temperature, rate: empty(rateUnit(inputs)) })) }
+  const heads = headsOf(now)
+  if (by === 'cases') return { by: 'cases', cases: heads.map(head => ({ ...head, torque: now.by === 'torque' ? now.torque : empty(torqueUnit(inputs)) })) }
+  return { by: 'rate', cases: heads.map(head => ({ ...head, rate: empty(rateUnit(inputs)) })) }
 }
 
 /** One more row under the load cases, at the level and from the source of the last one. */
 export function withNextCase(inputs: OpenSectionInputs): LoadingInput {
   const now = inputs.loading
-  if (now.by === 'torque') return withNextCase({ ...inputs, loading: loadingBy('cases', inputs) })
+  if (now.by === 'torque' || now.by === 'table') return withNextCase({ ...inputs, loading: loadingBy('cases', inputs) })
   const last = now.cases.at(-1)
   const head = { id: nextNumbered('L', now.cases.map(each => each.id), 2), title: '', source: last?.source ?? '', level: last?.level ?? 'limit' as const, temperature: last?.temperature ?? null }
   if (now.by === 'cases') return { by: 'cases', cases: [...now.cases, { ...head, torque: empty(now.cases.at(-1)?.torque.unit ?? torqueUnit(inputs)) }] }

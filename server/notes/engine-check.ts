@@ -1,4 +1,4 @@
-import { evaluateCalculation } from '#shared/calc/registry'
+import { evaluateNote } from '#shared/calc/evaluate-note'
 import { compareEvaluations } from '#shared/calc/result-compare'
 import { calculationsOf } from '#shared/note/calculations'
 import { readDocument } from '#shared/note/schema'
@@ -9,10 +9,11 @@ import { resultsOf } from './current-results'
 /** Calculations that the engine of today computes otherwise than the frozen results say, by label. */
 export function movedCalculations(issue: Issue): { label: string, keys: string[] }[] {
   const results = resultsOf(issue)
-  return calculationsOf(readDocument(JSON.parse(issue.document))).flatMap((calculation) => {
-    const stored = results[calculation.id]
-    const now = evaluateCalculation({ kind: calculation.kind, kindVersion: calculation.kindVersion, inputs: calculation.inputs })
-    const keys = stored ? compareEvaluations(stored, now).map(d => d.key) : ['no stored result']
+  const calculations = calculationsOf(readDocument(JSON.parse(issue.document)))
+  const { results: now } = evaluateNote(calculations)
+  return calculations.flatMap((calculation) => {
+    const [stored, again] = [results[calculation.id], now[calculation.id]]
+    const keys = stored && again ? compareEvaluations(stored, again).map(d => d.key) : ['no stored result']
     return keys.length ? [{ label: calculation.label, keys }] : []
   })
 }

@@ -1,26 +1,26 @@
-import type { Evaluation } from '#shared/calc/types'
-import { ENGINE_VERSION, evaluateCalculation } from '#shared/calc/registry'
+import { evaluateNote } from '#shared/calc/evaluate-note'
+import type { NoteCalc, Results } from '#shared/calc/note-links'
+import { ENGINE_VERSION } from '#shared/calc/registry'
 import { canonicalJson } from '#shared/note/canonical'
 import type { NoteCalculation } from '#shared/note/calculations'
 
-export type Results = Record<string, Evaluation>
+export type { Results }
 
 interface Before { calculations: NoteCalculation[], results: Results, engineVersion: string }
 
-const sameInputs = (a: NoteCalculation, b: NoteCalculation | undefined) =>
-  b !== undefined && a.kind === b.kind && a.kindVersion === b.kindVersion && canonicalJson(a.inputs) === canonicalJson(b.inputs)
-
-/** Recomputes the calculations of a document; what has the same inputs under the same engine keeps its result. */
+/**
+ * Recomputes the calculations of a document in the order of their links; what has the same inputs and the
+ * same linked values under the same engine keeps its result.
+ */
 export function evaluateDocument(calculations: NoteCalculation[], before?: Before): { results: Results, changed: Results } {
-  const results: Results = {}
-  const changed: Results = {}
-  const earlier = new Map(before?.calculations.map(c => [c.id, c]))
-  for (const calculation of calculations) {
-    const kept = before?.engineVersion === ENGINE_VERSION && sameInputs(calculation, earlier.get(calculation.id)) ? before.results[calculation.id] : undefined
-    const result = kept ?? evaluateCalculation({ kind: calculation.kind, kindVersion: calculation.kindVersion, inputs: calculation.inputs })
-    results[calculation.id] = result
-    if (!kept) changed[calculation.id] = result
+  const byId = new Map(before?.calculations.map(c => [c.id, c]))
+  const sameInputs = (now: NoteCalc) => {
+    const then = byId.get(now.id)
+    return then !== undefined && then.kind === now.kind && then.kindVersion === now.kindVersion && canonicalJson(then.inputs) === canonicalJson(now.inputs)
   }
+  const held = before?.engineVersion === ENGINE_VERSION ? { byId, results: before.results } : null
+  const { results, computed } = evaluateNote(calculations, held ? { ...held, sameInputs } : undefined)
+  const changed = Object.fromEntries(Object.entries(results).filter(([id, result]) => computed.includes(id) || result !== held?.results[id]))
   return { results, changed }
 }
 

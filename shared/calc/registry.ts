@@ -1,12 +1,12 @@
 /** All calculation kinds. One line per kind; a second registration of a name is a programmer's error. */
+import { loadCases } from '#shared/calc/kinds/load-cases/kind'
+import { material } from '#shared/calc/kinds/material/kind'
 import { openSection } from '#shared/calc/kinds/open-section/kind'
 import { noLinks, type Links } from '#shared/calc/links'
 import type { CalcKind, Evaluation } from '#shared/calc/types'
 
 /** Changes whenever any kind may give another number than before. */
 export const ENGINE_VERSION = '1.0.0'
-/** The methods reference the engine implements. */
-export const METHOD_REVISION = openSection.methodRevision
 
 // Inputs are checked by each kind itself; the registry never looks inside them.
 type AnyKind = CalcKind<unknown>
@@ -31,11 +31,15 @@ export function makeRegistry(kinds: AnyKind[]): Registry {
   }
 }
 
-const registry = makeRegistry([openSection])
+const registry = makeRegistry([openSection, material, loadCases])
 
 /** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
 export const calcKind = (name: string): AnyKind => registry.kind(name)
 export const isCalcKind = (name: string): boolean => registry.has(name)
+/** Whether blocks of this kind are records of the note rather than calculations. */
+export const isRecordKind = (name: string): boolean => registry.has(name) && registry.kind(name).record === true
+/** Whether it reads the results of all other calculations. */
+export const gathers = (name: string): boolean => registry.has(name) && registry.kind(name).gathers === true
 export const calcKindNames = (): string[] => registry.names()
 
 /**

@@ -185,6 +185,8 @@ export interface CalcResult {
   /** Walls and cases of a section; empty for kinds that have none. */
   walls: WallRow[]
   cases: CaseRow[]
+  /** The cases whose values other calculations may take whole: outputs `T@L04` for every head. Temperature in °C. */
+  heads?: { id: string, title: string, source: string, level: LoadLevel, temperature: number | null }[]
   tables?: ResultTable[]
   plots?: Plot[]
   compared?: ComparedValue[]
@@ -209,6 +211,10 @@ export interface CalcKind<Inputs> {
   version: number
   /** `Open section` */
   title: string
+  /** A record of the note (a material, a table of load cases) and no calculation. */
+  record?: true
+  /** Reads the results of all other calculations, so that it is computed after them. */
+  gathers?: true
   methodRevision: string
   /** zod schema of the stored inputs */
   schema: { safeParse: (value: unknown) => unknown }

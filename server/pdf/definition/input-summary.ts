@@ -40,6 +40,7 @@ function openSectionFacts(inputs: OpenSectionInputs): Fact[] {
 
 function loads(loading: OpenSectionInputs['loading']): string {
   if (loading.by === 'torque') return `one torque of ${typed(loading.torque)} at ${loading.level}${loading.source ? `, ${loading.source}` : ''}`
+  if (loading.by === 'table') return `the cases of another calculation, ${loading.quantity}`
   const sources = [...new Set(loading.cases.map(one => one.source).filter(Boolean))]
   return `${loading.cases.length} cases ${loading.by === 'rate' ? 'of imposed rate of twist' : 'of torque'}${sources.length > 0 ? `; ${sources.slice(0, 3).join('; ')}${sources.length > 3 ? ' and others' : ''}` : ''}`
 }

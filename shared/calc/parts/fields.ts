@@ -19,20 +19,13 @@ export interface FieldMeta {
 }
 
 const allUnits = [...new Set(dimensions.flatMap(unitsOf))] as [UnitId, ...UnitId[]]
-const unit = z.enum(allUnits, { error: 'Choose one of the listed units.' })
+export const unitId = z.enum(allUnits, { error: 'Choose one of the listed units.' })
 
-/**
- * Where a value comes from that is not typed: an output of another calculation, a property of a material
- * record of the note, or a load of one of its tables (one case, or the envelope of all).
- */
-export const linkSource = z.discriminatedUnion('of', [
-  z.strictObject({ of: z.literal('output'), calculation: z.uuid(), key: z.string().min(1).max(120) }),
-  z.strictObject({ of: z.literal('material'), record: z.uuid(), property: z.enum(['E', 'G', 'nu', 'Ftu', 'Fty', 'Fsu', 'Fsy']) }),
-  z.strictObject({ of: z.literal('load'), table: z.uuid(), column: z.string().min(1).max(40), pick: z.enum(['case', 'max', 'min', 'largest']), caseId: z.string().max(20) }),
-])
+/** Where a value comes from that is not typed: an output of another calculation or record of the note. */
+export const linkSource = z.strictObject({ calculation: z.uuid(), key: z.string().min(1).max(120) })
 
 /** A number as typed, with its unit; linked, the unit is the one it is shown in and the text is what was typed before. */
-export const typedQuantity = z.strictObject({ text: z.string().max(40), unit, from: linkSource.optional() })
+export const typedQuantity = z.strictObject({ text: z.string().max(40), unit: unitId, from: linkSource.optional() })
 
 /** A typed quantity of one dimension, with what the form says of it. */
 export const quantity = (title: string, dimension: Dimension, more: Omit<FieldMeta, 'title' | 'dimension'> = {}) =>

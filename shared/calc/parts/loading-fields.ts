@@ -12,11 +12,12 @@ const temperature = optionalQuantity('Temperature', 'temperature', { symbol: '\\
 /** What every load case says of itself, whatever it loads. */
 export const caseHead = { id: identifier, title: name, source, level, temperature }
 
-/** One torque, a table of torques, or a table of imposed rates of twist. */
+/** One torque, a table of torques, a table of imposed rates of twist, or the cases of another calculation or record of the note. */
 export const loading = z.discriminatedUnion('by', [
   z.strictObject({ by: z.literal('torque'), torque, level, temperature, source }),
   z.strictObject({ by: z.literal('cases'), cases: z.array(z.strictObject({ ...caseHead, torque })).max(MAX_CASES) }),
   z.strictObject({ by: z.literal('rate'), cases: z.array(z.strictObject({ ...caseHead, rate })).max(MAX_CASES) }),
+  z.strictObject({ by: z.literal('table'), table: z.uuid(), quantity: z.string().min(1).max(40) }),
 ])
 
 export const factors = z.strictObject({

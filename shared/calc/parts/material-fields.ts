@@ -5,7 +5,8 @@ import { identifier, name, optionalQuantity, quantity, source, typedNumber, type
 export const MAX_MATERIALS = 20
 export const MAX_KNOCKDOWN = 20
 
-export const material = z.strictObject({
+/** The record itself: what a material of the note holds, and what controlled data will hold. */
+export const materialRecord = z.strictObject({
   id: identifier,
   name,
   specification: source,
@@ -30,6 +31,9 @@ export const material = z.strictObject({
   knockdown: z.array(z.strictObject({ temperature: typedQuantity, factor: typedNumber })).max(MAX_KNOCKDOWN),
   knockdownSource: source,
 })
+
+/** As a calculation holds it: typed here, or taken whole from a record of the note (what was typed before is then not read). */
+const material = materialRecord.extend({ record: z.uuid().optional() })
 
 export const materials = z.array(material).max(MAX_MATERIALS)
 export type MaterialInput = z.infer<typeof material>

@@ -1,7 +1,9 @@
 import type { FactorsInput, LoadingInput } from '#shared/calc/parts/loading-fields'
-import type { CaseModel, FactorModel } from '#shared/calc/parts/model'
+import type { CaseModel, FactorModel, Measured } from '#shared/calc/parts/model'
 import type { TypedReader } from '#shared/calc/parts/typed-reader'
 import { specialFactor } from '#shared/torsion/factors'
+import { showValue } from '#shared/units/display'
+import { engineUnit, type Dimension } from '#shared/units/units'
 
 /** The id under which results of a single torque stand. */
 export const SINGLE_CASE = 'T'
@@ -12,6 +14,7 @@ export function parseCases(loading: LoadingInput, read: TypedReader): CaseModel[
     const temperature = read.optional(loading.temperature, 'loading.temperature', { label: 'the temperature', dimension: 'temperature' })
     return torque ? [{ id: SINGLE_CASE, title: 'Applied torque', source: loading.source, level: loading.level, torque, rate: null, temperature }] : []
   }
+  if (loading.by === 'table') return linkedCases(loading.table, loading.quantity, read)
   if (loading.cases.length === 0) read.fault('loading.cases', 'Add at least one load case.')
   const ids = new Set<string>()
   return loading.cases.flatMap((row, i): CaseModel[] => {
@@ -28,6 +31,24 @@ export function parseCases(loading: LoadingInput, read: TypedReader): CaseModel[
     return rate ? [{ ...head, torque: null, rate }] : []
   })
 }
+
+/** Torques or rates of twist of another calculation, case by case. */
+function linkedCases(table: string, quantity: string, read: TypedReader): CaseModel[] {
+  const got = read.links.cases(table, quantity)
+  if (!got.ok) {
+    read.fault('loading.table', got.reason)
+    return []
+  }
+  return got.cases.flatMap(({ id, title, source, level, temperature, value, dimension }): CaseModel[] => {
+    const head = { id, title, source, level, temperature: temperature === null ? null : measured(temperature, 'temperature') }
+    if (dimension === 'torque') return [{ ...head, torque: measured(value, dimension), rate: null }]
+    if (dimension === 'rateOfTwist') return [{ ...head, torque: null, rate: measured(value, dimension) }]
+    read.fault('loading.quantity', `Case ${id} gives neither a torque nor a rate of twist; choose another quantity.`)
+    return []
+  })
+}
+
+const measured = (value: number, dimension: Dimension): Measured => ({ value, unit: engineUnit(dimension), typed: showValue(value, dimension, engineUnit(dimension)) })
 
 const SPECIALS = ['fitting', 'casting', 'bearing'] as const
 

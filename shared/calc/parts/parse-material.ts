@@ -1,11 +1,27 @@
-import type { MaterialInput } from '#shared/calc/parts/material-fields'
+import { materialRecord, type MaterialInput } from '#shared/calc/parts/material-fields'
 import type { KnockdownPoint, MaterialModel } from '#shared/calc/parts/model'
 import type { TypedReader } from '#shared/calc/parts/typed-reader'
 import { shearYieldFromTension } from '#shared/torsion/allowables'
 
 /** A material record as numbers. Missing strengths stay missing: no default is invented (methods §7.2). */
-export function parseMaterial(input: MaterialInput, i: number, read: TypedReader): MaterialModel | null {
-  const at = (field: string) => `materials.${i}.${field}`
+export function parseMaterial(typed: MaterialInput, i: number, read: TypedReader): MaterialModel | null {
+  const path = `materials.${i}`
+  const input = typed.record === undefined ? typed : recordOf(typed.record, typed.id, path, read)
+  return input && readMaterial(input, path, read)
+}
+
+/** The record of the note under the name it has in this calculation. */
+function recordOf(record: string, id: string, path: string, read: TypedReader): MaterialInput | null {
+  const got = read.links.record(record, 'material')
+  const checked = got.ok ? materialRecord.safeParse(got.inputs) : null
+  if (checked?.success) return { ...checked.data, id }
+  read.fault(path, got.ok ? 'The material record is not complete; open it and correct it.' : got.reason)
+  return null
+}
+
+/** Reads a record; faults are noted under `path`. */
+export function readMaterial(input: MaterialInput, path: string, read: TypedReader): MaterialModel | null {
+  const at = (field: string) => `${path}.${field}`
   const named = (what: string) => `${what} of material ${input.id}`
   const G = read.positive(input.G, at('G'), { label: named('the shear modulus'), dimension: 'stress', typical: 'modulus' })
   const E = read.optionalPositive(input.E, at('E'), { label: named('the modulus of elasticity'), dimension: 'stress', typical: 'modulus' })

@@ -16,6 +16,7 @@ const TYPICAL: Record<Typical, number> = {
 export interface Rule { label: string, dimension: Dimension, typical?: Typical }
 
 export interface TypedReader {
+  links: Links
   faults: Fault[]
   refused: Refused[]
   unusual: Unusual[]
@@ -108,5 +109,5 @@ export function typedReader(links: Links = noLinks): TypedReader {
     return read && largeEnough(read, path, rule)
   }
 
-  return { faults, refused, unusual, fault, number, positive, optionalPositive, optional }
+  return { links, faults, refused, unusual, fault, number, positive, optionalPositive, optional }
 }

@@ -1,7 +1,7 @@
 import { noLinks, type Links } from '#shared/calc/links'
 import type { CalcResult, Evaluation } from '#shared/calc/types'
 import { openSectionGuards } from '#shared/calc/kinds/open-section/guards'
-import { METHOD_REVISION } from '#shared/calc/kinds/open-section/method'
+import { METHOD_REVISION } from '#shared/calc/method'
 import { openSectionOutputs } from '#shared/calc/kinds/open-section/outputs'
 import { parseOpenSection } from '#shared/calc/kinds/open-section/parse'
 import { caseRows, wallRows } from '#shared/calc/kinds/open-section/rows'

@@ -1,6 +1,6 @@
 import { blankOpenSection } from '#shared/calc/kinds/open-section/blank'
 import { evaluateOpenSection } from '#shared/calc/kinds/open-section/evaluate'
-import { METHOD_REVISION } from '#shared/calc/kinds/open-section/method'
+import { METHOD_REVISION } from '#shared/calc/method'
 import { openSectionSchema, type OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
 import type { CalcKind } from '#shared/calc/types'
 

@@ -6,15 +6,14 @@ import { parseWalls } from '#shared/calc/parts/parse-walls'
 import { parseCases, parseFactors } from '#shared/calc/parts/parse-loading'
 import { parseMaterial } from '#shared/calc/parts/parse-material'
 import { openSectionSchema, type OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import { schemaFaults } from '#shared/calc/parts/schema-faults'
 import { typedReader } from '#shared/calc/parts/typed-reader'
 
 export type Parsed = { ok: true, model: OpenSectionModel } | { ok: false, faults: Fault[] }
 
 export function parseOpenSection(value: unknown, links: Links = noLinks): Parsed {
   const checked = openSectionSchema.safeParse(value)
-  if (!checked.success) {
-    return { ok: false, faults: checked.error.issues.slice(0, 50).map(issue => ({ path: issue.path.join('.'), message: issue.message })) }
-  }
+  if (!checked.success) return { ok: false, faults: schemaFaults(checked.error) }
   return parseChecked(checked.data, links)
 }
 
