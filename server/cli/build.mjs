@@ -5,7 +5,7 @@ import { join } from 'node:path'
 import { ensurePrepared } from './packages.mjs'
 import { root, run, say } from './shell.mjs'
 
-const sources = ['app', 'server', 'shared', 'emails', 'public', 'nuxt.config.ts', 'tailwind.config.ts', 'mikro-orm.config.ts', 'package.json', 'package-lock.json']
+const sources = ['app', 'server', 'shared', 'emails', 'public', 'tests/reference', 'nuxt.config.ts', 'tailwind.config.ts', 'mikro-orm.config.ts', 'package.json', 'package-lock.json']
 
 function* filesOf(path) {
   if (!existsSync(path)) return
@@ -16,9 +16,9 @@ function* filesOf(path) {
   for (const name of readdirSync(path).sort()) yield* filesOf(join(path, name))
 }
 
-export function sourceHash() {
+export function sourceHash(of = sources) {
   const hash = createHash('sha256')
-  for (const source of sources) {
+  for (const source of of) {
     for (const file of filesOf(join(root, source))) hash.update(file.slice(root.length)).update('\0').update(readFileSync(file)).update('\0')
   }
   return hash.digest('hex').slice(0, 16)
@@ -41,6 +41,29 @@ function forgetOld(folder, keep) {
   for (const { name } of builds.slice(keep)) rmSync(join(folder, name), { recursive: true, force: true })
 }
 
+/** One file that Node.js runs, from `server/ENTRY.ts`. */
+function bundle(entry, folder) {
+  const target = join(folder, `${entry.split('/').pop()}.mjs`)
+  run('npx', ['esbuild', `server/${entry}.ts`, '--bundle', '--platform=node', '--format=esm', '--target=node20', '--packages=external', '--log-level=warning',
+    '--alias:#shared=./shared', '--alias:#server=./server', '--alias:#emails=./emails', '--alias:#reference=./tests/reference', `--outfile=${target}`])
+  return target
+}
+
+/** The bundle of `server/cli/NAME.ts`, a command that needs the engine and nothing of the pages or the database. */
+export function ensureEngineCommand(name) {
+  const folder = join(root, '.build/engine')
+  const target = join(folder, `${name}-${sourceHash(['server', 'shared', 'tests/reference', 'package-lock.json'])}.mjs`)
+  if (existsSync(target)) return target
+  const part = join(folder, `part-${process.pid}`)
+  try {
+    renameSync(bundle(`cli/${name}`, part), target)
+  } finally {
+    rmSync(part, { recursive: true, force: true })
+  }
+  for (const old of readdirSync(folder).filter(file => file.startsWith(`${name}-`))) if (join(folder, old) !== target) rmSync(join(folder, old), { force: true })
+  return target
+}
+
 /** The folder of the build of these sources; builds if it is not there yet. */
 export function ensureBuild() {
   const folder = join(root, '.build')
@@ -54,11 +77,8 @@ export function ensureBuild() {
   rmSync(target, { recursive: true, force: true })
   try {
     run('npx', ['nuxi', 'build'], { env: { ...process.env, NODE_ENV: 'production', NUXT_TELEMETRY_DISABLED: '1', TORQUILL_OUTPUT_DIR: part, TORQUILL_WORK_DIR: work, NODE_OPTIONS: '--max-old-space-size=4096' } })
-    // The worker and the terminal's commands are bundles of their own; packages stay where npm put them.
-    for (const entry of ['worker', 'cli/command', 'cli/mail-catcher']) {
-      run('npx', ['esbuild', `server/${entry}.ts`, '--bundle', '--platform=node', '--format=esm', '--target=node20', '--packages=external', '--log-level=warning',
-        '--alias:#shared=./shared', '--alias:#server=./server', '--alias:#emails=./emails', `--outfile=${join(part, `${entry.split('/').pop()}.mjs`)}`])
-    }
+    // The worker, the threads and the terminal's commands are bundles of their own; packages stay where npm put them.
+    for (const entry of ['worker', 'cli/command', 'cli/mail-catcher', 'validation/validation-thread']) bundle(entry, part)
     writeFileSync(join(part, 'complete'), '')
     renameSync(part, target)
   } finally {

@@ -56,4 +56,10 @@ export async function until(probe, { patience = 60_000, every = 200, what = 'the
   }
 }
 
-export const say = text => process.stdout.write(`${text}\n`)
+let told = process.stdout
+export const say = text => told.write(`${text}\n`)
+
+/** For commands whose standard output other programs read: what is said goes to standard error. */
+export const keepStandardOutputForData = () => {
+  told = process.stderr
+}

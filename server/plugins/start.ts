@@ -1,4 +1,5 @@
 import { closeQueue, useQueue } from '#server/jobs/queue'
+import { startValidation } from '#server/validation/validation-run'
 import { environment } from '#server/utils/environment'
 import { closeOrm, useOrm } from '#server/utils/orm'
 import { ENGINE_VERSION } from '#shared/calc/registry'
@@ -9,6 +10,7 @@ export default defineNitroPlugin((nitro) => {
   useQueue(databaseUrl)
   useOrm().catch(error => console.error('database', error.message))
   console.info(`engine ${ENGINE_VERSION}`)
+  startValidation()
   nitro.hooks.hook('close', async () => {
     await closeQueue()
     await closeOrm()
