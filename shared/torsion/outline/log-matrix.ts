@@ -7,7 +7,7 @@ import type { Panel, PanelMesh } from '#shared/torsion/outline/panels'
 import { logRule } from '#shared/torsion/outline/legendre-log'
 
 /** Panels nearer than this many half lengths get exact weights; farther off the recurrence of the exact weights would lose what Gauss weights keep. */
-const nearWithin = 3
+const nearWithin = 4
 
 interface Frame { readonly re: number, readonly im: number }
 

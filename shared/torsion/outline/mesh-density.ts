@@ -20,6 +20,8 @@ const smoothTurn = 1e-6
 const cornerPower = 2 / 3
 /** Largest angle of an arc panel on a mesh of density one. */
 const arcStep = Math.PI / 8
+/** Of the size: nearer than sound edges come to each other. */
+const touchingWithin = 1e-6
 /** Samples along an edge. */
 const samples = 96
 
@@ -41,23 +43,23 @@ function reachOf({ at, before, after }: OutlineCorner, edges: readonly OutlineEd
   return reach
 }
 
-/** Where curved edges come near each other, the shear varies over the root of gap times radius. */
-function narrowPlaces(edges: readonly OutlineEdge[]): Focus[] {
+/** Where curved edges come near each other, the shear varies over the root of gap times radius. Neighbours that touch at their common vertex are no narrow place. */
+function narrowPlaces(edges: readonly OutlineEdge[], touching: number): Focus[] {
   const boxes = edges.map(edgeBox)
   return edges.flatMap((p, index) => edges.slice(index + 1).flatMap((q, next): Focus[] => {
     const bend = Math.abs(curvature(p) + curvature(q))
     const [pBox, qBox] = [boxes[index], boxes[index + 1 + next]]
     if (bend === 0 || !pBox || !qBox || boxDistance(pBox, qBox) > 2 / bend) return []
-    return nearPairs(p, q).filter(pair => pair.p > 0 && pair.p < 1 && pair.q > 0 && pair.q < 1 && pair.distance > 0 && pair.distance * bend < 0.5).flatMap((pair): Focus[] => {
+    return nearPairs(p, q).filter(pair => pair.p > 0 && pair.p < 1 && pair.q > 0 && pair.q < 1 && pair.distance > touching && pair.distance * bend < 0.5).flatMap((pair): Focus[] => {
       const floor = Math.sqrt(2 * pair.distance / bend)
       return [edgePoint(p, pair.p), edgePoint(q, pair.q)].map(at => ({ at, reach: 0, floor: floor / 4 }))
     })
   }))
 }
 
-function fociOf({ corners, edges }: SoundOutline): Focus[] {
+function fociOf({ corners, edges, size }: SoundOutline): Focus[] {
   const vertices = corners.filter(corner => !runsOn(corner)).map((corner): Focus => ({ at: corner.at, reach: reachOf(corner, edges), floor: 0 }))
-  return [...vertices, ...narrowPlaces(edges)]
+  return [...vertices, ...narrowPlaces(edges, touchingWithin * size)]
 }
 
 /** Length of a panel at a point, on a mesh of density one. */

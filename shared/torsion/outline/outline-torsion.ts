@@ -76,6 +76,14 @@ function settled(solutions: readonly MeshSolution[], bounded: boolean): boolean 
   return J.uncertainty <= enough.J * J.value && (!tau || tau.uncertainty <= (bounded ? enough.tau : uncertaintyLimits.tau) * tau.value)
 }
 
+function failedCheck(checks: readonly SelfCheck[]): OutlineRefusal | null {
+  const failed = checks.find(({ ok }) => !ok)
+  return failed ? outlineRefusal(`The solution fails its own check (${failed.name}: ${failed.value.toExponential(1)}, at most ${failed.limit.toExponential(1)}). The walls are too thin for this method; use the thin-walled one.`) : null
+}
+
+const tooLarge = (unknowns: number, most: number): OutlineRefusal =>
+  outlineRefusal(`The outline needs ${unknowns} unknowns, at most ${most} are taken. Draw curves as arcs and leave out details that carry no torsion, or use the thin-walled methods.`)
+
 /** Solutions on meshes that double, at least three, more until they agree or the next would be too large. */
 function solutionsOf(sound: SoundOutline, densities: readonly EdgeDensity[], vertices: readonly ReentrantVertex[], most: number): MeshSolution[] | OutlineRefusal {
   const solutions: MeshSolution[] = []
@@ -83,9 +91,11 @@ function solutionsOf(sound: SoundOutline, densities: readonly EdgeDensity[], ver
     const stretches = meshStretches(densities, baseDensity, refine)
     const unknowns = stretches.length * panelOrder
     if (refine > 4 && (unknowns > most || settled(solutions, vertices.length === 0))) return solutions
-    if (refine === 1 && 4 * unknowns > most) return outlineRefusal(`The outline needs ${4 * unknowns} unknowns, at most ${most} are taken. Draw curves as arcs and leave out details that carry no torsion, or use the thin-walled methods.`)
+    if (refine === 1 && 4 * unknowns > most) return tooLarge(4 * unknowns, most)
     const solution = solveOnMesh(sound, stretches, vertices)
     if (!solution) return outlineRefusal('The equations of the outline have no solution to working accuracy; check it for gaps and walls far thinner than the rest.')
+    const failed = failedCheck(solution.checks.filter(({ geometry }) => geometry))
+    if (failed) return failed
     solutions.push(solution)
   }
 }
@@ -105,6 +115,9 @@ function peakShear(solutions: readonly MeshSolution[], vertices: readonly Reentr
 export function outlineTorsion(outline: Outline, { mostUnknowns = defaultMost }: OutlineOptions = {}): OutlineTorsion | OutlineRefusal {
   const sound = checkOutline(outline)
   if (!sound.ok) return sound
+  // Every edge carries a panel at least, on the third mesh four: refused before any work.
+  const least = 4 * panelOrder * sound.edges.length
+  if (least > mostUnknowns) return tooLarge(least, mostUnknowns)
   const vertices = reentrantVertices(sound)
   const found = solutionsOf(sound, meshDensity(sound), vertices, mostUnknowns)
   if ('ok' in found) return found
@@ -112,8 +125,8 @@ export function outlineTorsion(outline: Outline, { mostUnknowns = defaultMost }:
   const [coarse, middle, fine] = solutions
   const shear = peakShear(solutions, vertices)
   if (!coarse || !middle || !fine || !shear) return outlineRefusal('The shear along the outline could not be read; check the outline.')
-  const failed = fine.checks.find(({ ok }) => !ok)
-  if (failed) return outlineRefusal(`The solution fails its own check (${failed.name}: ${failed.value.toExponential(1)}, at most ${failed.limit.toExponential(1)}). The walls are too thin for this method; use the thin-walled one.`)
+  const failed = failedCheck(fine.checks)
+  if (failed) return failed
   return {
     ok: true, J: estimateOf(solutions, one => one.J), shear, shearCentre: fine.shearCentre,
     shearCentreMoved: Math.hypot(fine.shearCentre.x - middle.shearCentre.x, fine.shearCentre.y - middle.shearCentre.y),
