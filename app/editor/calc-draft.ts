@@ -1,9 +1,12 @@
 import { closeHistory } from '@tiptap/pm/history'
 import { computed, inject, provide, shallowRef, watch, type ComputedRef, type InjectionKey, type ShallowRef } from 'vue'
-import { evaluateCalculation } from '#shared/calc/registry'
+import { evaluateNote } from '#shared/calc/evaluate-note'
+import type { NoteCalc } from '#shared/calc/note-links'
+import { calcKind, isCalcKind } from '#shared/calc/registry'
 import type { Evaluation, Fault } from '#shared/calc/types'
 import type { Mount } from '~/editor/mounts'
 import { getIn, setIn } from '~/editor/path'
+import { useNoteDocumentStore } from '~/stores/note-document'
 import { useResultsStore } from '~/stores/results'
 
 /**
@@ -31,17 +34,24 @@ const key: InjectionKey<CalcDraft> = Symbol('calculation draft')
 
 export function provideCalcDraft(mount: Mount, editable: ComputedRef<boolean>): CalcDraft {
   const results = useResultsStore()
+  const note = useNoteDocumentStore()
   const node = mount.node
   const calcId = String(node.value.attrs.id)
   const inputs = shallowRef<unknown>(node.value.attrs.inputs)
   const faulty = shallowRef<Evaluation | null>(null)
   let scheduled = 0
 
+  /** This calculation and whatever depends on it; one that takes longer than a keystroke waits for the server. */
   function preview() {
     scheduled = 0
-    const evaluation = evaluateCalculation({ kind: String(node.value.attrs.kind), kindVersion: Number(node.value.attrs.kindVersion), inputs: inputs.value })
-    faulty.value = evaluation
-    results.setPreview(calcId, evaluation)
+    const kind = String(node.value.attrs.kind)
+    if (isCalcKind(kind) && calcKind(kind).heavy) return
+    const before = { byId: new Map(note.calculations.map(each => [each.id, each])), results: results.all(), sameInputs: (each: NoteCalc) => each.id !== calcId }
+    const now = note.calculations.map(each => (each.id === calcId ? { ...each, inputs: inputs.value } : each))
+    for (const [id, evaluation] of Object.entries(evaluateNote(now, before).results)) {
+      if (id === calcId) faulty.value = evaluation
+      if (id === calcId || evaluation !== before.results[id]) results.setPreview(id, evaluation)
+    }
   }
   // Several keys within one frame are one evaluation.
   function previewSoon() {

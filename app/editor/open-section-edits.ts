@@ -55,6 +55,9 @@ export function endBy(by: string, end: WallEndInput, unit: UnitId): WallEndInput
   return { by: 'length', length: 'length' in end ? end.length : empty(unit), direction }
 }
 
+/** Stands until a table is chosen; it names nothing, so the fault of the field says what to do. */
+const NO_TABLE = '00000000-0000-0000-0000-000000000000'
+
 interface Head { id: string, title: string, source: string, level: 'limit' | 'ultimate', temperature: TypedQuantity | null }
 const headOf = ({ id, title, source, level, temperature }: Head): Head => ({ id, title, source, level, temperature })
 
@@ -71,6 +74,7 @@ export function loadingBy(by: string, inputs: OpenSectionInputs): LoadingInput {
     const first = now.by === 'cases' ? now.cases[0] : undefined
     return { by: 'torque', torque: first?.torque ?? empty(torqueUnit(inputs)), level: first?.level ?? 'limit', temperature: first?.temperature ?? null, source: first?.source ?? '' }
   }
+  if (by === 'table') return { by: 'table', table: NO_TABLE, quantity: 'T' }
   const heads = headsOf(now)
   if (by === 'cases') return { by: 'cases', cases: heads.map(head => ({ ...head, torque: now.by === 'torque' ? now.torque : empty(torqueUnit(inputs)) })) }
   return { by: 'rate', cases: heads.map(head => ({ ...head, rate: empty(rateUnit(inputs)) })) }

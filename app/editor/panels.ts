@@ -10,6 +10,7 @@ export type Panel
   = | { kind: 'equation', pos: number | null, inline: boolean }
     | { kind: 'figure', pos: number | null }
     | { kind: 'tie', from: number, to: number, text: string }
+    | { kind: 'calculation' }
     | { kind: 'link' }
 
 interface Open { panel: Panel, at: number }

@@ -1,5 +1,4 @@
 import type { Editor } from '@tiptap/core'
-import { blankOpenSection } from '#shared/calc/kinds/open-section/blank'
 import { calcKind } from '#shared/calc/registry'
 import { panelPlace, showPanel, type Panel } from '~/editor/panels'
 import { insertBlock, run, setBlock } from '~/editor/verbs'
@@ -40,23 +39,19 @@ export function openTie(editor: Editor) {
 }
 
 /** @returns the id of the new calculation */
-export function insertCalculation(editor: Editor, newId: () => string): string | null {
+export function insertCalculation(editor: Editor, name: string, newId: () => string): string | null {
   const type = editor.schema.nodes.calculation
   if (!type) return null
-  const kind = calcKind('open-section')
+  const kind = calcKind(name)
   const id = newId()
-  const inputs = JSON.parse(JSON.stringify(blankOpenSection())) as Record<string, unknown>
+  const inputs = JSON.parse(JSON.stringify(kind.blank())) as Record<string, unknown>
   const node = type.create({ id, kind: kind.kind, kindVersion: kind.version, title: '', inputs })
   run(editor, state => insertBlock(state, node, newId))
   return id
 }
 
 /** The verbs of the toolbar in their groups. */
-export function toolbarVerbs(newId: () => string, opened: (calcId: string) => void): { label: string, verbs: Verb[] }[] {
-  const addCalculation = (editor: Editor) => {
-    const id = insertCalculation(editor, newId)
-    if (id) opened(id)
-  }
+export function toolbarVerbs(): { label: string, verbs: Verb[] }[] {
   return [
     { label: 'Blocks', verbs: [
       block('paragraph', 'Text', 'paragraph'), block('h1', 'Heading 1', 'heading', { level: 1 }), block('h2', 'Heading 2', 'heading', { level: 2 }), block('h3', 'Heading 3', 'heading', { level: 3 }),
@@ -73,7 +68,7 @@ export function toolbarVerbs(newId: () => string, opened: (calcId: string) => vo
       { id: 'equation', words: 'Equation', label: 'Insert equation', run: editor => open(editor, { kind: 'equation', pos: null, inline: false }) },
       { id: 'symbol', words: 'Symbol', label: 'Symbol: insert an equation in the line', run: editor => open(editor, { kind: 'equation', pos: null, inline: true }) },
       { id: 'figure', words: 'Figure', label: 'Insert figure', run: editor => open(editor, { kind: 'figure', pos: null }) },
-      { id: 'calculation', words: 'Calculation', label: 'Insert calculation', run: addCalculation },
+      { id: 'calculation', words: 'Calculation', label: 'Insert calculation', run: editor => open(editor, { kind: 'calculation' }) },
       { id: 'tied', words: 'Tied value', label: 'Insert tied value', keys: 'Ctrl Shift E', run: openTie },
     ] },
     { label: 'History', verbs: [

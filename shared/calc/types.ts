@@ -3,6 +3,7 @@
  * the server read the same object, and nothing in it depends on a locale.
  * Engine values are in N, mm, MPa, rad, K-free °C; `unit` says how to show them.
  */
+import type { ZodType } from 'zod'
 import type { LinkSource, Links } from '#shared/calc/links'
 import type { Dimension, UnitId } from '#shared/units/units'
 
@@ -211,13 +212,17 @@ export interface CalcKind<Inputs> {
   version: number
   /** `Open section` */
   title: string
+  /** What it is for, in one sentence; shown where a kind is chosen. */
+  about: string
+  /** Takes longer than a keystroke may: the browser leaves it to the server. */
+  heavy?: true
   /** A record of the note (a material, a table of load cases) and no calculation. */
   record?: true
   /** Reads the results of all other calculations, so that it is computed after them. */
   gathers?: true
   methodRevision: string
   /** zod schema of the stored inputs */
-  schema: { safeParse: (value: unknown) => unknown }
+  schema: ZodType
   /** Inputs of a fresh calculation: valid JSON, sensible units, fields empty. */
   blank: () => Inputs
   /** Pure; never throws on bad inputs, never returns NaN or Infinity. */

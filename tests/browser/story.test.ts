@@ -115,6 +115,7 @@ describe.sequential('from an empty register to a released PDF', () => {
 
     await section(page, 'Section analysis').locator('p').first().click()
     await page.getByRole('toolbar', { name: 'Writing' }).getByRole('button', { name: 'Insert calculation' }).click()
+    await page.getByRole('group', { name: 'Insert calculation' }).getByRole('button', { name: /^Open section/ }).click()
     await page.getByLabel('Title of calculation C1').fill('Lug strip')
     await page.getByLabel('Title of calculation C1').press('Enter')
     await field(page, 'Length of wall a', '60')

@@ -27,13 +27,17 @@ export const linkSource = z.strictObject({ calculation: z.uuid(), key: z.string(
 /** A number as typed, with its unit; linked, the unit is the one it is shown in and the text is what was typed before. */
 export const typedQuantity = z.strictObject({ text: z.string().max(40), unit: unitId, from: linkSource.optional() })
 
+/** Only units of the dimension are taken, so that a published schema says which. */
+const ofDimension = (dimension: Dimension) =>
+  typedQuantity.extend({ unit: z.enum(unitsOf(dimension) as [UnitId, ...UnitId[]], { error: 'Choose one of the listed units.' }) })
+
 /** A typed quantity of one dimension, with what the form says of it. */
 export const quantity = (title: string, dimension: Dimension, more: Omit<FieldMeta, 'title' | 'dimension'> = {}) =>
-  typedQuantity.meta({ title, dimension, ...more })
+  ofDimension(dimension).meta({ title, dimension, ...more })
 
 /** The same, where the field may be left out. */
 export const optionalQuantity = (title: string, dimension: Dimension, more: Omit<FieldMeta, 'title' | 'dimension'> = {}) =>
-  typedQuantity.nullable().meta({ title, dimension, ...more })
+  ofDimension(dimension).nullable().meta({ title, dimension, ...more })
 
 /** A choice among words. */
 export const choice = <const Words extends readonly [string, ...string[]]>(title: string, words: Words, description?: string) =>

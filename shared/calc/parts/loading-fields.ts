@@ -18,7 +18,7 @@ export const loading = z.discriminatedUnion('by', [
   z.strictObject({ by: z.literal('cases'), cases: z.array(z.strictObject({ ...caseHead, torque })).max(MAX_CASES) }),
   z.strictObject({ by: z.literal('rate'), cases: z.array(z.strictObject({ ...caseHead, rate })).max(MAX_CASES) }),
   z.strictObject({ by: z.literal('table'), table: z.uuid(), quantity: z.string().min(1).max(40) }),
-])
+]).meta({ title: 'Loading', part: 'loading' })
 
 export const factors = z.strictObject({
   /** Factor of safety from limit to ultimate. */
@@ -33,7 +33,7 @@ export const factors = z.strictObject({
   /** The basis works with partial factors; `reason` then carries its paragraph. */
   partial: declared('The basis works with partial factors'),
   reason: paragraph,
-})
+}).meta({ title: 'Factors', part: 'factors' })
 
 export type LoadingInput = z.infer<typeof loading>
 export type FactorsInput = z.infer<typeof factors>

@@ -35,5 +35,5 @@ export const materialRecord = z.strictObject({
 /** As a calculation holds it: typed here, or taken whole from a record of the note (what was typed before is then not read). */
 const material = materialRecord.extend({ record: z.uuid().optional() })
 
-export const materials = z.array(material).max(MAX_MATERIALS)
+export const materials = z.array(material).max(MAX_MATERIALS).meta({ title: 'Materials', part: 'materials' })
 export type MaterialInput = z.infer<typeof material>

@@ -26,8 +26,8 @@ const wall = z.strictObject({
 const junction = z.strictObject({ node: identifier, radius: quantity('Inside radius', 'length', { symbol: 'r' }), make: choice('Make', ['machined', 'bent']) })
 
 export const start = z.strictObject({ x, y })
-export const walls = z.array(wall).max(MAX_WALLS)
-export const junctions = z.array(junction).max(MAX_WALLS)
+export const walls = z.array(wall).max(MAX_WALLS).meta({ title: 'Walls', part: 'walls' })
+export const junctions = z.array(junction).max(MAX_WALLS).meta({ title: 'Corners', part: 'junctions' })
 
 export type WallInput = z.infer<typeof wall>
 export type WallEndInput = WallInput['end']

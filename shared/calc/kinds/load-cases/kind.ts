@@ -8,6 +8,7 @@ export const loadCases: CalcKind<LoadCasesInputs> = {
   kind: 'load-cases',
   version: 1,
   title: 'Load cases',
+  about: 'A table of cases with their torques and forces, typed, pasted or read from a CSV file.',
   record: true,
   methodRevision: METHOD_REVISION,
   schema: loadCasesSchema,

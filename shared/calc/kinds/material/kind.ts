@@ -10,6 +10,7 @@ export const material: CalcKind<z.infer<typeof materialRecord>> = {
   kind: 'material',
   version: 1,
   title: 'Material',
+  about: 'Properties and strengths with their basis and source.',
   record: true,
   methodRevision: METHOD_REVISION,
   schema: materialRecord,

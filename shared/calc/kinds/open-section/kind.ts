@@ -9,6 +9,7 @@ export const openSection: CalcKind<OpenSectionInputs> = {
   kind: 'open-section',
   version: 1,
   title: 'Open section',
+  about: 'Torsion of straight and arc walls with branches and corners: stiffness, twist, stresses and margins per wall.',
   methodRevision: METHOD_REVISION,
   schema: openSectionSchema,
   blank: () => blankOpenSection(),
