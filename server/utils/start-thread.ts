@@ -1,5 +1,6 @@
 import { existsSync } from 'node:fs'
 import { basename, dirname, join, resolve } from 'node:path'
+import { pathToFileURL } from 'node:url'
 import { Worker } from 'node:worker_threads'
 
 /** Bundles of a build stand at its root; the server itself stands one folder deeper. */
@@ -16,5 +17,7 @@ function bundleOf(source: string): string | undefined {
 export function startThread(source: string, workerData?: unknown): Worker {
   const bundle = bundleOf(source)
   if (bundle) return new Worker(bundle, { workerData })
-  return new Worker(resolve('server', `${source}.ts`), { workerData, execArgv: ['--import', 'tsx'] })
+  // A thread does not take the loader of TypeScript from its command line: it registers it itself.
+  const file = pathToFileURL(resolve('server', `${source}.ts`)).href
+  return new Worker(`import('tsx/esm/api').then(({ register }) => { register(); return import(${JSON.stringify(file)}) })`, { workerData, eval: true })
 }
