@@ -15,7 +15,8 @@ const lastCheck: readonly (readonly [number, string])[] = [
 ]
 
 /** `1.9`; `P` for a row that an independent program gave for a whole section or case. */
-export function sectionOf({ id }: Pick<ReferenceRow, 'id'>): string {
+export function sectionOf({ id, section }: Pick<ReferenceRow, 'id' | 'section'>): string {
+  if (section !== undefined) return section
   const named = /^§(\d+(?:\.\d+)?)/.exec(id)
   if (named?.[1]) return named[1]
   const check = /^C-(\d+)/.exec(id)

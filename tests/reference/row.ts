@@ -15,6 +15,8 @@ export interface ReferenceRow {
   readonly tolerance: Tolerance
   readonly source: string
   readonly actual: (engine: Engine) => number
+  /** Section of the method that computes it, where the id does not say it: `4.1` for an outline that checks C-44. */
+  readonly section?: string
 }
 
 /** How far a value is from the expected one, in tolerances: up to 1 it agrees. */
@@ -26,3 +28,6 @@ export function deviation({ expected, tolerance }: ReferenceRow, value: number):
 /** A row in one line. */
 export const row = (id: string, quantity: string, inputs: string, expected: number, unit: string, tolerance: Tolerance, source: string, actual: (engine: Engine) => number): ReferenceRow =>
   ({ id, quantity, inputs, expected, unit, tolerance, source, actual })
+
+/** The same rows, filed under the section of the method that computes them. */
+export const provenBy = (section: string, rows: readonly ReferenceRow[]): ReferenceRow[] => rows.map(one => ({ ...one, section }))

@@ -1,9 +1,10 @@
 /** All reference rows the engine is held to. */
 import type { ReferenceRow } from './row'
+import { provenBy } from './row'
 import { outlineRows } from './outline-rows'
 import { programRows } from './program-rows'
 import { sectorialRows } from './sectorial-rows'
 import { torsionRows } from './torsion-rows'
 import { unitRows } from './unit-rows'
 
-export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...sectorialRows, ...programRows, ...unitRows, ...outlineRows]
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
