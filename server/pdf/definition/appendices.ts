@@ -22,7 +22,7 @@ export function appendices(context: NoteContext): Content[] {
     ...(calculations.length === 0 ? [none('This note has no calculations.')] : calculations.flatMap(one => working(one, resultOf(data, one.id)))),
     head('A.2', 'Inputs as typed'),
     ...(calculations.length === 0 ? [none('This note has no calculations.')] : calculations.flatMap(one => [
-      { text: [{ text: `${one.label}  `, color: INK3, bold: false }, one.title], bold: true, fontSize: 11, margin: [0, 8, 0, 0] } as Content, inputListing(one),
+      { text: [{ text: `${one.label}  `, color: INK3, bold: false }, one.title], bold: true, fontSize: 11, margin: [0, 8, 0, 0] } as Content, inputListing(one, context),
     ])),
     head('A.3', 'Check sheet'), checkSheet(context),
     head('A.4', 'Deviations'), deviations(context),

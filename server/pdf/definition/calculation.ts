@@ -5,6 +5,7 @@ import type { CalcResult, MarginRow, Output } from '#shared/calc/types'
 import type { NoteCalculation } from '#shared/note/calculations'
 import { showMargin, showQuantity, showValue } from '#shared/units/display'
 import { calculationAnchor, workingAnchor } from '#server/pdf/definition/anchors'
+import { extras } from '#server/pdf/definition/calculation-extras'
 import { caseTable, wallTable } from '#server/pdf/definition/calculation-results'
 import { HAIR, INK2, INK3, STOP } from '#server/pdf/definition/colours'
 import { guardList } from '#server/pdf/definition/guards'
@@ -28,11 +29,12 @@ export function calculationContent(id: string, context: NoteContext): Content {
   return {
     stack: [
       { stack: [...head, overview(result)], unbreakable: true },
-      inputSummary(calculation, result),
+      inputSummary(calculation, result, context),
       ...guardList(calculation, result, context),
       wallTable(result),
       caseTable(result),
-      { text: ['Its working stands in appendix A.1, on page ', { pageReference: workingAnchor(id) } as unknown as string], fontSize: 9, color: INK2 },
+      ...extras(result),
+      ...(result.working.length > 0 ? [{ text: ['Its working stands in appendix A.1, on page ', { pageReference: workingAnchor(id) } as unknown as string], fontSize: 9, color: INK2 }] : []),
     ],
     margin: [0, 10, 0, 14],
   }

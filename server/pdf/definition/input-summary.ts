@@ -1,18 +1,22 @@
 import type { Content } from 'pdfmake/interfaces'
 import { openSectionSchema, type OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import { formFields, type FormField } from '#shared/calc/form/form-fields'
+import { calcKind, isCalcKind } from '#shared/calc/registry'
 import type { CalcResult, TypedQuantity } from '#shared/calc/types'
 import type { NoteCalculation } from '#shared/note/calculations'
 import { withUnit } from '#shared/units/display'
 import { HAIR, INK3 } from '#server/pdf/definition/colours'
+import { inLine, isEntries } from '#server/pdf/definition/input-listing'
+import type { NoteContext } from '#server/pdf/definition/note-context'
 import { TABLE_TEXT } from '#server/pdf/definition/tables'
 
 type Fact = [label: string, value: string]
 const typed = (quantity: TypedQuantity | null) => quantity === null || quantity.text === '' ? 'not given' : withUnit(quantity.text, quantity.unit)
 
 /** What the results beside it rest on, in a few lines; everything typed stands in the appendix. */
-export function inputSummary(calculation: NoteCalculation, result: CalcResult): Content {
+export function inputSummary(calculation: NoteCalculation, result: CalcResult, context: NoteContext): Content {
   const parsed = calculation.kind === 'open-section' ? openSectionSchema.safeParse(calculation.inputs) : null
-  const facts = parsed?.success ? openSectionFacts(parsed.data) : []
+  const facts = parsed?.success ? openSectionFacts(parsed.data) : [['Inputs', factsOfForm(calculation, context)] satisfies Fact]
   return {
     table: {
       widths: [70, '*'],
@@ -24,6 +28,20 @@ export function inputSummary(calculation: NoteCalculation, result: CalcResult): 
     },
     margin: [0, 2, 0, 6], ...TABLE_TEXT,
   }
+}
+
+/** Single values of any kind under the labels of its form; of a list how many it holds. */
+function factsOfForm({ kind, inputs }: NoteCalculation, context: NoteContext): string {
+  if (!isCalcKind(kind)) return 'as listed in the appendix'
+  const facts = (fields: readonly FormField[], at: Record<string, unknown>): string[] => fields.flatMap((field): string[] => {
+    const value = at[field.path]
+    if (field.type === 'quantity') return value === null || value === undefined ? [] : [`${field.title} ${inLine(value, context)}`]
+    if (field.type === 'choice') return [`${field.title} ${String(value)}`]
+    if (field.type === 'list') return Array.isArray(value) && value.length > 0 ? [`${value.length} ${field.title.toLowerCase()}`] : []
+    if (field.type === 'ways') return isEntries(value) ? facts(field.ways.find(way => way.value === value.by)?.fields ?? [], value) : []
+    return field.type === 'group' && field.part === undefined && isEntries(value) ? facts(field.fields, value) : []
+  })
+  return facts(formFields(calcKind(kind).schema), inputs).join('; ')
 }
 
 function openSectionFacts(inputs: OpenSectionInputs): Fact[] {
