@@ -9,7 +9,9 @@ import type { ValidationCase } from '#shared/schemas/validation'
 
 const { values } = parseArgs({ options: { json: { type: 'boolean', default: false }, failed: { type: 'boolean', default: false } } })
 const engine = await loadEngine()
-const found = report('done', referenceRows.map(row => judgeRow(row, engine)), referenceRows.length, null)
+const found = report({
+  state: 'done', rows: referenceRows.map(row => judgeRow(row, engine)), cases: referenceRows.length, reason: null, finishedAt: new Date().toISOString(),
+})
 
 const tolerated = ({ kind, value }: ValidationCase['tolerance']) => `${value.toExponential(0)} ${kind === 'rel' ? 'relative' : 'absolute'}`
 const lines = ({ agrees, id, quantity, inputs, unit, expected, got, difference, tolerance, source, reason }: ValidationCase) => [
@@ -18,7 +20,7 @@ const lines = ({ agrees, id, quantity, inputs, unit, expected, got, difference, 
   `          source: ${source}`, ...(reason === null ? [] : [`          ${reason}`]),
 ]
 const text = () => [
-  `Torquill engine ${found.engine}, method revision ${found.methodRevision}`,
+  `Torquill engine ${found.engine}, method revision ${found.methodRevision}`, `${found.runtime}, ${found.finishedAt}`,
   ...found.chapters.flatMap(({ chapter, title }) => [
     '', `${chapter}  ${title}`, ...found.rows.filter(row => row.chapter === chapter && !(values.failed && row.agrees)).flatMap(lines),
   ]),

@@ -10,16 +10,21 @@ function bySection(a: ValidationCase, b: ValidationCase): number {
   return chapter || section || 0
 }
 
-export function summarise(state: ValidationSummary['state'], rows: readonly ValidationCase[], cases: number, reason: string | null): ValidationSummary {
-  return { state, engine: ENGINE_VERSION, methodRevision: METHOD_REVISION, judged: rows.length, cases, failed: rows.filter(row => !row.agrees).length, reason }
+/** How far a run is: what was judged of how many cases, and how it ended. */
+export interface RunState { state: ValidationSummary['state'], rows: readonly ValidationCase[], cases: number, reason: string | null, finishedAt: string | null }
+
+const runtime = `Node.js ${process.versions.node} (V8 ${process.versions.v8}), ${process.platform} ${process.arch}`
+
+export function summarise({ state, rows, cases, reason, finishedAt }: RunState): ValidationSummary {
+  return { state, engine: ENGINE_VERSION, methodRevision: METHOD_REVISION, judged: rows.length, cases, failed: rows.filter(row => !row.agrees).length, reason, finishedAt, runtime }
 }
 
 /** The cases in the order of the methods reference, counted by chapter. */
-export function report(state: ValidationSummary['state'], judged: readonly ValidationCase[], cases: number, reason: string | null): ValidationReport {
-  const rows = [...judged].sort(bySection)
+export function report(run: RunState): ValidationReport {
+  const rows = [...run.rows].sort(bySection)
   const present = [...new Set(rows.map(row => row.chapter))]
   return {
-    ...summarise(state, rows, cases, reason), rows,
+    ...summarise(run), rows,
     chapters: present.map((chapter) => {
       const own = rows.filter(row => row.chapter === chapter)
       return { chapter, title: chapters[chapter] ?? chapter, cases: own.length, failed: own.filter(row => !row.agrees).length }

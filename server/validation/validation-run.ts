@@ -1,9 +1,10 @@
 import { referenceRows } from '#reference/rows'
 import type { ValidationCase, ValidationReport, ValidationSummary } from '#shared/schemas/validation'
+import { serverClock } from '#server/utils/clock'
 import { startThread } from '#server/utils/start-thread'
-import { report, summarise } from './report'
+import { report, summarise, type RunState } from './report'
 
-interface Run { state: ValidationSummary['state'], rows: ValidationCase[], reason: string | null }
+interface Run extends RunState { rows: ValidationCase[] }
 
 // One run for each process: the engine cannot change while it runs.
 let run: Run | undefined
@@ -16,10 +17,10 @@ function tell({ state, rows, reason }: Run): void {
 }
 
 function begin(): Run {
-  const begun: Run = { state: 'running', rows: [], reason: null }
+  const begun: Run = { state: 'running', rows: [], cases: referenceRows.length, reason: null, finishedAt: null }
   const end = (state: Run['state'], reason: string | null) => {
     if (begun.state !== 'running') return
-    Object.assign(begun, { state, reason })
+    Object.assign(begun, { state, reason, finishedAt: serverClock().toISOString() })
     tell(begun)
   }
   const thread = startThread('validation/validation-thread')
@@ -35,13 +36,7 @@ function begin(): Run {
 export const startValidation = (): void => void (run ??= begin())
 
 /** What the running engine has been held against so far, counted. */
-export function validationSummary(): ValidationSummary {
-  const { state, rows, reason } = run ??= begin()
-  return summarise(state, rows, referenceRows.length, reason)
-}
+export const validationSummary = (): ValidationSummary => summarise(run ??= begin())
 
 /** The same with every case. */
-export function validationReport(): ValidationReport {
-  const { state, rows, reason } = run ??= begin()
-  return report(state, rows, referenceRows.length, reason)
-}
+export const validationReport = (): ValidationReport => report(run ??= begin())

@@ -33,6 +33,10 @@ export interface ValidationSummary {
   cases: number
   failed: number
   reason: string | null
+  /** ISO time of the last case, null while it runs. */
+  finishedAt: string | null
+  /** What the engine ran on: a validation speaks of that too. */
+  runtime: string
 }
 
 export interface ValidationReport extends ValidationSummary {

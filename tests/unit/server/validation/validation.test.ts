@@ -30,7 +30,10 @@ describe('one reference case', () => {
 
 describe('the report', () => {
   it('stands in the order of the methods and counts what fails', () => {
-    const { rows, chapters, ...summary } = report('done', [made(1, rel(1), 1, 'hat'), made(1, rel(1), 1, '§10'), made(3, rel(1e-3), 1, '§2.1'), made(1, rel(1), 1, '§1.10'), made(1, rel(1), 1, '§1.9')], 5, null)
+    const { rows, chapters, ...summary } = report({
+      state: 'done', cases: 5, reason: null, finishedAt: '2026-10-12T09:00:00Z',
+      rows: [made(1, rel(1), 1, 'hat'), made(1, rel(1), 1, '§10'), made(3, rel(1e-3), 1, '§2.1'), made(1, rel(1), 1, '§1.10'), made(1, rel(1), 1, '§1.9')],
+    })
     expect(rows.map(one => one.section)).toEqual(['1.9', '1.10', '2.1', '10', 'P'])
     expect(summary).toMatchObject({ state: 'done', cases: 5, judged: 5, failed: 1 })
     expect(chapters.map(({ chapter, cases, failed }) => [chapter, cases, failed])).toEqual([['1', 2, 0], ['2', 1, 1], ['10', 1, 0], ['P', 1, 0]])
