@@ -43,13 +43,13 @@ function upperRows(a: Float64Array, n: number, from: number, to: number): void {
   }
 }
 
-/** What remains below and to the right: A −= L·U, two rows by four eliminated columns at a time. Rows and columns left over go one by one. */
+/** What remains below and to the right: A −= L·U, four rows by four eliminated columns at a time. Rows left over go one by one. */
 function updateRest(a: Float64Array, n: number, from: number, to: number): void {
-  const paired = to + 2 * Math.floor((n - to) / 2)
-  for (let i = to; i < paired; i += 2) {
-    for (let k = from; k < to; k += 4) updatePair(a, n, i, k, to)
+  const whole = to + 4 * Math.floor((n - to) / 4)
+  for (let i = to; i < whole; i += 4) {
+    for (let k = from; k < to; k += 4) updateFour(a, n, i, k, to)
   }
-  for (let i = paired; i < n; i += 1) {
+  for (let i = whole; i < n; i += 1) {
     for (let k = from; k < to; k += 1) {
       const factor = a[i * n + k] as number
       for (let j = to, p = i * n + to, q = k * n + to; j < n; j += 1, p += 1, q += 1) a[p] = (a[p] as number) - factor * (a[q] as number)
@@ -57,35 +57,53 @@ function updateRest(a: Float64Array, n: number, from: number, to: number): void 
   }
 }
 
-function updatePair(a: Float64Array, n: number, i: number, k: number, to: number): void {
-  let [p, q] = [i * n + k, i * n + n + k]
+/** Four rows from i, four eliminated columns from k: sixteen factors are read once while the columns to the right run by. */
+function updateFour(a: Float64Array, n: number, i: number, k: number, to: number): void {
+  let p = i * n + k
   const a0 = a[p] as number
   const a1 = a[p + 1] as number
   const a2 = a[p + 2] as number
   const a3 = a[p + 3] as number
-  const b0 = a[q] as number
-  const b1 = a[q + 1] as number
-  const b2 = a[q + 2] as number
-  const b3 = a[q + 3] as number
+  p += n
+  const b0 = a[p] as number
+  const b1 = a[p + 1] as number
+  const b2 = a[p + 2] as number
+  const b3 = a[p + 3] as number
+  p += n
+  const c0 = a[p] as number
+  const c1 = a[p + 1] as number
+  const c2 = a[p + 2] as number
+  const c3 = a[p + 3] as number
+  p += n
+  const d0 = a[p] as number
+  const d1 = a[p + 1] as number
+  const d2 = a[p + 2] as number
+  const d3 = a[p + 3] as number
   let u0 = k * n + to
   let u1 = u0 + n
   let u2 = u1 + n
   let u3 = u2 + n
-  p = i * n + to
-  q = p + n
+  let r0 = i * n + to
+  let r1 = r0 + n
+  let r2 = r1 + n
+  let r3 = r2 + n
   for (let j = to; j < n; j += 1) {
     const x0 = a[u0] as number
     const x1 = a[u1] as number
     const x2 = a[u2] as number
     const x3 = a[u3] as number
-    a[p] = (a[p] as number) - a0 * x0 - a1 * x1 - a2 * x2 - a3 * x3
-    a[q] = (a[q] as number) - b0 * x0 - b1 * x1 - b2 * x2 - b3 * x3
-    p += 1
-    q += 1
+    a[r0] = (a[r0] as number) - a0 * x0 - a1 * x1 - a2 * x2 - a3 * x3
+    a[r1] = (a[r1] as number) - b0 * x0 - b1 * x1 - b2 * x2 - b3 * x3
+    a[r2] = (a[r2] as number) - c0 * x0 - c1 * x1 - c2 * x2 - c3 * x3
+    a[r3] = (a[r3] as number) - d0 * x0 - d1 * x1 - d2 * x2 - d3 * x3
     u0 += 1
     u1 += 1
     u2 += 1
     u3 += 1
+    r0 += 1
+    r1 += 1
+    r2 += 1
+    r3 += 1
   }
 }
 

@@ -66,7 +66,8 @@ function fociOf({ corners, edges, size }: SoundOutline): Focus[] {
 function panelLength(at: PlanePoint, foci: readonly Focus[], most: number): number {
   let least = most
   for (const { at: focus, reach, floor } of foci) {
-    const distance = Math.hypot(at.x - focus.x, at.y - focus.y, floor)
+    const [dx, dy] = [at.x - focus.x, at.y - focus.y]
+    const distance = Math.sqrt(dx * dx + dy * dy + floor * floor)
     if (distance >= least) continue
     const length = distance < reach ? reach ** (1 - cornerPower) * distance ** cornerPower : distance
     least = Math.min(least, length)
