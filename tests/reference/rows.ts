@@ -4,7 +4,8 @@ import { provenBy } from './row'
 import { outlineRows } from './outline-rows'
 import { programRows } from './program-rows'
 import { sectorialRows } from './sectorial-rows'
+import { solidRows } from './solid-rows'
 import { torsionRows } from './torsion-rows'
 import { unitRows } from './unit-rows'
 
-export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
