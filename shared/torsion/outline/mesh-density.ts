@@ -22,6 +22,9 @@ const cornerPower = 2 / 3
 const arcStep = Math.PI / 8
 /** Of the size: nearer than sound edges come to each other. */
 const touchingWithin = 1e-6
+/** Nearer to an end of its edge than this part of it, a place is that end: whether a foot falls before or behind a tangent vertex is decided by the last bit. */
+const insideBy = 1e-6
+const isInside = (part: number): boolean => part > insideBy && part < 1 - insideBy
 /** Samples along an edge. */
 const samples = 96
 
@@ -50,7 +53,7 @@ function narrowPlaces(edges: readonly OutlineEdge[], touching: number): Focus[] 
     const bend = Math.abs(curvature(p) + curvature(q))
     const [pBox, qBox] = [boxes[index], boxes[index + 1 + next]]
     if (bend === 0 || !pBox || !qBox || boxDistance(pBox, qBox) > 2 / bend) return []
-    return nearPairs(p, q).filter(pair => pair.p > 0 && pair.p < 1 && pair.q > 0 && pair.q < 1 && pair.distance > touching && pair.distance * bend < 0.5).flatMap((pair): Focus[] => {
+    return nearPairs(p, q).filter(pair => isInside(pair.p) && isInside(pair.q) && pair.distance > touching && pair.distance * bend < 0.5).flatMap((pair): Focus[] => {
       const floor = Math.sqrt(2 * pair.distance / bend)
       return [edgePoint(p, pair.p), edgePoint(q, pair.q)].map(at => ({ at, reach: 0, floor: floor / 4 }))
     })
