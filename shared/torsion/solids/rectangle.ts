@@ -18,7 +18,7 @@ function oddSeries(term: (p: number, i: number) => number): number {
 }
 
 /** Σ of p⁻⁵ over odd p: 31/32 · ζ(5). */
-const FIFTH_POWERS = 31 / 32 * 1.03692775514336992633
+const FIFTH_POWERS = 31 / 32 * 1.03692775514337
 
 /** β of J = β a b³, n = a/b ≥ 1. The slow part of the series is a constant, the rest dies at once. */
 export function rectangleBeta(n: number): number {
@@ -36,7 +36,7 @@ export function rectangleLongSide(n: number): number {
 }
 
 /** Σ of (−1)^i/p² over odd p: Catalan's constant. */
-const CATALAN = 0.915965594177219015
+const CATALAN = 0.915965594177219
 
 /** P of τ = Gθ′ b P at the middle of the short sides: the slow part of the series is Catalan's constant, the rest dies at once. */
 export function rectangleShortSide(n: number): number {

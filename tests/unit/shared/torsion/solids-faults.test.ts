@@ -1,6 +1,5 @@
 /** A 1 % fault in any constant or formula of the solids is seen by their reference rows. */
-import type { Mutation } from '../../../factories/engine-faults'
-import { coefficient, describeFaults, fault, result, scaled, type Exports } from '../../../factories/engine-faults'
+import { coefficient, describeFaults, fault, result, scaled, type Exports, type Mutation } from '../../../factories/engine-faults'
 import { solidRows } from '../../../reference/solid-rows'
 
 const at = (name: string): string => `torsion/solids/${name}`
