@@ -62,5 +62,7 @@ export function factorAction(given: number, level: 'limit' | 'ultimate', factors
   const atLimit = specialAtLimit ? special : 1
   const ultimateFactor = level === 'limit' ? safety * special : special
   const limitFactor = level === 'limit' ? atLimit : limitConfirmed ? atLimit / safety : null
-  return { ok: true, limit: limitFactor === null ? null : given * limitFactor, ultimate: given * ultimateFactor, limitFactor, ultimateFactor }
+  const [limit, ultimate] = [limitFactor === null ? null : given * limitFactor, given * ultimateFactor]
+  if (!Number.isFinite(ultimateFactor) || !Number.isFinite(ultimate) || !Number.isFinite(limit ?? 0)) return refusal('The load times its factors is too large to compute with. Check the load, its unit and the factors.')
+  return { ok: true, limit, ultimate, limitFactor, ultimateFactor }
 }
