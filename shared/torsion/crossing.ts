@@ -28,12 +28,13 @@ function lineWithLine(p: LinePath, q: LinePath, slack: number): Meeting {
   return high - low > -slack ? { points: [pathPoint(p, low / pl)], overlap: false } : apart
 }
 
-/** Whether a point on the circle lies within the sweep, ends included. */
+/** Whether a point on the circle lies within the sweep, ends included; with a negative slack, ends left out. */
 function onArc(arc: ArcPath, point: Point, slack: number): boolean {
   const sense = Math.sign(arc.sweep)
   const full = 2 * Math.PI
   const swept = ((sense * (directionOf(arc.centre, point) - arc.startAngle)) % full + full) % full
   const extra = slack / arc.radius
+  if (extra < 0) return swept >= -extra && swept <= Math.abs(arc.sweep) + extra
   return swept <= Math.abs(arc.sweep) + extra || swept >= full - extra
 }
 

@@ -16,13 +16,16 @@ export async function loadEngine() {
   const allowables = await import('#shared/torsion/allowables')
   const warping = await import('#shared/torsion/warping-length')
   const solids = await import('#shared/torsion/solids/torsion-of-solid')
+  const cells = await import('#shared/torsion/cells/torsion-of-cells')
+  const cellCorner = await import('#shared/torsion/cells/cell-corner')
+  const shear = await import('#shared/torsion/shear/shear-flow')
   const outlineSolver = await import('#shared/torsion/outline/outline-torsion')
   const outlineCheck = await import('#shared/torsion/outline/outline-check')
   const outlineConvergence = await import('#shared/torsion/outline/convergence')
   const outlineAgreement = await import('#shared/torsion/outline/agreement')
   const outlineVertices = await import('#shared/torsion/outline/reentrant')
   const outlineLimits = await import('#shared/torsion/outline/published')
-  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...solids, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
+  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...solids, ...cells, ...cellCorner, ...shear, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
 }
 
 export type Engine = Awaited<ReturnType<typeof loadEngine>>

@@ -1,6 +1,7 @@
 /** All reference rows the engine is held to. */
 import type { ReferenceRow } from './row'
 import { provenBy } from './row'
+import { cellRows } from './cell-rows'
 import { outlineRows } from './outline-rows'
 import { programRows } from './program-rows'
 import { sectorialRows } from './sectorial-rows'
@@ -8,4 +9,4 @@ import { solidRows } from './solid-rows'
 import { torsionRows } from './torsion-rows'
 import { unitRows } from './unit-rows'
 
-export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...cellRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
