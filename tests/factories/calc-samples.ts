@@ -2,6 +2,7 @@
  * Realistic inputs of every calculation kind, for what all kinds have to keep to: the contract test, the golden
  * results and the batch. A kind without samples here fails the contract test.
  */
+import { boredPlateInputs, keyedShaftInputs, sharpBracketInputs, thickAngleInputs } from './general-outline'
 import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, sheet2024, sheet6061, stripInputs } from './open-section'
 import { loadCasesInputs, materialInputs } from './records'
 
@@ -10,6 +11,7 @@ export type Samples = Record<string, () => unknown>
 
 export const calcSamples: Record<string, Samples> = {
   'open-section': { strip: stripInputs, hat: hatInputs, 'lipped channel': () => lippedChannelInputs(), angle: angleInputs, channel: channelInputs, 'bracket in inches': bracketInputs },
+  'general-outline': { 'thick angle': thickAngleInputs, 'sharp bracket': sharpBracketInputs, 'keyed shaft in inches': keyedShaftInputs, 'bored plate': boredPlateInputs },
   'material': { 'sheet': materialInputs, 'sheet with knock-down': sheet2024, 'another sheet': sheet6061 },
   'load-cases': { 'torques and forces': loadCasesInputs },
 }

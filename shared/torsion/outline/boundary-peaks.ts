@@ -1,7 +1,8 @@
 /**
  * Where the shear along the boundary is greatest. The greatest shear of a
- * section lies on its boundary (§4.1). Every edge gives its greatest value;
- * equal ones are told in the order of the outline.
+ * section lies on its boundary (§4.1). Every edge gives its greatest value,
+ * unless the shear goes on rising beyond the edge's end; equal ones are told
+ * in the order of the outline.
  */
 import type { PlanePoint } from '#shared/torsion/outline/outline'
 import type { Panel, PanelMesh } from '#shared/torsion/outline/panels'
@@ -19,7 +20,8 @@ const equalWithin = 1e-5
 /** Maxima closer than this part of the section are one place. */
 const onePlace = 1e-3
 
-interface Best { tau: number, at: PlanePoint }
+/** `u`: place on its panel, −1…1. */
+interface Best { tau: number, at: PlanePoint, u: number }
 
 /** Offset −½…½ of the top of a parabola through three values one step apart, and its height. */
 function parabolaTop(before: number, top: number, after: number): { offset: number, height: number } {
@@ -48,24 +50,43 @@ function panelBest(panel: Panel, tau: Float64Array, order: number, discs: readon
   const here = values[top] as number
   const inside = top > 0 && top < places.length - 1
   const { offset, height } = inside ? parabolaTop(values[top - 1] as number, here, values[top + 1] as number) : { offset: 0, height: here }
-  const refined = placeAt((places[top] as number) + offset * ((places[1] as number) - (places[0] as number)))
-  return outside(refined, discs) ? { tau: height, at: refined } : { tau: here, at: placeAt(places[top] as number) }
+  const u = (places[top] as number) + offset * ((places[1] as number) - (places[0] as number))
+  const refined = placeAt(u)
+  return outside(refined, discs) ? { tau: height, at: refined, u } : { tau: here, at: placeAt(places[top] as number), u: places[top] as number }
 }
 
-/** The greatest value of each edge outside the discs, the greatest first; neighbouring edges that share their greatest value count once. */
-export function boundaryPeaks(mesh: PanelMesh, tau: Float64Array, scale: number, size: number, discs: readonly Disc[] = []): BoundaryPeak[] {
+interface EdgePeak { readonly peak: BoundaryPeak, readonly index: number, /** At the end of its edge: −1 or +1; 0 between. */ readonly end: -1 | 0 | 1 }
+
+/** The greatest value of each edge, in the order of the outline. */
+function edgePeaks(mesh: PanelMesh, tau: Float64Array, scale: number, discs: readonly Disc[]): EdgePeak[] {
   const values = new Float64Array(panelPolynomials(mesh.order).places.length)
-  const perEdge = new Map<string, BoundaryPeak>()
+  const perEdge = new Map<string, EdgePeak>()
   for (const panel of mesh.panels) {
+    const { edge, from, to } = panel
     const best = panelBest(panel, tau, mesh.order, discs, values)
-    const key = `${panel.edge.loop}/${panel.edge.index}`
+    const key = `${edge.loop}/${edge.index}`
     const known = perEdge.get(key)
-    if (best && !(known && best.tau * scale <= known.tau * (1 + equalWithin))) {
-      perEdge.set(key, { tau: best.tau * scale, at: best.at, edge: panel.edge.name, loop: panel.edge.loop })
-    }
+    if (!best || (known && best.tau * scale <= known.peak.tau * (1 + equalWithin))) continue
+    const end = from === 0 && best.u === -1 ? -1 : to === 1 && best.u === 1 ? 1 : 0
+    perEdge.set(key, { peak: { tau: best.tau * scale, at: best.at, edge: edge.name, loop: edge.loop }, index: edge.index, end })
   }
-  const sorted = [...perEdge.values()].sort((p, q) => q.tau - p.tau)
-  const first = [...perEdge.values()].find(peak => peak.tau >= (sorted[0]?.tau ?? 0) * (1 - equalWithin))
+  return [...perEdge.values()]
+}
+
+/** Whether the shear falls off on both sides: at the end of an edge, the next edge must have its greatest value there too. */
+function isMaximum({ peak, index, end }: EdgePeak, all: readonly EdgePeak[]): boolean {
+  if (end === 0) return true
+  const loop = all.filter(one => one.peak.loop === peak.loop)
+  const next = loop.find(one => one.index === (index + end + loop.length) % loop.length)
+  return !next || next.peak.tau <= peak.tau * (1 + equalWithin)
+}
+
+/** The greatest values outside the discs, the greatest first; neighbouring edges that share their greatest value count once. */
+export function boundaryPeaks(mesh: PanelMesh, tau: Float64Array, scale: number, size: number, discs: readonly Disc[] = []): BoundaryPeak[] {
+  const all = edgePeaks(mesh, tau, scale, discs)
+  const maxima = all.filter(one => isMaximum(one, all)).map(({ peak }) => peak)
+  const sorted = [...maxima].sort((p, q) => q.tau - p.tau)
+  const first = maxima.find(peak => peak.tau >= (sorted[0]?.tau ?? 0) * (1 - equalWithin))
   const inOrder = first ? [first, ...sorted.filter(peak => peak !== first)] : []
   return inOrder.filter((peak, index) => inOrder.slice(0, index).every(before => Math.hypot(before.at.x - peak.at.x, before.at.y - peak.at.y) > onePlace * size))
 }

@@ -5,7 +5,7 @@
  * run). Loops must be walked with the material on the left.
  */
 import type { Outline, OutlineEdge, PlanePoint } from '#shared/torsion/outline/outline'
-import { edgePoint, outlineEdges } from '#shared/torsion/outline/outline'
+import { edgeDirection, edgePoint, outlineEdges } from '#shared/torsion/outline/outline'
 import { gaussLegendre } from '#shared/torsion/outline/gauss-legendre'
 
 /** mm², mm, mm⁴; second moments about the centroid, Ixx = ∫y² dA, Iyy = ∫x² dA, Ixy = ∫xy dA. */
@@ -102,3 +102,25 @@ export function propertiesOfEdges(edges: readonly OutlineEdge[]): AreaProperties
 
 /** Properties of an outline whose outer loop runs counter-clockwise and whose holes run clockwise (`checkOutline` gives such a one). */
 export const outlineProperties = (outline: Outline): AreaProperties => propertiesOfEdges(outlineEdges(outline))
+
+/** ∫ρ² dA and ∫ρ⁴ dA about a point, mm⁴ and mm⁶, what large twist needs (§7.7). */
+export interface PolarMoments { readonly second: number, readonly fourth: number }
+
+/** By ∇·(ρ² r⃗) = 4ρ² and ∇·(ρ⁴ r⃗) = 6ρ⁴ along edges with the material on their left. */
+export function polarMoments(edges: readonly OutlineEdge[], about: PlanePoint): PolarMoments {
+  const { nodes, weights } = gaussLegendre(segmentNodes)
+  let [second, fourth] = [0, 0]
+  for (const edge of edges) {
+    for (const [index, node] of nodes.entries()) {
+      const part = (node + 1) / 2
+      const at = edgePoint(edge, part)
+      const [x, y] = [at.x - about.x, at.y - about.y]
+      const direction = edgeDirection(edge, part)
+      const reach = (x * Math.sin(direction) - y * Math.cos(direction)) * (weights[index] ?? 0) * edge.length / 2
+      const square = x * x + y * y
+      second += square * reach / 4
+      fourth += square * square * reach / 6
+    }
+  }
+  return { second, fourth }
+}

@@ -1,8 +1,11 @@
 import { Worker } from 'node:worker_threads'
 import { afterEach, describe, expect, it } from 'vitest'
+import { evaluateGeneralOutline } from '#shared/calc/kinds/general-outline/evaluate'
+import { prepareOutlines } from '#server/outline/prepare-outlines'
 import { ThreadPool } from '#server/outline/thread-pool'
 import { closeOutlinePool, solveOutline } from '#server/outline/solve-outline'
 import { outlineTorsion } from '#shared/torsion/outline/outline-torsion'
+import { sharpBracketInputs, thickAngleInputs } from '../../../factories/general-outline'
 import { bentHat, machinedAngle, tube } from '../../../reference/outlines'
 
 /** A real thread: doubles numbers, spins for ever on `spin`, ends on `die`, throws on `throw`. */
@@ -101,5 +104,14 @@ describe('outlines on threads', () => {
     const first = await solveOutline(task)
     await closeOutlinePool()
     expect(await solveOutline(task, AbortSignal.abort())).toBe(first)
+  })
+})
+
+describe('outlines of calculations', () => {
+  it('are solved on threads before the calculations are evaluated; others are passed over', async () => {
+    const inputs = thickAngleInputs()
+    expect(await prepareOutlines([{ kind: 'general-outline', inputs }, { kind: 'open-section', inputs: {} }, { kind: 'general-outline', inputs: null }])).toBeNull()
+    expect(evaluateGeneralOutline(inputs).ok).toBe(true)
+    expect(await prepareOutlines([{ kind: 'general-outline', inputs: sharpBracketInputs() }], AbortSignal.abort())).toMatchObject({ ok: false, code: 'cancelled' })
   })
 })
