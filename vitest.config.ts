@@ -5,11 +5,12 @@ import { defineConfig } from 'vitest/config'
 const root = fileURLToPath(new URL('.', import.meta.url))
 const alias = { '~': `${root}app`, '@': `${root}app` }
 
-// Three projects: pure and component tests, tests against the built server and PostgreSQL, and the browser story.
+// Projects: pure and component tests, what must not compile, tests against the built server and PostgreSQL, the browser story.
 export default defineConfig({
   test: {
     projects: [
       { plugins: [vue()], resolve: { alias }, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], setupFiles: ['tests/unit/seeds.ts'], testTimeout: 60_000 } },
+      { test: { name: 'types', include: [], typecheck: { enabled: true, only: true, include: ['tests/types/**/*.test-d.ts'], tsconfig: 'tests/types/tsconfig.json' } } },
       {
         resolve: { alias },
         test: {

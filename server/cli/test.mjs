@@ -74,6 +74,7 @@ async function main() {
     single('lint', 'npx', ['eslint', '.', '--max-warnings', '0'])
     single('types', 'npx', ['nuxi', 'typecheck'])
     oneCopy('prosemirror-model')
+    vitest('types', {})
     vitest('unit', {})
     const build = ensureBuild()
     const database = await startThrowAway()

@@ -2,7 +2,7 @@
  * How values are shown (methods reference §10, rules 3 to 7). The only place
  * where a number is rounded; what decides always reads the full value.
  */
-import type { Dimension, UnitId } from '#shared/units/units'
+import type { Dimension, FittingUnit, UnitId } from '#shared/units/units'
 import type { DecimalNumber, Rounding } from '#shared/units/round-decimal'
 import { fromEngine } from '#shared/units/units'
 import { decimalOf, positional, roundDigits, roundPlaces } from '#shared/units/round-decimal'
@@ -56,7 +56,11 @@ export function decimals(value: number, places: number, rounding: Rounding = 'ne
 }
 
 /** The number alone. `value` is in engine units; it is shown in `unit`. */
-export function showValue(value: number, dimension: Dimension, unit: UnitId): string {
+export function showValue<D extends Dimension, U extends UnitId>(value: number, dimension: D, unit: FittingUnit<D, U>): string {
+  return valueIn(value, dimension, unit)
+}
+
+function valueIn(value: number, dimension: Dimension, unit: UnitId): string {
   if (!Number.isFinite(value)) return noValue
   if (dimension === 'margin') return showMargin(value)
   const shown = fromEngine(value, unit)
@@ -67,8 +71,8 @@ export function showValue(value: number, dimension: Dimension, unit: UnitId): st
 }
 
 /** Number, thin space, unit; the degree sign closes up. `value` is in engine units. */
-export function showQuantity(value: number, dimension: Dimension, unit: UnitId): string {
-  return withUnit(showValue(value, dimension, unit), unit)
+export function showQuantity<D extends Dimension, U extends UnitId>(value: number, dimension: D, unit: FittingUnit<D, U>): string {
+  return withUnit(valueIn(value, dimension, unit), unit)
 }
 
 /** Sets a unit behind a number that is already text, such as a typed one. */

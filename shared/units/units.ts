@@ -96,8 +96,14 @@ const table = {
 type Table = typeof table
 
 /** The units of one dimension: `UnitOf<'torque'>` refuses `'MPa'` at compile time. */
-export type UnitOf<D extends Dimension> = keyof Table[D] & string
+export type UnitOf<D extends Dimension> = D extends Dimension ? keyof Table[D] & string : never
 export type UnitId = { [D in Dimension]: UnitOf<D> }[Dimension]
+
+/**
+ * A unit beside its dimension, in one call: a unit that is known when compiling must fit (`'MPa'` beside `'torque'`
+ * does not compile); one that is known only when running, because somebody chose it, may be any.
+ */
+export type FittingUnit<D extends Dimension, U extends UnitId> = U & (UnitId extends U ? UnitId : UnitOf<D>)
 
 export const dimensions = Object.keys(table) as Dimension[]
 

@@ -1,12 +1,14 @@
 /** Outputs under keys that stay the same when a calculation is edited; values are in engine units. */
 import type { MarginRow, Output } from '#shared/calc/types'
 import type { FactorModel, MaterialModel } from '#shared/calc/parts/model'
-import type { Dimension, UnitId } from '#shared/units/units'
+import type { Dimension, FittingUnit, UnitId } from '#shared/units/units'
 
 export type Extra = Partial<Pick<Output, 'caseId' | 'wall' | 'primary'>>
 
 /** An output, or nothing where the value does not exist. */
-export function output(key: string, symbol: string, label: string, value: number | null | undefined, dimension: Dimension, unit: UnitId, method: string, extra: Extra = {}): Output[] {
+export function output<D extends Dimension, U extends UnitId>(
+  key: string, symbol: string, label: string, value: number | null | undefined, dimension: D, unit: FittingUnit<D, U>, method: string, extra: Extra = {},
+): Output[] {
   return value === null || value === undefined || !Number.isFinite(value) ? [] : [{ key, symbol, label, value, dimension, unit, method, ...extra }]
 }
 
