@@ -8,5 +8,6 @@ import { sectorialRows } from './sectorial-rows'
 import { solidRows } from './solid-rows'
 import { torsionRows } from './torsion-rows'
 import { unitRows } from './unit-rows'
+import { warpingRows } from './warping-rows'
 
-export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...cellRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...cellRows, ...warpingRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]

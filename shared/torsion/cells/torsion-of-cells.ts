@@ -2,7 +2,7 @@
  * Torsion of closed sections: one cell or many with shared walls, differing shear moduli, and fins
  * (Bredt–Batho; methods §2.1, §2.2). Thin walls, free warping, contour held in shape. N, mm, MPa, rad.
  */
-import { conditionOf, factorise, solveFactorised } from '#shared/torsion/cells/cholesky'
+import { conditionOf, factorise, solveFactorised } from '#shared/torsion/cholesky'
 import { circularFacePart, worstCondition } from '#shared/torsion/cells/published'
 import { wallGraph, type GraphWall, type WallGraph, type WallSection } from '#shared/torsion/cells/wall-graph'
 import { refusal, type Refusal } from '#shared/torsion/section'

@@ -3,11 +3,12 @@
  * differing moduli (methods §5.4): statical moments along a tree of the walls, then circulations of the
  * cells that leave them untwisted. Forces act through the shear centre. N, mm, MPa.
  */
-import { factorise, solveFactorised } from '#shared/torsion/cells/cholesky'
+import { factorise, solveFactorised } from '#shared/torsion/cholesky'
 import { cellMatrix } from '#shared/torsion/cells/torsion-of-cells'
 import { wallGraph, type GraphWall, type WallGraph, type WallSection } from '#shared/torsion/cells/wall-graph'
 import { pathPoint, tangentAt } from '#shared/torsion/geometry'
 import { refusal, type Point, type Refusal } from '#shared/torsion/section'
+import { gatherFromFreeEdges } from '#shared/torsion/shear/gather'
 import { rulePoints } from '#shared/torsion/stations'
 
 export interface AreaMoments { readonly A: number, readonly centroid: Point, readonly Ixx: number, readonly Iyy: number, readonly Ixy: number }
@@ -25,8 +26,8 @@ export interface ShearFlows {
 /** Where the flow is given along each wall. */
 export const flowParts: readonly number[] = [0, 1, 2, 3, 4, 5, 6, 7, 8].map(i => i / 8)
 
-/** Flow within a wall: its value at the start less the growing moments of the area. */
-interface Along { readonly x: number, readonly y: number, readonly Sx: number, readonly Sy: number }
+/** First moments gathered at the start of a wall. */
+interface Along { readonly x: number, readonly y: number }
 
 /** First moments ∫x t̄ ds and ∫y t̄ ds from the start of a wall to a part of it, about a point. */
 function firstMoments({ wall, path, length }: GraphWall, weight: number, about: Point, part: number): { x: number, y: number } {
@@ -69,53 +70,12 @@ export function areaMoments(walls: readonly GraphWall[], weigh: (wall: GraphWall
   }
 }
 
-/** A spanning tree of the walls and what hangs on each; walls left over close the cells and begin with no flow. */
-interface Tree { readonly order: readonly { readonly wall: number, readonly parent: string, readonly child: string }[], readonly chords: readonly number[] }
-
-function spanningTree(walls: readonly GraphWall[]): Tree {
-  const at = new Map<string, number[]>()
-  walls.forEach(({ wall }, i) => [wall.from, wall.to].forEach(node => at.set(node, [...at.get(node) ?? [], i])))
-  const root = walls[0]?.wall.from ?? ''
-  const reached = new Set([root])
-  const order: { wall: number, parent: string, child: string }[] = []
-  const used = new Set<number>()
-  const queue = [root]
-  for (let parent = queue.shift(); parent !== undefined; parent = queue.shift()) {
-    for (const i of at.get(parent) ?? []) {
-      const wall = walls[i]?.wall
-      const child = wall?.from === parent ? wall.to : wall?.from ?? ''
-      if (used.has(i) || reached.has(child)) continue
-      used.add(i)
-      reached.add(child)
-      order.push({ wall: i, parent, child })
-      queue.push(child)
-    }
-  }
-  return { order, chords: walls.flatMap((_, i) => (used.has(i) ? [] : [i])) }
-}
-
-/** First moments of the area beyond the start of every wall, so that the flow falls to zero at each free end. */
+/** First moments gathered from the free edges at the start of every wall, so that the flow falls to zero at each. */
 function statics(walls: readonly GraphWall[], weigh: (wall: GraphWall) => number, about: Point): Along[] {
   const total = walls.map(one => firstMoments(one, weigh(one), about, 1))
-  const { order, chords } = spanningTree(walls)
-  /** Moments that arrive at a node from beyond it. */
-  const hanging = new Map<string, { x: number, y: number }>()
-  const hang = (node: string, x: number, y: number) => {
-    const held = hanging.get(node) ?? { x: 0, y: 0 }
-    hanging.set(node, { x: held.x + x, y: held.y + y })
-  }
-  const along: Along[] = walls.map((_, i) => ({ x: 0, y: 0, Sx: total[i]?.x ?? 0, Sy: total[i]?.y ?? 0 }))
-  // A chord is cut at its start and hangs on its end.
-  for (const i of chords) hang(walls[i]?.wall.to ?? '', total[i]?.x ?? 0, total[i]?.y ?? 0)
-  for (const { wall: i, parent, child } of [...order].reverse()) {
-    const beyond = hanging.get(child) ?? { x: 0, y: 0 }
-    const own = total[i] ?? { x: 0, y: 0 }
-    hang(parent, beyond.x + own.x, beyond.y + own.y)
-    // Towards the root the gathered moment is what lies beyond; away from it, minus that.
-    const towardsRoot = walls[i]?.wall.to === parent
-    along[i] = towardsRoot ? { x: beyond.x, y: beyond.y, Sx: own.x, Sy: own.y } : { x: -(beyond.x + own.x), y: -(beyond.y + own.y), Sx: own.x, Sy: own.y }
-  }
-  return along
+  const edges = walls.map(({ wall }) => wall)
+  const [x, y] = [gatherFromFreeEdges(edges, total.map(one => one.x)), gatherFromFreeEdges(edges, total.map(one => one.y))]
+  return walls.map((_, i) => ({ x: x[i] ?? 0, y: y[i] ?? 0 }))
 }
 
 /** q at a part of a wall for the coefficients of x and y: q = −(kx·Qx + ky·Qy), Q gathered from the free edges. */

@@ -15,7 +15,7 @@ const parts: Mutation[] = [
   { name: 'part of the variation at a circular wall', module: at('published'), spoil: all => ({ ...all, circularFacePart: 2 }) },
   ...[0, 1, 2, 3].map((i): Mutation => ({ name: `machined corner, line ${i}`, module: at('published'), spoil: line(i) })),
   { name: 'flexibility of the cells', module: at('torsion-of-cells'), spoil: result('torsionOfCells', 'GJ', 'J', 'GJWithOwn') },
-  { name: 'circulations', module: at('cholesky'), spoil: array('solveFactorised') },
+  { name: 'circulations', module: 'torsion/cholesky', spoil: array('solveFactorised') },
   { name: 'length of a wall', module: 'torsion/geometry', spoil: result('pathLength') },
   { name: 'area of a cell', module: 'torsion/sectorial-growth', spoil: result('sectorialGrowth') },
   { name: 'bend factor in a cell', module: at('cell-corner'), spoil: result('cellCornerFactor', 'K') },
