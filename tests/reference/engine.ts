@@ -24,13 +24,14 @@ export async function loadEngine() {
   const span = await import('#shared/torsion/span/span-bar')
   const combined = await import('#shared/torsion/combined/interaction')
   const imposed = await import('#shared/torsion/imposed/imposed-twist')
+  const stability = await import('#shared/torsion/stability/wall-stability')
   const outlineSolver = await import('#shared/torsion/outline/outline-torsion')
   const outlineCheck = await import('#shared/torsion/outline/outline-check')
   const outlineConvergence = await import('#shared/torsion/outline/convergence')
   const outlineAgreement = await import('#shared/torsion/outline/agreement')
   const outlineVertices = await import('#shared/torsion/outline/reentrant')
   const outlineLimits = await import('#shared/torsion/outline/published')
-  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...solids, ...cells, ...cellCorner, ...shear, ...warpingBar, ...sectorialRun, ...span, ...combined, ...imposed, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
+  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...solids, ...cells, ...cellCorner, ...shear, ...warpingBar, ...sectorialRun, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
 }
 
 export type Engine = Awaited<ReturnType<typeof loadEngine>>

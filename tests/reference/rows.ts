@@ -7,8 +7,9 @@ import { programRows } from './program-rows'
 import { sectorialRows } from './sectorial-rows'
 import { solidRows } from './solid-rows'
 import { spanRows } from './span-rows'
+import { stabilityRows } from './stability-rows'
 import { torsionRows } from './torsion-rows'
 import { unitRows } from './unit-rows'
 import { warpingRows } from './warping-rows'
 
-export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...cellRows, ...warpingRows, ...spanRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...cellRows, ...warpingRows, ...spanRows, ...stabilityRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
