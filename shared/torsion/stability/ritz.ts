@@ -30,6 +30,8 @@ function gauss(count: number): { x: number, w: number }[] {
   })
 }
 
+const points = gauss(POINTS)
+
 /** Legendre polynomials and two derivatives, 0 … n−1, at x. */
 function legendre(n: number, x: number): { p: number[], d: number[], s: number[] } {
   const [p, d, s] = [[1, x], [0, 1], [0, 0]]
@@ -45,7 +47,7 @@ function legendre(n: number, x: number): { p: number[], d: number[], s: number[]
 function basis(n: number, edge: 'supported' | 'clamped'): Basis {
   const make = () => new Float64Array(n * n)
   const [ff, gg, hh, fg] = [make(), make(), make(), make()]
-  for (const { x, w } of gauss(POINTS)) {
+  for (const { x, w } of points) {
     const { p, d, s } = legendre(n, x)
     const q = 1 - x * x
     const [e, de, dde] = edge === 'supported' ? [q, -2 * x, -2] : [q * q, -4 * x * q, 12 * x * x - 4]
@@ -138,18 +140,18 @@ function largestEigenvalue(K: Float64Array, N: Float64Array, n: number): number 
 
 /** The largest eigenvalue in magnitude of a symmetric operator: Lanczos with full reorthogonalisation, then bisection on its tridiagonal. */
 function lanczos(apply: (v: Float64Array) => Float64Array, n: number): number {
-  const steps = Math.min(n, 60)
+  const steps = Math.min(n, 40)
   const basisVectors: Float64Array[] = []
   const [alpha, beta]: [number[], number[]] = [[], []]
   let v = Float64Array.from({ length: n }, (_, i) => 1 / (1 + i) + (i % 3) * 0.1)
-  let norm = Math.hypot(...v)
+  let norm = Math.sqrt(dot(v, v))
   v = v.map(one => one / norm)
   for (let step = 0; step < steps; step += 1) {
     basisVectors.push(v)
     const w = apply(v)
     alpha.push(dot(w, v))
     for (let pass = 0; pass < 2; pass += 1) for (const u of basisVectors) subtract(w, u, dot(w, u))
-    norm = Math.hypot(...w)
+    norm = Math.sqrt(dot(w, w))
     if (norm < 1e-12 * Math.abs(alpha[0] ?? 1) || norm === 0) break
     beta.push(norm)
     v = w.map(one => one / norm)
