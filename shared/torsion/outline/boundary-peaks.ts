@@ -66,7 +66,12 @@ function edgePeaks(mesh: PanelMesh, tau: Float64Array, scale: number, discs: rea
     const best = panelBest(panel, tau, mesh.order, discs, values)
     const key = `${edge.loop}/${edge.index}`
     const known = perEdge.get(key)
-    if (!best || (known && best.tau * scale <= known.peak.tau * (1 + equalWithin))) continue
+    if (!best || (known && best.tau * scale <= known.peak.tau)) continue
+    if (known && best.tau * scale <= known.peak.tau * (1 + equalWithin)) {
+      // Equal but for rounding: the place met first stays, with the greatest value.
+      perEdge.set(key, { ...known, peak: { ...known.peak, tau: best.tau * scale } })
+      continue
+    }
     const end = from === 0 && best.u === -1 ? -1 : to === 1 && best.u === 1 ? 1 : 0
     perEdge.set(key, { peak: { tau: best.tau * scale, at: best.at, edge: edge.name, loop: edge.loop }, index: edge.index, end })
   }
@@ -87,6 +92,6 @@ export function boundaryPeaks(mesh: PanelMesh, tau: Float64Array, scale: number,
   const maxima = all.filter(one => isMaximum(one, all)).map(({ peak }) => peak)
   const sorted = [...maxima].sort((p, q) => q.tau - p.tau)
   const first = maxima.find(peak => peak.tau >= (sorted[0]?.tau ?? 0) * (1 - equalWithin))
-  const inOrder = first ? [first, ...sorted.filter(peak => peak !== first)] : []
+  const inOrder = first ? [{ ...first, tau: sorted[0]?.tau ?? first.tau }, ...sorted.filter(peak => peak !== first)] : []
   return inOrder.filter((peak, index) => inOrder.slice(0, index).every(before => Math.hypot(before.at.x - peak.at.x, before.at.y - peak.at.y) > onePlace * size))
 }

@@ -8,7 +8,11 @@ export interface MeshEstimate {
   readonly onMeshes: readonly [number, number, number]
   /** log₂ of the ratio of the two differences; null where both are down to rounding. */
   readonly order: number | null
-  /** How far the value may be off, in its unit: the last difference carried on at the order seen, at second order where it is higher. */
+  /**
+   * How far the value may be off, in its unit: the last difference carried on at the order seen, at second order
+   * where it is higher. Where the differences change sign the last may be small by accident: then a quarter of
+   * the first at least.
+   */
   readonly uncertainty: number
 }
 
@@ -26,7 +30,8 @@ export function estimateFromMeshes(coarse: number, middle: number, fine: number)
   const onMeshes = [coarse, middle, fine] as const
   if (second <= floor) return { value: fine, onMeshes, order: first <= floor ? null : Math.log2(first / floor), uncertainty: floor }
   const order = Math.log2(Math.max(first, floor) / second)
-  const uncertainty = order < leastTrusted ? Math.max(first, second) : second / (2 ** Math.min(order, mostTrusted) - 1)
+  const carried = order < leastTrusted ? Math.max(first, second) : second / (2 ** Math.min(order, mostTrusted) - 1)
+  const uncertainty = (middle - coarse) * (fine - middle) < 0 ? Math.max(carried, first / 4) : carried
   return { value: fine, onMeshes, order, uncertainty }
 }
 

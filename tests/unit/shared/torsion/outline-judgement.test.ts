@@ -14,6 +14,11 @@ describe('an estimate from three meshes', () => {
     expect(uncertainty).toBeCloseTo(15 / 256 / 3, 12)
   })
 
+  it('mistrusts a last difference that is small because the values crossed', () => {
+    expect(estimateFromMeshes(1.04, 1, 1.001).uncertainty).toBeCloseTo(0.01, 12)
+    expect(estimateFromMeshes(1.04, 1, 0.999).uncertainty).toBeCloseTo(0.001 / 3, 12)
+  })
+
   it('tells the spread where the meshes do not converge', () => {
     expect(estimateFromMeshes(1, 1.1, 1)).toMatchObject({ value: 1, order: 0, uncertainty: expect.closeTo(0.1, 12) })
     expect(estimateFromMeshes(1, 1.1, 1.3).uncertainty).toBeCloseTo(0.2, 12)
