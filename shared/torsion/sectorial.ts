@@ -172,7 +172,7 @@ function aboutShearCentre(section: OpenSection, pieces: readonly Piece[], pole: 
   const { walked, omegaAt } = walk(pieces, pole)
   const raw = stationsOf(walked, pole, weigh.of)
   const mean = integral(raw, at => at.omega) / weightedArea
-  const stations = raw.map(at => ({ ...at, omega: at.omega - mean }))
+  const stations = raw.map(({ x, y, area, omega, t, tangent }) => ({ x, y, area, omega: omega - mean, t, tangent }))
   const { A, ...gammas } = gammasOf(stations, pole, size)
   const { gammaPrimary } = gammas
   const peak = peaks(walked, pole).map(one => ({ ...one, omega: one.omega - mean })).reduce((best, one) => (Math.abs(one.omega) > Math.abs(best.omega) ? one : best))

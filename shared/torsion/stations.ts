@@ -18,11 +18,18 @@ const gauss: readonly (readonly [number, number])[] = [
 /** Longest arc integrated by one rule; the truncation is then far below rounding. */
 const panel = Math.PI / 4
 
+interface RulePoint { readonly part: number, readonly weight: number }
+const rules = new Map<number, readonly RulePoint[]>()
+
 /** Points (0…1) and weights (summing to 1) along one piece. */
-export function rulePoints(path: WallPath): { part: number, weight: number }[] {
+export function rulePoints(path: WallPath): readonly RulePoint[] {
   const count = path.kind === 'line' ? 1 : Math.max(1, Math.ceil(Math.abs(path.sweep) / panel))
-  return Array.from({ length: count }, (_, index) => index).flatMap(index =>
+  const known = rules.get(count)
+  if (known) return known
+  const rule = Array.from({ length: count }, (_, index) => index).flatMap(index =>
     gauss.flatMap(([x, w]) => [-x, x].map(at => ({ part: (index + (1 + at) / 2) / count, weight: w / 2 / count }))))
+  rules.set(count, rule)
+  return rule
 }
 
 /** One integration point: where, how much area it stands for, and ω about the first pole. */
@@ -39,19 +46,21 @@ export function walk(pieces: readonly Piece[], pole: Point): { walked: WalkedPie
   const [first] = pieces
   const omegaAt = new Map<string, number>(first ? [[first.from, 0]] : [])
   const walked: WalkedPiece[] = []
-  const left = new Set(pieces)
-  for (let found = true; found;) {
-    found = false
-    for (const piece of left) {
+  const meeting = new Map<string, Piece[]>()
+  for (const piece of pieces) for (const node of [piece.from, piece.to]) meeting.set(node, [...meeting.get(node) ?? [], piece])
+  const done = new Set<Piece>()
+  // The list grows while it is walked: each node in it has its ω.
+  const reached = first ? [first.from] : []
+  for (const node of reached) {
+    for (const piece of meeting.get(node) ?? []) {
+      if (done.has(piece)) continue
+      done.add(piece)
       const growth = sectorialGrowth(piece.path, pole, 1)
-      const [atFrom, atTo] = [omegaAt.get(piece.from), omegaAt.get(piece.to)]
-      const startOmega = atFrom ?? (atTo === undefined ? undefined : atTo - growth)
-      if (startOmega === undefined) continue
-      left.delete(piece)
-      found = true
-      omegaAt.set(piece.from, startOmega)
-      omegaAt.set(piece.to, startOmega + growth)
+      const startOmega = piece.from === node ? omegaAt.get(node) ?? 0 : (omegaAt.get(node) ?? 0) - growth
+      const far = piece.from === node ? piece.to : piece.from
+      omegaAt.set(far, piece.from === node ? startOmega + growth : startOmega)
       walked.push({ piece, startOmega, endOmega: startOmega + growth })
+      reached.push(far)
     }
   }
   return { walked, omegaAt }
@@ -59,12 +68,15 @@ export function walk(pieces: readonly Piece[], pole: Point): { walked: WalkedPie
 
 /** The integration points of walked pieces; `weigh` scales the area, e.g. by a ratio of moduli. */
 export function stationsOf(walked: readonly WalkedPiece[], pole: Point, weigh: (piece: Piece) => number): Station[] {
-  return walked.flatMap(({ piece, startOmega }) => {
+  const stations: Station[] = []
+  for (const { piece, startOmega } of walked) {
     const { path, t } = piece
     const area = pathLength(path) * t * weigh(piece)
-    return rulePoints(path).map(({ part, weight }) => ({
-      ...pathPoint(path, part),
-      area: area * weight, omega: startOmega + sectorialGrowth(path, pole, part), t, tangent: tangentAt(path, part),
-    }))
-  })
+    for (const { part, weight } of rulePoints(path)) {
+      // Written out: copying a point into each of some thousand stations took most of the time of a long section.
+      const { x, y } = pathPoint(path, part)
+      stations.push({ x, y, area: area * weight, omega: startOmega + sectorialGrowth(path, pole, part), t, tangent: tangentAt(path, part) })
+    }
+  }
+  return stations
 }

@@ -34,7 +34,25 @@ export function marginSet(mode: MarginMode, places: readonly MarginPlace[], case
   return { mode, places, caseIds, applied, allowable }
 }
 
-/** Above this many margins only those are kept that a reader needs: the least of each place and mode, of each case and mode, and the ties. */
+/**
+ * A set whose applied values grow with one number per case, as stresses do with |θ′|: `unit` at every place, `by`
+ * in every case, `allowableAt` the allowable in every case at a place, or null where it has none.
+ */
+export function linearSet(mode: MarginMode, places: readonly MarginPlace[], caseIds: readonly string[], unit: (place: number) => number, by: Float64Array, allowableAt: (place: number) => Float64Array | null): MarginSet {
+  const applied = new Float64Array(places.length * caseIds.length)
+  const allowable = new Float64Array(applied.length)
+  const n = caseIds.length
+  for (let p = 0; p < places.length; p += 1) {
+    const at = allowableAt(p)
+    if (at) allowable.set(at, p * n)
+    else allowable.fill(Number.NaN, p * n, (p + 1) * n)
+    const one = unit(p)
+    for (let c = 0, i = p * n; c < n; c += 1, i += 1) applied[i] = one * (by[c] as number)
+  }
+  return { mode, places, caseIds, applied, allowable }
+}
+
+/** Above this many margins only those are kept that a reader needs: the least of each place and mode, of each case, and the ties of each mode. */
 export const MOST_ROWS = 2000
 
 export interface JudgedMargins { rows: MarginRow[], governing: MarginRow | null }
@@ -46,27 +64,31 @@ export function judgeMargins(sets: readonly MarginSet[]): JudgedMargins {
   sets.forEach(({ mode }, s) => leastOfMode.set(mode.mode, Math.min(leastOfMode.get(mode.mode) ?? Infinity, leastIn(reserves[s]))))
   const least = Math.min(Infinity, ...leastOfMode.values())
   const count = sets.reduce((total, { allowable }) => total + allowable.length, 0)
-  const kept = sets.map((set, s) => count > MOST_ROWS ? needed(set, reserves[s] ?? new Float64Array(0), leastOfMode.get(set.mode.mode) ?? Infinity) : null)
-  const rows: MarginRow[] = []
-  let governing: MarginRow | null = null
-  const cases = Math.max(0, ...sets.map(({ caseIds }) => caseIds.length))
-  for (let c = 0; c < cases; c += 1) {
-    sets.forEach((set, s) => {
-      const rf = reserves[s]
-      if (!rf || c >= set.caseIds.length) return
-      for (let p = 0; p < set.places.length; p += 1) {
-        const i = p * set.caseIds.length + c
-        if (Number.isNaN(set.allowable[i]) || kept[s]?.[i] === 0) continue
-        const row = rowOf(set, p, c, rf[i] ?? Infinity, leastOfMode.get(set.mode.mode) ?? Infinity)
-        if (row.rf === least && !governing) {
-          row.governing = true
-          governing = row
-        }
-        rows.push(row)
-      }
-    })
-  }
+  const rows = (count > MOST_ROWS ? needed(sets, reserves, leastOfMode) : all(sets)).map(({ s, i }) => {
+    const set = sets[s] as MarginSet
+    const n = set.caseIds.length
+    return rowOf(set, Math.floor(i / n), i % n, reserves[s]?.[i] ?? Infinity, leastOfMode.get(set.mode.mode) ?? Infinity)
+  })
+  const governing = rows.find(row => row.rf === least) ?? null
+  if (governing) governing.governing = true
   return { rows, governing }
+}
+
+/** Number of a set, and of a margin in it. */
+interface Kept { s: number, i: number }
+
+/** Case by case, in each case set by set and place by place. */
+function inOrder(sets: readonly MarginSet[], kept: Kept[]): Kept[] {
+  const caseOf = ({ s, i }: Kept) => i % (sets[s]?.caseIds.length ?? 1)
+  return kept.sort((a, b) => caseOf(a) - caseOf(b) || a.s - b.s || a.i - b.i)
+}
+
+function all(sets: readonly MarginSet[]): Kept[] {
+  const kept: Kept[] = []
+  sets.forEach(({ allowable }, s) => allowable.forEach((value, i) => {
+    if (!Number.isNaN(value)) kept.push({ s, i })
+  }))
+  return inOrder(sets, kept)
 }
 
 /** Infinity stands for no load here and never leaves this file. */
@@ -87,25 +109,39 @@ function leastIn(values: Float64Array | undefined): number {
 
 const isTie = (rf: number, least: number) => rf <= least * (1 + tieWithin)
 
-/** 1 where a row is needed: least row of every place, and of every case, and all ties. */
-function needed({ places, caseIds, allowable }: MarginSet, rf: Float64Array, least: number): Uint8Array {
-  const keep = new Uint8Array(rf.length)
-  const n = caseIds.length
-  const leastOfCase = new Int32Array(n).fill(-1)
-  for (let p = 0; p < places.length; p += 1) {
-    let best = -1
-    for (let i = p * n, c = 0; c < n; i += 1, c += 1) {
-      if (Number.isNaN(allowable[i])) continue
-      const value = rf[i] ?? Infinity
-      if (best < 0 || value < (rf[best] ?? Infinity)) best = i
-      const held = leastOfCase[c] ?? -1
-      if (held < 0 || value < (rf[held] ?? Infinity)) leastOfCase[c] = i
-      if (value < Infinity && isTie(value, least)) keep[i] = 1
+/** The least margin of every place and mode, of every case, and what ties with the least of its mode. */
+function needed(sets: readonly MarginSet[], reserves: readonly Float64Array[], leastOfMode: ReadonlyMap<string, number>): Kept[] {
+  const cases = Math.max(0, ...sets.map(({ caseIds }) => caseIds.length))
+  const [setOfCase, indexOfCase, leastOfCase] = [new Int32Array(cases).fill(-1), new Int32Array(cases), new Float64Array(cases).fill(Infinity)]
+  const keep = sets.map(({ allowable }) => new Uint8Array(allowable.length))
+  sets.forEach(({ mode, places, caseIds, allowable }, s) => {
+    const [rf, marks] = [reserves[s] as Float64Array, keep[s] as Uint8Array]
+    const tied = (leastOfMode.get(mode.mode) ?? Infinity) * (1 + tieWithin)
+    for (let p = 0, i = 0; p < places.length; p += 1) {
+      let best = -1
+      for (let c = 0; c < caseIds.length; c += 1, i += 1) {
+        if (Number.isNaN(allowable[i])) continue
+        const value = rf[i] as number
+        if (best < 0 || value < (rf[best] as number)) best = i
+        if (value < Infinity && value <= tied) marks[i] = 1
+        if (value < (leastOfCase[c] as number) || setOfCase[c] === -1) {
+          leastOfCase[c] = value
+          setOfCase[c] = s
+          indexOfCase[c] = i
+        }
+      }
+      if (best >= 0) marks[best] = 1
     }
-    if (best >= 0) keep[best] = 1
-  }
-  for (const i of leastOfCase) if (i >= 0) keep[i] = 1
-  return keep
+  })
+  setOfCase.forEach((s, c) => {
+    const marks = keep[s]
+    if (marks) marks[indexOfCase[c] as number] = 1
+  })
+  const kept: Kept[] = []
+  keep.forEach((marks, s) => {
+    for (let i = marks.indexOf(1); i >= 0; i = marks.indexOf(1, i + 1)) kept.push({ s, i })
+  })
+  return inOrder(sets, kept)
 }
 
 function rowOf(set: MarginSet, p: number, c: number, reserve: number, leastOfMode: number): MarginRow {
@@ -114,13 +150,14 @@ function rowOf(set: MarginSet, p: number, c: number, reserve: number, leastOfMod
   const i = p * caseIds.length + c
   const rf = reserve < Infinity ? reserve : null
   const caseId = caseIds[c] ?? ''
-  return {
+  const row: MarginRow = {
     key: place.where === '' ? `${mode.mode}@${caseId}` : `${mode.mode}:${place.where}@${caseId}`,
     mode: mode.mode, modeLabel: mode.label, level: mode.level, caseId,
-    ...(place.wall === undefined ? {} : { wall: place.wall }),
     place: place.place, applied: set.applied[i] ?? 0, allowable: set.allowable[i] ?? 0, dimension: mode.dimension, unit: place.unit,
     loaded: rf !== null, rf, ms: rf === null ? null : rf - 1, governingOfMode: rf !== null && isTie(rf, leastOfMode), governing: false,
   }
+  if (place.wall !== undefined) row.wall = place.wall
+  return row
 }
 
 /** The least row of every mode, governing mode first. */

@@ -6,7 +6,7 @@
 import { z } from 'zod'
 import { choice, identifier, name, quantity } from '#shared/calc/parts/fields'
 
-export const MAX_WALLS = 60
+export const MAX_WALLS = 100
 
 const direction = quantity('Direction', 'angle', { description: 'From +x, counter-clockwise; of an arc, its tangent at the start.' })
 const x = quantity('x', 'length')

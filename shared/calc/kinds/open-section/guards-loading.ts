@@ -44,10 +44,10 @@ function endGuards(s: Solution): Guard[] {
 function fatigue(s: Solution): Guard[] {
   const notches = s.corners.flatMap(c => c.factor.ok ? [{ place: `node ${c.node}`, factor: c.factor.K }] : [])
   let worst: StressShare | null = null
-  for (const c of s.cases) {
-    for (const { wall } of s.walls) {
-      const Fsu = wall.material.Fsu
-      const share = Fsu === null ? 0 : Math.abs(c.tau.get(wall.id) ?? 0) * c.toLimit / Fsu
+  for (const { wall } of s.walls) {
+    const perRate = wall.material.Fsu === null ? 0 : (s.perRate.face.get(wall.id) ?? 0) / wall.material.Fsu
+    for (const c of s.cases) {
+      const share = perRate * Math.abs(c.rate) * c.toLimit
       if (share > (worst?.share ?? 0)) worst = { share, place: `wall ${wall.id}`, wall: wall.id, caseId: c.model.id }
     }
   }

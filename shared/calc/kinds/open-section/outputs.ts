@@ -65,6 +65,7 @@ function cornerOutputs(s: Solution): Output[] {
   return s.corners.flatMap(c => c.factor.ok ? output(`Kc:${c.node}`, `K_{c,${sub(c.node)}}`, `Corner factor, node ${c.node}`, c.factor.K, 'number', '', '§1.10') : [])
 }
 
+/** A case whose values by wall are not given keeps what a text or another calculation takes of it. */
 function caseOutputs(s: Solution, c: CaseSolution, u: ShownUnits): Output[] {
   const id = c.model.id
   const of = caseLabel(s.cases.length, c.model, SINGLE_CASE)
@@ -72,19 +73,23 @@ function caseOutputs(s: Solution, c: CaseSolution, u: ShownUnits): Output[] {
   const torque = c.model.torque?.unit ?? u.torque
   const on = (key: string, symbol: string, label: string, value: number | null, dimension: Dimension, unit: UnitId, method: string, more: Extra = {}) =>
     output(`${key}@${id}`, symbol, `${label}${of}`, value, dimension, unit, method, { ...extra, ...more })
-  return [
+  const brief = [
     ...on('T', 'T', 'Torque', c.torque, 'torque', torque, s.model.by === 'rate' ? '§6' : '§8', { primary: s.cases.length === 1 }),
     ...on('theta', '\\theta\'', 'Rate of twist', c.rate, 'rateOfTwist', u.rate, s.model.by === 'rate' ? '§6' : '§1.9', { primary: s.cases.length === 1 }),
+    ...on('twist_deg', '\\varphi', 'Twist over the length', c.twist, 'angle', '°', '§5.1', { primary: s.cases.length === 1 }),
+    ...on('tau_max', '\\tau_{max}', 'Largest face stress', c.tauMax, 'stress', u.stress, '§1.9'),
+    ...on('tau_corner', '\\tau_{c,max}', 'Largest corner stress', c.tauCorner, 'stress', u.stress, '§1.10'),
+  ]
+  if (!s.detailed.has(id)) return brief
+  return [
+    ...brief,
     ...on('theta_deg', '\\theta\'', 'Rate of twist', c.rate, 'rateOfTwist', u.rateDegrees, s.model.by === 'rate' ? '§6' : '§1.9'),
     ...on('twist', '\\varphi', 'Twist over the length', c.twist, 'angle', 'rad', '§5.1'),
-    ...on('twist_deg', '\\varphi', 'Twist over the length', c.twist, 'angle', '°', '§5.1', { primary: s.cases.length === 1 }),
     ...s.walls.flatMap(w => [
       ...on(`T:${w.wall.id}`, `T_{${sub(w.wall.id)}}`, `Torque in wall ${w.wall.id}`, c.torque * w.share, 'torque', torque, '§1.9', { wall: w.wall.id }),
       ...on(`tau:${w.wall.id}`, `\\tau_{${sub(w.wall.id)}}`, `Face stress, wall ${w.wall.id}`, c.tau.get(w.wall.id) ?? null, 'stress', u.stress, '§1.9', { wall: w.wall.id }),
     ]),
-    ...[...c.corner].flatMap(([node, tau]) => on(`tau_corner:${node}`, `\\tau_{${sub(node)}}`, `Corner stress, node ${node}`, tau, 'stress', u.stress, '§1.10')),
-    ...on('tau_max', '\\tau_{max}', 'Largest face stress', c.tauMax, 'stress', u.stress, '§1.9'),
-    ...on('tau_corner', '\\tau_{c,max}', 'Largest corner stress', c.tauCorner, 'stress', u.stress, '§1.10'),
+    ...c.corner.entries().flatMap(([node, tau]) => on(`tau_corner:${node}`, `\\tau_{${sub(node)}}`, `Corner stress, node ${node}`, tau, 'stress', u.stress, '§1.10')),
     ...wagnerOutputs(c.wagnerLimit, 'limit', '', on),
     ...wagnerOutputs(c.wagnerUltimate, 'ultimate', '_ultimate', on),
     ...[...c.knockdown].filter(([, k]) => k !== 1).flatMap(([material, k]) => on(`k:${material}`, 'k', `Knock-down on strength, ${material}`, k, 'number', '', '§7.2')),

@@ -4,10 +4,11 @@ import type { Solution } from '#shared/calc/kinds/open-section/solution'
 
 export function wallRows(s: Solution): WallRow[] {
   const least = leastBy(s, row => row.wall)
+  const cases = s.cases.filter(c => s.detailed.has(c.model.id))
   return s.walls.map(({ wall, J, share, slenderness }) => ({
     wall: wall.id, name: wall.name, length: wall.length, thickness: wall.t.value, G: wall.G, J, share, slenderness, material: wall.material.id,
-    torque: Object.fromEntries(s.cases.map(c => [c.model.id, c.torque * share])),
-    tau: Object.fromEntries(s.cases.map(c => [c.model.id, c.tau.get(wall.id) ?? 0])),
+    torque: Object.fromEntries(cases.map(c => [c.model.id, c.torque * share])),
+    tau: Object.fromEntries(cases.map(c => [c.model.id, c.tau.get(wall.id) ?? 0])),
     leastMargin: least.get(wall.id) ?? null,
   }))
 }

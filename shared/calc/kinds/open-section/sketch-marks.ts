@@ -12,6 +12,7 @@ export interface Room { pixel: number, centre: Pt, taken: Spot[] }
 export interface Spot { at: Pt, radius: number }
 
 const MOST_MARKED = 24
+const MOST_NAMED = 60
 const distance = (a: Pt, b: Pt) => Math.hypot(a[0] - b[0], a[1] - b[1])
 
 /** Distance of the nearest of these spots from any of the points, negative where one lies inside. */
@@ -125,19 +126,33 @@ export function thicknessNotes(s: Solution, room: Room): Shape[] {
   })
 }
 
+/** The spots that come within `reach` of the box around these points: of a long section all others are far off. */
+function nearby(points: readonly Pt[], spots: readonly Spot[], reach: number): Spot[] {
+  const [xs, ys] = [points.map(p => p[0]), points.map(p => p[1])]
+  const [left, right, low, high] = [Math.min(...xs), Math.max(...xs), Math.min(...ys), Math.max(...ys)]
+  return spots.filter(({ at: [x, y], radius }) => {
+    const far = radius + reach
+    return x > left - far && x < right + far && y > low - far && y < high + far
+  })
+}
+
 /** Names of the walls; the place with the most room of several is taken. */
 export function balloons(s: Solution, room: Room): Shape[] {
-  const lines = s.walls.flatMap(({ wall }) => [0, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 1].map(part => middleOf(s, wall, part)))
-  return s.walls.slice(0, 60).map(({ wall }): Shape => {
+  const lines = s.walls.flatMap(({ wall }) => [0, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 1].map((part): Spot => {
+    const m = middleOf(s, wall, part)
+    return { at: m.at, radius: m.half }
+  }))
+  // More room than this is no better.
+  const [air, own] = [8 * room.pixel, 9 * room.pixel]
+  return s.walls.slice(0, MOST_NAMED).map(({ wall }): Shape => {
     const candidates = [0.5, 0.68, 0.32].flatMap(part => ([1, -1] as const).flatMap(side => [26, 40].map((away) => {
       const m = middleOf(s, wall, part)
       const normal = m.direction + side * Math.PI / 2
       return { at: polar(polar(m.at, normal, m.half + away * room.pixel), m.direction, 6 * room.pixel), leaderTo: polar(m.at, normal, m.half) }
     })))
-    const free = (p: Pt) => Math.min(
-      ...room.taken.map(t => distance(p, t.at) - t.radius - 9 * room.pixel), ...lines.map(m => distance(p, m.at) - m.half - 9 * room.pixel),
-    )
-    const best = candidates.reduce((a, b) => Math.min(free(b.at), 8 * room.pixel) > Math.min(free(a.at), 8 * room.pixel) + 1e-9 ? b : a)
+    const near = nearby(candidates.map(one => one.at), [...room.taken, ...lines], air + own)
+    const judged = candidates.map(one => ({ ...one, free: Math.min(clearOf([one.at], near) - own, air) }))
+    const best = judged.reduce((a, b) => b.free > a.free + 1e-9 ? b : a)
     room.taken.push({ at: best.at, radius: 10 * room.pixel })
     return { type: 'balloon', at: best.at, text: wall.id, leaderTo: best.leaderTo }
   })

@@ -1,6 +1,7 @@
 /** The solved section, in N, mm, MPa, rad: what margins, guards, outputs, working and sketch all read. */
 import type { MarginRow } from '#shared/calc/types'
 import type { CaseModel } from '#shared/calc/parts/model'
+import type { PlaceValues } from '#shared/calc/parts/place-values'
 import type { ModelJunction, ModelWall } from '#shared/calc/parts/wall-model'
 import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 
@@ -66,8 +67,8 @@ export interface CaseSolution {
   /** What the given load is multiplied by to reach limit and ultimate. */
   toLimit: number
   toUltimate: number
-  tau: Map<string, number>
-  corner: Map<string, number>
+  tau: PlaceValues
+  corner: PlaceValues
   /** Worst face stress with its wall, and worst stress with corners and its node. */
   tauMax: number
   tauMaxWall: string
@@ -101,6 +102,10 @@ export interface Solution {
   /** kL of the bar, where its length and the moduli are known. */
   kL: number | null
   cases: CaseSolution[]
+  /** Stress per rate of twist, MPa·mm: at the worse face of every wall, and at every corner that has a factor. */
+  perRate: { face: ReadonlyMap<string, number>, corner: ReadonlyMap<string, number> }
+  /** Ids of the cases whose values by wall and corner are given: all, or where they are too many the decisive ones. */
+  detailed: ReadonlySet<string>
   margins: MarginRow[]
   governing: MarginRow | null
 }

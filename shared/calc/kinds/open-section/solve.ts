@@ -4,14 +4,18 @@ import { marginRows } from '#shared/calc/kinds/open-section/margins'
 import type { CaseModel } from '#shared/calc/parts/model'
 import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 import { cornersOf } from '#shared/calc/kinds/open-section/solve-corners'
+import { leastOfModes } from '#shared/calc/parts/margin-rows'
+import { largestPlace, MOST_VALUES, scaledValues } from '#shared/calc/parts/place-values'
 import { knockdownOf, levelsOf, type Levels } from '#shared/calc/parts/strength'
 import type { CaseSolution, CornerSolution, Sectorial, Solution, WagnerState, WallSolution } from '#shared/calc/kinds/open-section/solution'
 import { stripFactor } from '#shared/torsion/bend-factor'
 import { torsionOfOpenSection, type OpenSection, type OpenTorsion } from '#shared/torsion/open-section'
-import { respondToRate, respondToTorque, type SectionResponse } from '#shared/torsion/response'
+import { respondToRate, respondToTorque } from '#shared/torsion/response'
+import type { Refusal } from '#shared/torsion/section'
 import { checkSection } from '#shared/torsion/section-check'
 import { sectorialProperties, type SectorialProperties } from '#shared/torsion/sectorial'
 import { wagner } from '#shared/torsion/wagner'
+import { faceStress } from '#shared/torsion/wall-stiffness'
 
 export type Solved = { ok: true, solution: Solution } | { ok: false, faults: Fault[] }
 
@@ -24,18 +28,49 @@ export function solveOpenSection(model: OpenSectionModel): Solved {
   const properties = sectorialProperties(section)
   const sectorial = properties.ok ? toSectorial(properties) : null
   const G = model.walls.every(w => w.G === model.walls[0]?.G) ? model.walls[0]?.G ?? null : null
-  const loads = model.cases.map(c => ({ c, response: responseOf(c, torsion), levels: levelsOf(model.factors, c.level) }))
+  const perRate = stressPerRate(torsion, walls, corners)
+  const worst = { face: largestPlace(perRate.face) ?? ['', 0], corner: largestPlace(perRate.corner) } as const
+  const levels = { limit: levelsOf(model.factors, 'limit'), ultimate: levelsOf(model.factors, 'ultimate') }
+  const knockdowns = knockdownByTemperature(model)
+  const loads = model.cases.map(c => ({ c, response: responseOf(c, torsion), levels: levels[c.level] }))
   const refused = loads.flatMap(({ response, levels }, i) => [response, levels].flatMap(one => one.ok ? [] : [{ path: `cases.${i}`, message: one.reason }]))
   if (refused.length > 0) return { ok: false, faults: refused }
+  const p = properties.ok ? properties : null
   const cases = loads.flatMap(({ c, response, levels }) =>
-    response.ok && levels.ok ? [solveCase(model, c, response, levels, torsion, walls, corners, properties.ok ? properties : null)] : [])
+    response.ok && levels.ok ? [solveCase({ model, torsion, perRate, worst, p }, c, response, levels, knockdowns(c.temperature?.value))] : [])
   const base = {
-    model, G, GJ: torsion.GJ, walls, corners, sectorial, cases,
+    model, G, GJ: torsion.GJ, walls, corners, sectorial, cases, perRate,
     J: sum(walls.map(w => w.J)), Jplain: sum(walls.map(w => w.Jplain)),
-    ...corrections(model, torsion), developed: torsion.developed, kL: decay(model, torsion, sectorial, properties.ok ? properties.referenceE : null),
+    ...corrections(model, torsion), developed: torsion.developed, kL: decay(model, torsion, sectorial, p?.referenceE ?? null),
   }
   const { rows, governing } = marginRows(base)
-  return { ok: true, solution: { ...base, margins: rows, governing } }
+  return { ok: true, solution: { ...base, margins: rows, governing, detailed: detailedCases(cases, walls.length + perRate.corner.size, rows, governing) } }
+}
+
+/** Per rate of twist: the response is linear, so that every case is a multiple of this. */
+function stressPerRate(torsion: OpenTorsion, walls: WallSolution[], corners: CornerSolution[]): Solution['perRate'] {
+  const flat = new Map(torsion.perWall.map(({ id, t, G }) => [id, faceStress(G, t, 1)]))
+  return {
+    face: new Map(walls.map(w => [w.wall.id, (flat.get(w.wall.id) ?? 0) * w.faceFactor])),
+    corner: new Map(corners.flatMap(k => k.factor.ok ? [[k.node, k.factor.K * (flat.get(k.worst.id) ?? 0)] as const] : [])),
+  }
+}
+
+/** Cases come at few temperatures; each is looked up once. */
+function knockdownByTemperature(model: OpenSectionModel): (temperature: number | undefined) => Map<string, number> {
+  const known = new Map<number | undefined, Map<string, number>>()
+  return (temperature) => {
+    const held = known.get(temperature) ?? new Map(model.materials.map(m => [m.id, knockdownOf(m, temperature)]))
+    known.set(temperature, held)
+    return held
+  }
+}
+
+/** All cases, or where values by place and case would be too many those of the least margins and of the largest stress. */
+function detailedCases(cases: CaseSolution[], places: number, rows: Solution['margins'], governing: Solution['governing']): ReadonlySet<string> {
+  if (cases.length * places <= MOST_VALUES) return new Set(cases.map(c => c.model.id))
+  const highest = cases.reduce((top, c) => c.tauMax > top.tauMax ? c : top)
+  return new Set([...(governing ? [governing.caseId] : []), ...leastOfModes(rows).map(row => row.caseId), highest.model.id])
 }
 
 const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0)
@@ -115,31 +150,27 @@ function decay(model: OpenSectionModel, torsion: OpenTorsion, sectorial: Sectori
   return Number.isFinite(kL) ? kL : null
 }
 
-/** A part that follows the structure has its rate of twist given, any other its torque. */
-const responseOf = (c: CaseModel, torsion: OpenTorsion) =>
-  c.rate ? respondToRate(torsion, c.rate.value) : respondToTorque(torsion, c.torque?.value ?? 0)
+interface CaseResponse { ok: true, torque: number, rate: number }
 
-function solveCase(model: OpenSectionModel, c: CaseModel, response: SectionResponse, { toLimit, toUltimate }: Levels, torsion: OpenTorsion, walls: WallSolution[], corners: CornerSolution[], p: SectorialProperties | null): CaseSolution {
-  const { rate, torque } = response
-  const flat = new Map(response.perWall.map(w => [w.id, w.tau]))
-  const tau = new Map(walls.map(w => [w.wall.id, (flat.get(w.wall.id) ?? 0) * w.faceFactor]))
-  const corner = new Map(corners.flatMap(k => k.factor.ok ? [[k.node, k.factor.K * (flat.get(k.worst.id) ?? 0)] as const] : []))
-  const [tauMaxWall, tauMax] = largest(tau) ?? ['', 0]
-  const worstCorner = largest(corner)
-  return {
-    model: c, torque, rate, twist: model.length ? rate * model.length.value : null, toLimit, toUltimate,
-    tau, corner, tauMax, tauMaxWall, tauCorner: worstCorner?.[1] ?? null, tauCornerNode: worstCorner?.[0] ?? null,
-    knockdown: new Map(model.materials.map(m => [m.id, knockdownOf(m, c.temperature?.value)])),
-    wagnerLimit: wagnerAt(torsion, p, rate * toLimit), wagnerUltimate: wagnerAt(torsion, p, rate * toUltimate),
-  }
+/** A part that follows the structure has its rate of twist given, any other its torque. What the engine refuses is asked of it, so that it says why. */
+function responseOf(c: CaseModel, torsion: OpenTorsion): CaseResponse | Refusal {
+  const torque = c.rate ? c.rate.value * torsion.GJ : c.torque?.value ?? 0
+  const rate = c.rate ? c.rate.value : torque / torsion.GJ
+  const peak = Math.abs(rate) * torsion.perWall.reduce((most, { G, t }) => Math.max(most, G * t), 0)
+  if (Number.isFinite(torque) && Number.isFinite(rate) && Number.isFinite(peak)) return { ok: true, torque, rate }
+  return c.rate ? respondToRate(torsion, c.rate.value) : respondToTorque(torsion, torque)
 }
 
-function largest(values: Map<string, number>): [string, number] | null {
-  let best: [string, number] | null = null
-  for (const [key, value] of values) {
-    if (best === null || value > best[1]) best = [key, value]
+interface Section { model: OpenSectionModel, torsion: OpenTorsion, perRate: Solution['perRate'], worst: { face: readonly [string, number], corner: readonly [string, number] | null }, p: SectorialProperties | null }
+
+function solveCase({ model, torsion, perRate, worst, p }: Section, c: CaseModel, { torque, rate }: CaseResponse, { toLimit, toUltimate }: Levels, knockdown: Map<string, number>): CaseSolution {
+  const by = Math.abs(rate)
+  return {
+    model: c, torque, rate, twist: model.length ? rate * model.length.value : null, toLimit, toUltimate,
+    tau: scaledValues(perRate.face, by), corner: scaledValues(perRate.corner, by), tauMax: worst.face[1] * by, tauMaxWall: worst.face[0],
+    tauCorner: worst.corner ? worst.corner[1] * by : null, tauCornerNode: worst.corner?.[0] ?? null, knockdown,
+    wagnerLimit: wagnerAt(torsion, p, rate * toLimit), wagnerUltimate: wagnerAt(torsion, p, rate * toUltimate),
   }
-  return best
 }
 
 function wagnerAt(torsion: OpenTorsion, p: SectorialProperties | null, rate: number): WagnerState | null {
