@@ -4,6 +4,7 @@ import { loadCases } from '#shared/calc/kinds/load-cases/kind'
 import { material } from '#shared/calc/kinds/material/kind'
 import { openSection } from '#shared/calc/kinds/open-section/kind'
 import { noLinks, type Links } from '#shared/calc/links'
+import { solidBar } from '#shared/calc/kinds/solid-bar/kind'
 import type { CalcKind, Evaluation } from '#shared/calc/types'
 
 /** Changes whenever any kind may give another number than before. */
@@ -32,7 +33,7 @@ export function makeRegistry(kinds: AnyKind[]): Registry {
   }
 }
 
-const registry = makeRegistry([openSection, generalOutline, material, loadCases])
+const registry = makeRegistry([openSection, generalOutline, solidBar, material, loadCases])
 
 /** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
 export const calcKind = (name: string): AnyKind => registry.kind(name)
