@@ -48,7 +48,11 @@ function linkedCases(table: string, quantity: string, read: TypedReader): CaseMo
   })
 }
 
-const measured = (value: number, dimension: Dimension): Measured => ({ value, unit: engineUnit(dimension), typed: showValue(value, dimension, engineUnit(dimension)) })
+/** What would have been typed is written only where it is asked for: of a thousand cases for a few. */
+const measured = (value: number, dimension: Dimension): Measured => {
+  const unit = engineUnit(dimension)
+  return { value, unit, get typed() { return showValue(value, dimension, unit) } }
+}
 
 const SPECIALS = ['fitting', 'casting', 'bearing'] as const
 

@@ -127,7 +127,7 @@ export function thicknessNotes(s: Solution, room: Room): Shape[] {
 }
 
 /** The spots that come within `reach` of the box around these points: of a long section all others are far off. */
-function nearby(points: readonly Pt[], spots: readonly Spot[], reach: number): Spot[] {
+export function nearby(points: readonly Pt[], spots: readonly Spot[], reach: number): Spot[] {
   const [xs, ys] = [points.map(p => p[0]), points.map(p => p[1])]
   const [left, right, low, high] = [Math.min(...xs), Math.max(...xs), Math.min(...ys), Math.max(...ys)]
   return spots.filter(({ at: [x, y], radius }) => {

@@ -1,7 +1,7 @@
 /** The highest stress of the case shown: where it is, and a place for its flag that hides nothing. */
 import type { Shape } from '#shared/calc/types'
 import { shownUnits } from '#shared/calc/parts/shown-units'
-import { clearOf, middleOf, outerSide, wallSpots, type Room, type Spot } from '#shared/calc/kinds/open-section/sketch-marks'
+import { clearOf, middleOf, nearby, outerSide, wallSpots, type Room, type Spot } from '#shared/calc/kinds/open-section/sketch-marks'
 import { leavingDirection, polar, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
 import type { CaseSolution, CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'
 import { significant } from '#shared/units/display'
@@ -39,8 +39,10 @@ interface Flag { knee: Pt, end: Pt, leaderFrom: Pt, cost: number }
 /** Of many places round the peak, the nearest whose leader and lettering are clear of walls and marks. */
 function peakAt(s: Solution, at: Pt, away: Pt, text: string, room: Room): Shape {
   const p = room.pixel
-  const walls = wallSpots(s, room, 1)
-  const hidden = [...wallSpots(s, room, ARROWS), ...room.taken]
+  const places = flagPlaces(at, Math.atan2(away[1], away[0]), text, p)
+  const around = places.flatMap(({ knee, end }) => [knee, end])
+  const walls = nearby(around, wallSpots(s, room, 1), 0)
+  const hidden = nearby(around, [...wallSpots(s, room, ARROWS), ...room.taken], (LINE_RADIUS + CLEAR + 5) * p)
   const hides = ({ knee, end, leaderFrom }: Flag) => {
     const lettering = clearOf(along(knee, end, 8 * p).map(([x, y]): Pt => [x, y + 5 * p]), hidden) / p - LINE_RADIUS
     // The leader starts on a wall and may pass through marks, but through a wall only if nothing else serves.
@@ -48,7 +50,7 @@ function peakAt(s: Solution, at: Pt, away: Pt, text: string, room: Room): Shape 
     return CLEAR - Math.min(lettering, leader, CLEAR)
   }
   let [best, least]: [Flag | undefined, number] = [undefined, Infinity]
-  for (const flag of flagPlaces(at, Math.atan2(away[1], away[0]), text, p)) {
+  for (const flag of places) {
     // The places come in order of their cost where they hide nothing: none that follows can be better.
     if (flag.cost >= least) break
     const cost = flag.cost + hides(flag)
