@@ -22,7 +22,10 @@ export const GUARDS = {
   'G-16': entry('Ends not free to warp', 'stop', 'Give the warping solution of this bar, or show that the ends are free to warp.', 'Vlasov; §3', true),
   'G-17': entry('Restrained end of a long bar', 'information', 'The warping stress at the restrained end is to be reported.', '§3.6'),
   'G-18': entry('Free warping at a support', 'caution', 'Write why warping is free although the support holds the section.', practice),
+  'G-19': entry('Step in a warping bar', 'caution', 'Bound the result: run it with the warping continuous and with it free at the step.', '§3.5'),
   'G-20': entry('Closed section held at high stress', 'caution', 'Address the axial stress at the root of the closed section.', '§3.8'),
+  'G-21': entry('Torque shared by supports', 'caution', 'State the stiffness of each support, its bounds, and that no clearance delays one of them.', '§5.2'),
+  'G-22': entry('Load not referred to the shear centre', 'stop', 'Take the torque about the shear centre.', '§5.3'),
   'G-23': entry('Material without basis or source', 'stop', 'Refer to controlled data: specification, basis, source and edition.', '25.613'),
   'G-24': entry('B basis on a single load path', 'stop', 'Use A-basis values, or show that the load path is redundant.', '25.613'),
   'G-25': entry('S basis used', 'caution', 'Name the acceptance of specification minima by the project.', 'practice of material data handbooks'),
@@ -41,6 +44,8 @@ export const GUARDS = {
   'G-38': entry('Taper', 'caution', 'Give a local solution, or write why the taper does not matter.', practice),
   'G-39': entry('Short bar', 'caution', 'Write why the ends of so short a bar do not matter.', 'Saint-Venant'),
   'G-40': entry('Cut-out in the length', 'caution', 'Give a local factor with its source.', practice),
+  'G-41': entry('Torque with axial compression', 'caution', 'Give the result with the stiffness reduced by the compression.', '§7.7'),
+  'G-42': entry('Stiffness of the part that follows', 'caution', 'Solve part and structure together, or show that the structure’s twist was found with the part.', '§6'),
   'G-44': entry('Unusual size', 'information', 'Confirm the number and its unit.', practice),
 } satisfies Record<string, GuardEntry>
 
