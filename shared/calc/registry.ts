@@ -5,6 +5,7 @@ import { material } from '#shared/calc/kinds/material/kind'
 import { openSection } from '#shared/calc/kinds/open-section/kind'
 import { noLinks, type Links } from '#shared/calc/links'
 import { solidBar } from '#shared/calc/kinds/solid-bar/kind'
+import { torqueAlongBar } from '#shared/calc/kinds/torque-along-bar/kind'
 import { torqueFromLoads } from '#shared/calc/kinds/torque-from-loads/kind'
 import type { CalcKind, Evaluation } from '#shared/calc/types'
 
@@ -34,7 +35,7 @@ export function makeRegistry(kinds: AnyKind[]): Registry {
   }
 }
 
-const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, material, loadCases])
+const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, material, loadCases])
 
 /** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
 export const calcKind = (name: string): AnyKind => registry.kind(name)

@@ -5,6 +5,7 @@
 import { boredPlateInputs, keyedShaftInputs, sharpBracketInputs, thickAngleInputs } from './general-outline'
 import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, sheet2024, sheet6061, stripInputs } from './open-section'
 import { loadCasesInputs, materialInputs } from './records'
+import { inchShaftInputs, sharedShaftInputs, steppedShaftInputs } from './torque-along-bar'
 import { inchLoadsInputs, webLoadInputs } from './torque-from-loads'
 import { flatShaftInputs, inchBarInputs, solidBarInputs, solidBarShapes } from './solid-bar'
 
@@ -16,6 +17,7 @@ export const calcSamples: Record<string, Samples> = {
   'general-outline': { 'thick angle': thickAngleInputs, 'sharp bracket': sharpBracketInputs, 'keyed shaft in inches': keyedShaftInputs, 'bored plate': boredPlateInputs },
   'solid-bar': { 'round bar': () => solidBarInputs(), 'flat shaft': flatShaftInputs, 'bar in inches': inchBarInputs, ...Object.fromEntries(Object.keys(solidBarShapes()).map(name => [name, () => solidBarShapes()[name]])) },
   'torque-from-loads': { 'load in a web': webLoadInputs, 'loads in inches': inchLoadsInputs },
+  'torque-along-bar': { 'stepped shaft': steppedShaftInputs, 'shared shaft': sharedShaftInputs, 'shaft in inches': inchShaftInputs },
   'material': { 'sheet': materialInputs, 'sheet with knock-down': sheet2024, 'another sheet': sheet6061 },
   'load-cases': { 'torques and forces': loadCasesInputs },
 }
