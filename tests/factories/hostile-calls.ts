@@ -1,7 +1,7 @@
 /** One sound call of every public front of the engine, for tests that put hostile numbers into it. */
 import type { Engine } from '../reference/engine'
 import { rectangle } from '../reference/outlines'
-import { bentAngle, channel, machinedAngle, openArc } from '../reference/sections'
+import { bentAngle, channel, graph, machinedAngle, openArc } from '../reference/sections'
 
 export interface HostileCall {
   readonly name: keyof Engine
@@ -10,6 +10,8 @@ export interface HostileCall {
   readonly give: (engine: Engine) => unknown[]
   /** Arguments that hostile numbers go into; the others are results of the engine. All, where absent. */
   readonly hostile?: readonly number[]
+  /** Asks what the front gave instead of the front itself. */
+  readonly ask?: (engine: Engine, given: readonly never[]) => unknown
   /** Takes long: fewer numbers are tried. */
   readonly slow?: true
 }
@@ -21,7 +23,46 @@ const solids = [
   { shape: 'semicircle', radius: 20 }, { shape: 'segment', radius: 12, depth: 2.4 }, { shape: 'hexagon', flats: 24 },
 ]
 
+const box = graph([[0, 0], [100, 0], [100, 60], [0, 60], [50, 0]], [{ from: 0, to: 4, t: 2 }, { from: 4, to: 1, t: 2 }, { from: 1, to: 2, t: 3 }, { from: 2, to: 3, t: 2 }, { from: 3, to: 0, t: 1.5 }])
+const boxed = (engine: Engine) => engine.torsionOfCells(box)
+const members = [{ length: 300, GJ: 7e7, EG: 1.3e13 }, { length: 900, GJ: 6e7, EG: 1.1e13 }]
+const held = [{ node: 0, twist: 'fixed', warping: 'fixed' }, { node: 2, twist: 1e9, warping: 1e12 }] as const
+const segments = [{ length: 400, stiffness: { along: 'uniform', GJ: 6e9 } }, { length: 300, stiffness: { along: 'linear', GJ1: 4e9, GJ2: 2e9 } }, { length: 200, stiffness: { along: 'tapering circle', G: 79_000, d1: 30, d2: 26 } }] as const
+const flatPanel = { length: 200, width: 120, t: 1.2, E: 71_000, nu: 0.33, edges: { long: 'supported', short: 'supported' }, radius: null }
+const following = { GJ: 7e7, shearPerRate: 80_700, warping: { EG: 1.3e13, E: 71_000, omega: 1238 } }
+
 export const hostileCalls: readonly HostileCall[] = [
+  { name: 'torsionOfCells', give: () => [box] },
+  { name: 'respondOfCells', give: engine => [boxed(engine), 5e6], hostile: [1] },
+  { name: 'respondOfCellsToRate', give: engine => [boxed(engine), 1e-5], hostile: [1] },
+  { name: 'cellCornerFactor', what: 'machined', give: () => [0.5, 1, 'machined'] },
+  { name: 'cellCornerFactor', what: 'bent', give: () => [3, 1.5, 'bent'] },
+  { name: 'shearFlow', what: 'open', give: () => [channel] },
+  { name: 'shearFlow', what: 'closed', give: () => [box] },
+  { name: 'warpingBar', give: () => [members, held] },
+  {
+    name: 'warpingBar', what: 'a case', give: () => [{ torques: [{ node: 1, T: 6000 }], distributed: [{ member: 1, m: 12, m1: 12, m2: 8 }], bimoments: [{ node: 2, B: 1e6 }] }],
+    ask: (engine, [load]) => {
+      const bar = engine.warpingBar(members, held)
+      return bar.ok ? bar.respond(load as never) : bar
+    },
+  },
+  { name: 'sectorialRun', give: () => [channel] },
+  { name: 'spanBar', give: () => [segments, [{ node: 0, stiffness: 'rigid' }, { node: 2, stiffness: 1e9 }]] },
+  {
+    name: 'spanBar', what: 'a case', give: () => [{ torques: [{ node: 1, T: 120_000 }], distributed: [{ segment: 1, m1: 12, m2: 8 }] }],
+    ask: (engine, [load]) => {
+      const bar = engine.spanBar(segments, [{ node: 0, stiffness: 'rigid' }, { node: 2, stiffness: 1e9 }])
+      return bar.ok ? bar.respond(load as never) : bar
+    },
+  },
+  ...(['circleRule', 'compressionWithShear', 'bendingWithShear'] as const).map((name): HostileCall => ({ name, give: () => [0.6, 0.5] })),
+  ...(['powerRule', 'varyingOnly'] as const).map((name): HostileCall => ({ name, give: () => [0.6, 0.5, 1, 2] })),
+  { name: 'followTwist', give: () => [following, { rate: 4e-5, gradient: 1e-8, offset: 15, fibre: 40, E: 71_000 }] },
+  { name: 'shareTwist', give: () => [7e7, 9e9] },
+  { name: 'panelBuckling', what: 'flat', give: () => [flatPanel] },
+  { name: 'panelBuckling', what: 'curved', give: () => [{ ...flatPanel, radius: 500 }] },
+  { name: 'cylinderBuckling', give: () => [{ radius: 40, t: 1, length: 300, E: 71_000, nu: 0.33 }] },
   ...[channel, machinedAngle, bentAngle, openArc].map((section, i): HostileCall => ({ name: 'torsionOfOpenSection', what: `section ${i + 1}`, give: () => [section] })),
   ...[channel, openArc].map((section, i): HostileCall => ({ name: 'sectorialProperties', what: `section ${i + 1}`, give: () => [section] })),
   { name: 'respondToTorque', give: engine => [opened(engine), 10_000], hostile: [1] },
@@ -48,7 +89,8 @@ export const notFronts: Readonly<Record<string, readonly string[]>> = {
   ],
   'a bare formula behind a front': [
     'endLossOf', 'faceStress', 'wallStiffness', 'cornersOnMidLine', 'bulgeOfL', 'bulgeOfT', 'stripAsWagner', 'stripIn', 'stripRateLimit', 'bareReserve', 'passes', 'specialFactor', 'shearAllowables',
-    'shearYieldFromTension', 'respondOfSolid', 'loopCorners', 'windingNumber', 'reentrantVertices',
+    'shearYieldFromTension', 'respondOfSolid', 'isFin', 'cellMatrix', 'closedBendFactor', 'areaMoments', 'vonMises', 'plateStress', 'panelCoefficient', 'fittedCoefficient', 'cappedAtYield',
+    'loopCorners', 'windingNumber', 'reentrantVertices',
   ],
-  'a choice or judgement among results': ['envelope', 'governingRows', 'estimateFromMeshes', 'judgeConvergence', 'judgeAgreement'],
+  'a choice, sum or judgement among results': ['chiThatCounts', 'superpose', 'torqueAbout', 'fibreStresses', 'worstStresses', 'atOneFibre', 'envelope', 'governingRows', 'estimateFromMeshes', 'judgeConvergence', 'judgeAgreement'],
 }

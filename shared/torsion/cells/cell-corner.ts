@@ -1,4 +1,5 @@
 /** Peak stress at an inside corner of a closed cell over the mean stress q/t at the same torque (methods §2.3). */
+import { finiteOrRefused } from '#shared/torsion/finite'
 import { closedMachinedTable } from '#shared/torsion/cells/published'
 import { refusal, type Refusal } from '#shared/torsion/section'
 
@@ -15,7 +16,7 @@ export const closedBendFactor = (ri: number, t: number): number => (t / ri) / Ma
 export function cellCornerFactor(radius: number, t: number, make: 'machined' | 'bent'): CellCorner | Refusal {
   if (!(Number.isFinite(radius) && radius > 0)) return refusal('A sharp inside corner has no finite stress. Give the inside radius of the drawing.')
   if (!(Number.isFinite(t) && t > 0)) return refusal('The thickness must be greater than zero.')
-  if (make === 'bent') return { ok: true, K: closedBendFactor(radius, t), source: 'closed form of a long concentric bend' }
+  if (make === 'bent') return finiteOrRefused({ ok: true as const, K: closedBendFactor(radius, t), source: 'closed form of a long concentric bend' })
   const x = radius / t
   const above = closedMachinedTable.findIndex(([at]) => at >= x * (1 - 1e-12))
   const [upper, lower] = [closedMachinedTable[above], closedMachinedTable[above - 1]]

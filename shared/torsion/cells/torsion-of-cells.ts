@@ -2,6 +2,7 @@
  * Torsion of closed sections: one cell or many with shared walls, differing shear moduli, and fins
  * (Bredt–Batho; methods §2.1, §2.2). Thin walls, free warping, contour held in shape. N, mm, MPa, rad.
  */
+import { finiteOrRefused } from '#shared/torsion/finite'
 import { conditionOf, factorise, solveFactorised } from '#shared/torsion/cholesky'
 import { circularFacePart, worstCondition } from '#shared/torsion/cells/published'
 import { wallGraph, type GraphWall, type WallGraph, type WallSection } from '#shared/torsion/cells/wall-graph'
@@ -62,7 +63,7 @@ export function torsionOfCells(section: WallSection): CellTorsion | Refusal {
   const condition = factor.ok ? conditionOf(system, factor) : Infinity
   if (!factor.ok || !(condition <= worstCondition)) return refusal('The cells differ too much in stiffness to be solved together. Check thicknesses and moduli, or join the cells.')
   const flows = solveFactorised(factor, Float64Array.from(graph.cells, cell => 2 * cell.area))
-  return assemble(graph, flows, Gref, condition)
+  return finiteOrRefused(assemble(graph, flows, Gref, condition))
 }
 
 export const isFin = ({ left, right }: Pick<GraphWall, 'left' | 'right'>): boolean => left === right
@@ -152,7 +153,7 @@ export function respondOfCellsToRate(torsion: CellTorsion, rate: number): CellRe
   return atRate(torsion, rate, rate * torsion.GJ)
 }
 
-function atRate({ walls, Gref }: CellTorsion, rate: number, torque: number): CellResponse {
+function atRate({ walls, Gref }: CellTorsion, rate: number, torque: number): CellResponse | Refusal {
   const [q, mean, face] = [new Float64Array(walls.length), new Float64Array(walls.length), new Float64Array(walls.length)]
   let [tauMax, tauMaxWall] = [-1, '']
   walls.forEach((wall, i) => {
@@ -162,5 +163,7 @@ function atRate({ walls, Gref }: CellTorsion, rate: number, torque: number): Cel
     face[i] = tau
     if (tau > tauMax) [tauMax, tauMaxWall] = [tau, wall.id]
   })
+  // The mean is part of the face stress, so that this one is the largest number of all.
+  if (![torque, rate, tauMax, ...q].every(Number.isFinite)) return refusal('The load is too large to compute with. Check its unit.')
   return { ok: true, torque, rate, q, mean, face, tauMax: Math.max(tauMax, 0), tauMaxWall }
 }

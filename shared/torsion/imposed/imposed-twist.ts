@@ -1,4 +1,5 @@
 /** A part that follows the twist of its structure: rate of twist is given, torque and stress are results (methods §6). N, mm, MPa, rad. */
+import { finiteOrRefused } from '#shared/torsion/finite'
 import { refusal, type Refusal } from '#shared/torsion/section'
 
 /** The part as its section was solved: stress per torque is the shape's own, open walls take G t θ′. */
@@ -38,11 +39,11 @@ export function followTwist(part: FollowingPart, { rate, gradient, offset, fibre
   if (![rate, gradient, offset, fibre].every(Number.isFinite)) return refusal('Rate of twist, its change, offset and fibre must be finite numbers.')
   if (!(Number.isFinite(part.GJ) && part.GJ > 0)) return refusal('The part needs a torsional stiffness greater than zero.')
   const curvature = offset * gradient
-  return {
-    ok: true, torque: part.GJ * rate, tau: part.shearPerRate * Math.abs(rate),
+  return finiteOrRefused({
+    ok: true as const, torque: part.GJ * rate, tau: part.shearPerRate * Math.abs(rate),
     bimoment: part.warping ? -part.warping.EG * gradient : 0, sigmaWarping: part.warping ? -part.warping.E * part.warping.omega * gradient : 0,
     curvature, sigmaBending: E * curvature * fibre,
-  }
+  })
 }
 
 export interface SharedTwist { readonly ok: true, /** GJ of the part over that of the structure. */ readonly ratio: number, /** Torque carried by the part when both are turned together by the given torque. */ readonly share: number, /** Factor on the rate of twist found without the part. */ readonly reduction: number }
@@ -50,5 +51,5 @@ export interface SharedTwist { readonly ok: true, /** GJ of the part over that o
 /** Part and structure turned together: torques as their GJ, and the structure's own twist lessened by what the part takes (G-42). */
 export function shareTwist(partGJ: number, structureGJ: number): SharedTwist | Refusal {
   if (!(Number.isFinite(partGJ) && partGJ >= 0 && Number.isFinite(structureGJ) && structureGJ > 0)) return refusal('The torsional stiffness of the structure must be greater than zero.')
-  return { ok: true, ratio: partGJ / structureGJ, share: partGJ / (partGJ + structureGJ), reduction: structureGJ / (partGJ + structureGJ) }
+  return finiteOrRefused({ ok: true as const, ratio: partGJ / structureGJ, share: partGJ / (partGJ + structureGJ), reduction: structureGJ / (partGJ + structureGJ) })
 }

@@ -2,6 +2,7 @@
  * Torque and twist along a bar of stepped and tapering segments, with point and distributed torques and any
  * number of rigid or flexible supports (methods §5.1, §5.2). Free warping. N, mm, rad.
  */
+import { finiteOrRefused } from '#shared/torsion/finite'
 import { factorise, solveFactorised, type Factorised } from '#shared/torsion/cholesky'
 import { refusal, type Refusal } from '#shared/torsion/section'
 import { flexibility, flexibilityIntegral, stiffnessAt, type Segment } from '#shared/torsion/span/segment'
@@ -130,7 +131,7 @@ function respond(solver: Solver, load: SpanCase): SpanResponse | Refusal {
     const one = m[e] ?? { m1: 0, m2: 0, drop: 0 }
     return { phi: phi[e] ?? 0, T: (stiff[e] ?? 0) * ((phi[e + 1] ?? 0) - (phi[e] ?? 0) + one.drop), m1: one.m1, m2: one.m2 }
   })
-  return { nodes: zs.map((z, i) => ({ z, phi: phi[i] ?? 0 })), segments: ends, ...balance(solver, load, ends, phi) }
+  return finiteOrRefused({ nodes: zs.map((z, i) => ({ z, phi: phi[i] ?? 0 })), segments: ends, ...balance(solver, load, ends, phi) })
 
   function balance({ segments: list }: Solver, { torques }: SpanCase, run: readonly SpanEnds[], turned: Float64Array): Pick<SpanResponse, 'reactions' | 'residual'> {
     const applied = (node: number) => torques.reduce((sum, one) => (one.node === node ? sum + one.T : sum), 0)

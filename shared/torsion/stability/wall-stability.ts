@@ -2,6 +2,7 @@
  * Shear buckling of flat and curved walls and of cylinders in torsion (methods §2.5, §2.6). Elastic, thin,
  * perfect but for the knock-down stated. mm, MPa.
  */
+import { finiteOrRefused } from '#shared/torsion/finite'
 import { refusal, type Refusal } from '#shared/torsion/section'
 import { cylinder, fits, flatBelow, longestPlate, longStrip } from '#shared/torsion/stability/published'
 import { shearBucklingCoefficient, type PlateEdges } from '#shared/torsion/stability/ritz'
@@ -63,10 +64,10 @@ export function panelBuckling(panel: Panel): Buckling | Refusal {
   const ks = panelCoefficient(ratio, edges)
   const Z = radius === null ? null : b ** 2 / (radius * t) * Math.sqrt(1 - nu ** 2)
   if (!positive(ks)) return refusal('The buckling coefficient could not be found for this panel. Check its sides.')
-  return {
-    ok: true, ks, fit: fittedCoefficient(ratio, edges), ratio, Z, tau: ks * plateStress(E, nu, t, b),
+  return finiteOrRefused({
+    ok: true as const, ks, fit: fittedCoefficient(ratio, edges), ratio, Z, tau: ks * plateStress(E, nu, t, b),
     caution: Z !== null && Z >= flatBelow ? 'The panel is curved: its flat value is a lower estimate for a perfect panel, and imperfections count. Give a coefficient with its source.' : null,
-  }
+  })
 }
 
 export interface Cylinder { readonly radius: number, readonly t: number, readonly length: number, readonly E: number, readonly nu: number }
@@ -82,12 +83,12 @@ export function cylinderBuckling({ radius, t, length, E, nu }: Cylinder): Buckli
   const ks = cylinder.c * cylinder.knockdown * Z ** cylinder.power
   if (gammaZ > most) {
     const tau = cylinder.knockdown * E / (3 * Math.SQRT2 * (1 - nu ** 2) ** 0.75) * (t / radius) ** 1.5
-    return { ok: true, tau, ks, fit: null, ratio: length / radius, Z, caution: `γZ = ${gammaZ.toPrecision(4)} lies above ${most.toPrecision(4)}: the value is that of a long cylinder.` }
+    return finiteOrRefused({ ok: true as const, tau, ks, fit: null, ratio: length / radius, Z, caution: `γZ = ${gammaZ.toPrecision(4)} lies above ${most.toPrecision(4)}: the value is that of a long cylinder.` })
   }
-  return {
-    ok: true, ks, fit: null, ratio: length / radius, Z, tau: ks * plateStress(E, nu, t, length),
+  return finiteOrRefused({
+    ok: true as const, ks, fit: null, ratio: length / radius, Z, tau: ks * plateStress(E, nu, t, length),
     caution: gammaZ < cylinder.leastZ ? `γZ = ${gammaZ.toPrecision(4)} lies below ${cylinder.leastZ}, where the formula begins: treat the wall as a panel.` : null,
-  }
+  })
 }
 
 /** Elastic values above half of the shear yield are information only: the wall yields first. The stress to judge by is capped at yield. */
