@@ -21,9 +21,10 @@ const lines = ({ agrees, id, quantity, inputs, unit, expected, got, difference, 
 ]
 const text = () => [
   `Torquill engine ${found.engine}, method revision ${found.methodRevision}`, `${found.runtime}, ${found.finishedAt}`,
-  ...found.chapters.flatMap(({ chapter, title }) => [
-    '', `${chapter}  ${title}`, ...found.rows.filter(row => row.chapter === chapter && !(values.failed && row.agrees)).flatMap(lines),
-  ]),
+  ...found.chapters.flatMap(({ chapter, title }) => {
+    const shown = found.rows.filter(row => row.chapter === chapter && !(values.failed && row.agrees))
+    return shown.length > 0 ? ['', `${chapter}  ${title}`, ...shown.flatMap(lines)] : []
+  }),
   '', `${found.cases} cases, ${found.cases - found.failed} agree, ${found.failed} fail`,
 ].join('\n')
 
