@@ -30,9 +30,10 @@ export const scaled = (key: string) => (all: Exports): Exports => ({ ...all, [ke
 
 /** One number of a published object or list 1 % high. */
 export const coefficient = (table: string, key: string | number) => (all: Exports): Exports => {
-  const published = all[table] as Numeric & number[]
-  const value = (published[key as keyof typeof published] as number | undefined ?? 0) * fault
+  const published = all[table] as Numeric | number[]
+  const value = ((published as Numeric)[key] ?? 0) * fault
   return { ...all, [table]: Array.isArray(published) ? published.with(Number(key), value) : { ...published, [key]: value } }
+}
 }
 
 /** The second number of every pair of a published table 1 % high. */
