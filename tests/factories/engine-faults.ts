@@ -34,7 +34,6 @@ export const coefficient = (table: string, key: string | number) => (all: Export
   const value = ((published as Numeric)[key] ?? 0) * fault
   return { ...all, [table]: Array.isArray(published) ? published.with(Number(key), value) : { ...published, [key]: value } }
 }
-}
 
 /** The second number of every pair of a published table 1 % high. */
 export const ordinates = (table: string) => (all: Exports): Exports => ({ ...all, [table]: (all[table] as [number, number][]).map(([x, y]) => [x, y * fault]) })
