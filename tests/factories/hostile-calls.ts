@@ -41,12 +41,14 @@ export const hostileCalls: readonly HostileCall[] = [
   { name: 'shearFlow', what: 'closed', give: () => [box] },
   { name: 'warpingBar', give: () => [members, held] },
   {
-    name: 'warpingBar', what: 'a case', give: () => [{ torques: [{ node: 1, T: 6000 }], distributed: [{ member: 1, m: 12, m1: 12, m2: 8 }], bimoments: [{ node: 2, B: 1e6 }] }],
+    name: 'warpingBar', what: 'a case', give: () => [{ torques: [{ node: 1, T: 6000 }], distributed: [{ member: 1, m: 12, mEnd: 8 }], bimoments: [{ node: 2, B: 1e6 }] }],
     ask: (engine, [load]) => {
       const bar = engine.warpingBar(members, held)
       return bar.ok ? bar.respond(load as never) : bar
     },
   },
+  { name: 'cutBar', give: () => [members, [40, 700]] },
+  { name: 'compressedStiffness', give: () => [{ GJ: 7e7, Ips: 1.4e6, compression: 20 }] },
   { name: 'sectorialRun', give: () => [channel] },
   { name: 'spanBar', give: () => [segments, [{ node: 0, stiffness: 'rigid' }, { node: 2, stiffness: 1e9 }]] },
   {
@@ -92,5 +94,5 @@ export const notFronts: Readonly<Record<string, readonly string[]>> = {
     'shearYieldFromTension', 'respondOfSolid', 'isFin', 'cellMatrix', 'closedBendFactor', 'areaMoments', 'vonMises', 'plateStress', 'panelCoefficient', 'fittedCoefficient', 'cappedAtYield',
     'loopCorners', 'windingNumber', 'reentrantVertices',
   ],
-  'a choice, sum or judgement among results': ['chiThatCounts', 'superpose', 'torqueAbout', 'fibreStresses', 'worstStresses', 'atOneFibre', 'envelope', 'governingRows', 'estimateFromMeshes', 'judgeConvergence', 'judgeAgreement'],
+  'a choice, sum or judgement among results': ['chiThatCounts', 'superpose', 'torqueAbout', 'fibreStress', 'fibreStresses', 'stressPeaks', 'worstStresses', 'atOneFibre', 'envelope', 'governingRows', 'estimateFromMeshes', 'judgeConvergence', 'judgeAgreement'],
 }

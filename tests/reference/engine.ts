@@ -21,6 +21,9 @@ export async function loadEngine() {
   const shear = await import('#shared/torsion/shear/shear-flow')
   const warpingBar = await import('#shared/torsion/warping/warping-bar')
   const sectorialRun = await import('#shared/torsion/warping/sectorial-run')
+  const stressPeaks = await import('#shared/torsion/warping/stress-peaks')
+  const compression = await import('#shared/torsion/warping/compression')
+  const cutBar = await import('#shared/torsion/warping/cut-bar')
   const span = await import('#shared/torsion/span/span-bar')
   const combined = await import('#shared/torsion/combined/interaction')
   const imposed = await import('#shared/torsion/imposed/imposed-twist')
@@ -31,7 +34,7 @@ export async function loadEngine() {
   const outlineAgreement = await import('#shared/torsion/outline/agreement')
   const outlineVertices = await import('#shared/torsion/outline/reentrant')
   const outlineLimits = await import('#shared/torsion/outline/published')
-  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...solids, ...cells, ...cellCorner, ...shear, ...warpingBar, ...sectorialRun, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
+  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...solids, ...cells, ...cellCorner, ...shear, ...warpingBar, ...sectorialRun, ...stressPeaks, ...compression, ...cutBar, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
 }
 
 export type Engine = Awaited<ReturnType<typeof loadEngine>>

@@ -95,22 +95,36 @@ function zeroBetween(value: (part: number) => number, from: number, to: number):
 
 export interface FibreStress {
   readonly fibre: Fibre
-  /** σ_ω at the worse face, MPa, with the sign of ω on the mid-line. */
+  /** σ_ω with what else stretches the bar, at the worse face, MPa, with its sign. */
   readonly sigma: number
   /** τ_SV at the faces and the mean τ_ω of the flow, MPa, magnitudes. */
   readonly tauSv: number
   readonly tauOmega: number
+  /** Shear stress along from → to on the face that lies to the left of the wall and to its right, MPa: twist runs round the wall, the flow along it. */
+  readonly left: number
+  readonly right: number
+}
+
+/** What a station does to its fibres: B in N·mm², T_ω in N·mm, φ′ in rad/mm, and the mean stress of an axial force, MPa. */
+export interface StationAction { readonly B: number, readonly Tw: number, readonly rate: number, readonly axial?: number }
+
+/** σ at the worse face from the bimoment and the axial stress on the reference modulus. */
+const worseSigma = ({ omega, across, weight }: Fibre, perOmega: number, axial: number): number => {
+  const mid = weight * (perOmega * omega + axial)
+  return mid + (mid < 0 ? -1 : 1) * weight * Math.abs(perOmega) * across
+}
+
+/** The stresses of one fibre at one station. */
+export function fibreStress(fibre: Fibre, gamma: number, { B, Tw, rate, axial = 0 }: StationAction): FibreStress {
+  const { S, t, G } = fibre
+  const twist = G * t * rate
+  const flow = gamma === 0 ? 0 : -Tw * S / (gamma * t)
+  return { fibre, sigma: worseSigma(fibre, gamma === 0 ? 0 : B / gamma, axial), tauSv: Math.abs(twist), tauOmega: Math.abs(flow), left: flow - twist, right: flow + twist }
 }
 
 /** The stresses of one station at every fibre: what is combined stands at one place and one station. */
-export function fibreStresses({ fibres, properties }: SectorialRun, { B, Tw, rate }: { readonly B: number, readonly Tw: number, readonly rate: number }): FibreStress[] {
-  const { gamma } = properties
-  return fibres.map((fibre) => {
-    const { omega, across, S, t, G, weight } = fibre
-    const sigma = gamma === 0 ? 0 : B * weight * (Math.sign(omega || 1) * (Math.abs(omega) + across)) / gamma
-    return { fibre, sigma, tauSv: G * t * Math.abs(rate), tauOmega: gamma === 0 ? 0 : Math.abs(Tw * S / gamma) / t }
-  })
-}
+export const fibreStresses = ({ fibres, properties }: SectorialRun, action: StationAction): FibreStress[] =>
+  fibres.map(fibre => fibreStress(fibre, properties.gamma, action))
 
 /** The largest stress of each sort at one station, with its fibre. */
 export function worstStresses(stresses: readonly FibreStress[]): { sigma: FibreStress, tauOmega: FibreStress, tau: FibreStress } | null {

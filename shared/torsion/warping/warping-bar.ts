@@ -3,23 +3,20 @@
  * (methods §3.5). Factorised once; every case is a solution of the same equations. N, mm, rad.
  * At a step continuity of φ′ is an approximation (G-19).
  */
-import { factorise, solveFactorised, type Factorised } from '#shared/torsion/cholesky'
 import { refusal, type Refusal } from '#shared/torsion/section'
-import { memberStiffness, stateAt, uniformLoad, type Member, type MemberEnds, type MemberState, type MemberStiffness } from '#shared/torsion/warping/member'
+import { barEquations, solveBar, warps, type BarEquations, type GatheredLoad, type Restraint, type Support } from '#shared/torsion/warping/bar-equations'
+import { peaksOf, placeOf, planStations, runOf, stateWithin, type BarRun, type Peaks, type Place, type StationPlan } from '#shared/torsion/warping/bar-run'
+import type { Member, MemberEnds } from '#shared/torsion/warping/member'
 
-/** What holds a node: nothing, everything, or a spring in N·mm/rad (twist) or N·mm³/rad (warping). */
-export type Restraint = 'free' | 'fixed' | number
-export interface Support { readonly node: number, readonly twist: Restraint, readonly warping: Restraint }
+export type { BarRun, Peaks, Place, Restraint, Support }
 
 export interface BarCase {
   readonly torques: readonly { readonly node: number, readonly T: number }[]
-  /** Uniform torque on a member, N·mm/mm. */
-  readonly distributed: readonly { readonly member: number, readonly m: number }[]
+  /** Torque on a member, N·mm/mm: `m` at its start, running linearly to `mEnd` at its end; uniform where that is absent. */
+  readonly distributed: readonly { readonly member: number, readonly m: number, readonly mEnd?: number }[]
   /** P·ω of an axial force P along +z at a point with the sectorial coordinate ω, N·mm². */
   readonly bimoments: readonly { readonly node: number, readonly B: number }[]
 }
-
-export interface Station extends MemberState { readonly z: number, readonly member: number }
 
 export interface Reaction { readonly node: number, /** On the bar, N·mm. */ readonly torque: number, /** On the bar, in the sense of P·ω, N·mm². */ readonly bimoment: number }
 
@@ -37,33 +34,44 @@ export interface WarpingBar {
   /** kL of each member. */
   readonly u: readonly number[]
   readonly respond: (load: BarCase) => BarResponse | Refusal
-  /** States at `count` equal steps of every member, both ends of each included. */
-  readonly stations: (response: BarResponse, count?: number) => Station[]
+  /** States at 20 equal steps of every member and in the layers at its ends, both sides of every node included. */
+  readonly run: (response: BarResponse) => BarRun
+  /** The same as a list. */
+  readonly stations: (response: BarResponse) => Place[]
+  /** The state at any z from the start of the bar; at a node, that on its right. */
+  readonly stateAt: (response: BarResponse, z: number) => Place | Refusal
+  /** Where φ, φ′, B, T and T_ω are largest, between stations as well. */
+  readonly peaks: (response: BarResponse, run?: BarRun) => Peaks
 }
 
 export const mostMembers = 200
 const finite = (value: number): boolean => Number.isFinite(value)
 const isSpring = (value: Restraint): value is number => typeof value === 'number'
+const holds = (value: Restraint): boolean => value === 'fixed' || (isSpring(value) && value > 0)
 
 /** @returns a refusal for numbers that are none, a node that does not exist, or a bar that nothing holds against turning. */
 export function warpingBar(members: readonly Member[], supports: readonly Support[]): WarpingBar | Refusal {
   const fault = unsound(members, supports)
   if (fault) return refusal(fault)
-  const stiffness = members.map(memberStiffness)
-  const K = assemble(stiffness, supports)
-  const kept = freeUnknowns(K, stiffness, supports)
-  const factor = factorScaled(K, kept)
-  if (!factor) return refusal('Nothing holds the bar against turning: hold the twist of at least one node.')
-  const zs = members.reduce<number[]>((at, { length }) => [...at, (at.at(-1) ?? 0) + length], [0])
-  const solver: Solver = { members, supports, stiffness, K, kept, factor, zs }
+  if (!supports.some(({ twist }) => holds(twist))) return refusal('Nothing holds the bar against turning: hold the twist of at least one node.')
+  const equations = barEquations(members, supports)
+  if (!equations) return refusal('The bar cannot be computed: its stiffnesses differ too much. Check lengths, GJ, EΓ and the springs.')
+  const plan = planStations(equations.members)
+  const solver: Solver = { equations, plan, zs: members.reduce<number[]>((at, { length }) => [...at, (at.at(-1) ?? 0) + length], [0]) }
+  const run = (response: BarResponse) => runOf(plan, response.members, Float64Array.from(response.nodes, one => one.phi))
   return {
-    ok: true, length: zs.at(-1) ?? 0, u: stiffness.map(one => one.u),
-    respond: load => respond(solver, load), stations: (response, count = 20) => stationsOf(solver, response, count),
+    ok: true, length: solver.zs.at(-1) ?? 0, u: equations.members.map(one => one.u), run,
+    respond: load => respond(solver, load),
+    stations: (response) => {
+      const all = run(response)
+      return Array.from(plan.z, (_, i) => placeOf(all, i))
+    },
+    stateAt: (response, z) => stateAt(solver, response, z),
+    peaks: (response, known) => peaksOf(known ?? run(response), response.members),
   }
 }
 
-interface Scaled { readonly factor: Factorised, readonly scale: Float64Array }
-interface Solver { readonly members: readonly Member[], readonly supports: readonly Support[], readonly stiffness: readonly MemberStiffness[], readonly K: Float64Array, readonly kept: readonly number[], readonly factor: Scaled, readonly zs: readonly number[] }
+interface Solver { readonly equations: BarEquations, readonly plan: StationPlan, readonly zs: readonly number[] }
 
 function unsound(members: readonly Member[], supports: readonly Support[]): string | null {
   if (members.length === 0) return 'The bar has no length. Add the first member.'
@@ -72,11 +80,18 @@ function unsound(members: readonly Member[], supports: readonly Support[]): stri
     if (!(finite(length) && length > 0)) return `Member ${i + 1} needs a length greater than zero.`
     if (!(finite(GJ) && GJ > 0)) return `Member ${i + 1} needs a torsional stiffness GJ greater than zero.`
     if (!(finite(EG) && EG >= 0)) return `Member ${i + 1} needs a warping stiffness EΓ of zero or more.`
-    if (EG > 0 && !(finite(length * Math.sqrt(GJ / EG)) && length * Math.sqrt(GJ / EG) > 1e-4)) return `Member ${i + 1} is too short for its warping stiffness to be computed with. Check its length, GJ and EΓ.`
+    if (EG > 0 && !soundDecay(length * Math.sqrt(GJ / EG))) return `Member ${i + 1} is too short or too long for its warping stiffness to be computed with. Check its length, GJ and EΓ.`
   }
+  return unsoundSupport(members.length, supports)
+}
+
+/** Far beyond any real bar, and within what numbers hold. */
+const soundDecay = (u: number): boolean => u > 1e-6 && u < 1e9
+
+function unsoundSupport(last: number, supports: readonly Support[]): string | null {
   const seen = new Set<number>()
   for (const { node, twist, warping } of supports) {
-    if (!(Number.isInteger(node) && node >= 0 && node <= members.length)) return `A support stands at node ${node}, which the bar does not have.`
+    if (!isNode(node, last)) return `A support stands at node ${node}, which the bar does not have.`
     if (seen.has(node)) return `Node ${node} has two supports. Keep one.`
     seen.add(node)
     if ([twist, warping].some(one => isSpring(one) && !(finite(one) && one >= 0))) return `The support at node ${node} needs stiffnesses of zero or more.`
@@ -84,128 +99,66 @@ function unsound(members: readonly Member[], supports: readonly Support[]): stri
   return null
 }
 
-/** Unknowns 2i and 2i + 1 are φ and φ′ of node i. */
-function assemble(stiffness: readonly MemberStiffness[], supports: readonly Support[]): Float64Array {
-  const n = 2 * (stiffness.length + 1)
-  const K = new Float64Array(n * n)
-  const add = (i: number, j: number, value: number) => {
-    K[i * n + j] = (K[i * n + j] ?? 0) + value
-    if (i !== j) K[j * n + i] = (K[j * n + i] ?? 0) + value
+const isNode = (node: number, last: number): boolean => Number.isInteger(node) && node >= 0 && node <= last
+
+/** The sums of what acts at each node and on each member, or why it cannot. */
+function gather({ equations: { members } }: Solver, { torques, distributed, bimoments }: BarCase): GatheredLoad | Refusal {
+  const nodes = members.length + 1
+  const load = { T: new Float64Array(nodes), B: new Float64Array(nodes), m1: new Float64Array(members.length), m2: new Float64Array(members.length) }
+  const add = (to: Float64Array, i: number, value: number) => {
+    to[i] = (to[i] as number) + value
   }
-  stiffness.forEach(({ K11, K12, K22, K24 }, e) => {
-    const [a, b, c, d] = [2 * e, 2 * e + 1, 2 * e + 2, 2 * e + 3]
-    add(a, a, K11)
-    add(a, b, K12)
-    add(a, c, -K11)
-    add(a, d, K12)
-    add(b, b, K22)
-    add(b, c, -K12)
-    add(b, d, K24)
-    add(c, c, K11)
-    add(c, d, -K12)
-    add(d, d, K22)
-  })
-  for (const { node, twist, warping } of supports) {
-    if (isSpring(twist)) add(2 * node, 2 * node, twist)
-    if (isSpring(warping)) add(2 * node + 1, 2 * node + 1, warping)
+  for (const { node } of [...torques, ...bimoments]) if (!isNode(node, members.length)) return refusal(`A load stands at node ${node}, which the bar does not have.`)
+  for (const { member } of distributed) if (!members[member]) return refusal(`A distributed torque stands on member ${member + 1}, which the bar does not have.`)
+  for (const { node, B } of bimoments) if (B !== 0 && !warps(members, node)) return refusal(`The bimoment at node ${node} meets no member that warps. Leave it out, or give the member its EΓ.`)
+  for (const { node, T } of torques) add(load.T, node, T)
+  for (const { node, B } of bimoments) add(load.B, node, B)
+  for (const { member, m, mEnd } of distributed) {
+    add(load.m1, member, m)
+    add(load.m2, member, mEnd ?? m)
   }
-  return K
+  return Object.values(load).every(list => list.every(finite)) ? load : refusal('A load is not a finite number.')
 }
 
-/** Unknowns that are neither held nor without meaning: φ′ between members that do not warp has none. */
-function freeUnknowns(K: Float64Array, stiffness: readonly MemberStiffness[], supports: readonly Support[]): number[] {
-  const n = 2 * (stiffness.length + 1)
-  const held = new Set(supports.flatMap(({ node, twist, warping }) => [...(twist === 'fixed' ? [2 * node] : []), ...(warping === 'fixed' ? [2 * node + 1] : [])]))
-  return Array.from({ length: n }, (_, i) => i).filter(i => !held.has(i) && !(i % 2 === 1 && K[i * n + i] === 0))
-}
-
-/** Rows and columns scaled to a unit diagonal, so that twist and rate of twist weigh alike. */
-function factorScaled(K: Float64Array, kept: readonly number[]): Scaled | null {
-  const n = Math.sqrt(K.length)
-  const scale = Float64Array.from(kept, i => 1 / Math.sqrt(K[i * n + i] ?? 1))
-  const A = new Float64Array(kept.length ** 2)
-  kept.forEach((i, a) => kept.forEach((j, b) => {
-    A[a * kept.length + b] = (K[i * n + j] ?? 0) * (scale[a] ?? 1) * (scale[b] ?? 1)
-  }))
-  const factor = factorise(A, kept.length)
-  return factor.ok ? { factor, scale } : null
-}
-
-function loadVector({ members, stiffness }: Solver, load: BarCase): Float64Array | Refusal {
-  const f = new Float64Array(2 * (members.length + 1))
-  const add = (i: number, value: number) => {
-    f[i] = (f[i] ?? 0) + value
-  }
-  const nodeFault = [...load.torques, ...load.bimoments].find(({ node }) => !(Number.isInteger(node) && node >= 0 && node <= members.length))
-  if (nodeFault) return refusal(`A load stands at node ${nodeFault.node}, which the bar does not have.`)
-  if ([...load.torques.map(one => one.T), ...load.distributed.map(one => one.m), ...load.bimoments.map(one => one.B)].some(value => !finite(value))) return refusal('A load is not a finite number.')
-  for (const { node, T } of load.torques) add(2 * node, T)
-  for (const { node, B } of load.bimoments) add(2 * node + 1, -B)
-  for (const { member, m } of load.distributed) {
-    const one = members[member]
-    if (!one) return refusal(`A distributed torque stands on member ${member + 1}, which the bar does not have.`)
-    const { torque, bimoment } = uniformLoad(one, stiffness[member]?.u ?? Infinity, m)
-    add(2 * member, torque)
-    add(2 * member + 1, bimoment)
-    add(2 * member + 2, torque)
-    add(2 * member + 3, -bimoment)
-  }
-  return f
-}
-
-function respond(solver: Solver, load: BarCase): BarResponse | Refusal {
-  const f = loadVector(solver, load)
-  if (!(f instanceof Float64Array)) return f
-  const { kept, factor, members, zs } = solver
-  const x = solveFactorised(factor.factor, Float64Array.from(kept, (i, a) => (f[i] ?? 0) * (factor.scale[a] ?? 1)))
-  const d = new Float64Array(f.length)
-  kept.forEach((i, a) => {
-    d[i] = (x[a] ?? 0) * (factor.scale[a] ?? 1)
-  })
-  const m = members.map((_, e) => load.distributed.reduce((sum, one) => (one.member === e ? sum + one.m : sum), 0))
-  const ends = members.map((member, e) => memberEnds(member, solver.stiffness[e] as MemberStiffness, d, e, m[e] ?? 0))
-  const reactions = reactionsOf(solver, d, f)
-  const total = [...load.torques.map(one => one.T), ...members.map((member, e) => (m[e] ?? 0) * member.length)]
-  const all = [...total, ...reactions.map(one => one.torque)]
-  const largest = all.reduce((high, one) => Math.max(high, Math.abs(one)), 0)
+function respond(solver: Solver, acting: BarCase): BarResponse | Refusal {
+  const load = gather(solver, acting)
+  if ('ok' in load) return load
+  const { equations: { members, supports }, zs } = solver
+  const solution = solveBar(solver.equations, load)
+  if (![solution.phi, solution.torque, solution.bimoment].every(list => list.every(finite)) || !solution.ends.every(one => Object.values(one).every(finite))) return refusal('The loads are too large, or the supports too soft, for the twist to be computed. Check them.')
+  const reactions = supports.map(({ node }) => ({ node, torque: solution.torque[node] as number, bimoment: warps(members, node) ? solution.bimoment[node] as number : 0 }))
   return {
-    nodes: zs.map((z, i) => ({ z, phi: d[2 * i] ?? 0, rate: d[2 * i + 1] ?? 0 })), members: ends, reactions,
-    residual: largest === 0 ? 0 : Math.abs(all.reduce((sum, one) => sum + one, 0)) / largest,
+    nodes: zs.map((z, i) => ({ z, phi: solution.phi[i] as number, rate: rateAt(solution, members, i) })),
+    members: solution.ends, reactions, residual: outOfBalance(solver, load, reactions),
   }
 }
 
-/** Actions at the ends: (−T(0), B(0), T(L), −B(L)) = K d less what the distributed torque stands for. */
-function memberEnds(member: Member, { u, K11, K12, K22, K24 }: MemberStiffness, d: Float64Array, e: number, m: number): MemberEnds {
-  const [p1, r1, p2, r2] = [d[2 * e] ?? 0, d[2 * e + 1] ?? 0, d[2 * e + 2] ?? 0, d[2 * e + 3] ?? 0]
-  const { torque, bimoment } = uniformLoad(member, u, m)
-  const turned = p1 - p2
-  return {
-    phi: p1, rate: r1, m,
-    T: -(K11 * turned + K12 * (r1 + r2)) + torque,
-    B1: K12 * turned + K22 * r1 + K24 * r2 - bimoment,
-    B2: -(K12 * turned + K24 * r1 + K22 * r2 + bimoment),
-  }
+/** φ′ of a node; between members that do not warp, that on its right. */
+function rateAt({ ends, rate }: ReturnType<typeof solveBar>, members: BarEquations['members'], i: number): number {
+  if (warps(members, i)) return rate[i] as number
+  const [left, right] = [members[i - 1], ends[i]]
+  if (right) return right.rate
+  const last = ends[i - 1]
+  return left && last ? (last.T - (last.m1 + last.m2) * left.member.length / 2) / left.member.GJ : 0
 }
 
-/** What the supports do to the bar. */
-function reactionsOf({ K, supports }: Solver, d: Float64Array, f: Float64Array): Reaction[] {
-  const n = d.length
-  const rest = (i: number) => {
-    let sum = -(f[i] ?? 0)
-    for (let j = 0; j < n; j += 1) sum += (K[i * n + j] ?? 0) * (d[j] ?? 0)
-    return sum
+function outOfBalance({ equations: { members } }: Solver, { T, m1, m2 }: GatheredLoad, reactions: readonly Reaction[]): number {
+  let [sum, largest] = [0, 0]
+  const count = (value: number) => {
+    sum += value
+    largest = Math.max(largest, Math.abs(value))
   }
-  const of = (restraint: Restraint, i: number) => (restraint === 'fixed' ? rest(i) : isSpring(restraint) ? -restraint * (d[i] ?? 0) : 0)
-  return supports.map(({ node, twist, warping }) => ({ node, torque: of(twist, 2 * node), bimoment: -of(warping, 2 * node + 1) }))
-}
-
-function stationsOf({ members, stiffness, zs }: Solver, response: BarResponse, count: number): Station[] {
-  return members.flatMap((member, e) => {
-    const ends = response.members[e]
-    if (!ends) return []
-    return Array.from({ length: count + 1 }, (_, i) => {
-      const z = member.length * i / count
-      return { z: (zs[e] ?? 0) + z, member: e, ...stateAt(member, stiffness[e]?.u ?? Infinity, ends, z) }
-    })
+  T.forEach(count)
+  members.forEach(({ member: { length } }, e) => {
+    count(length * ((m1[e] as number) + (m2[e] as number)) / 2)
   })
+  for (const { torque } of reactions) count(torque)
+  return largest === 0 ? 0 : Math.abs(sum) / largest
+}
+
+function stateAt({ plan, zs }: Solver, response: BarResponse, z: number): Place | Refusal {
+  const length = zs.at(-1) ?? 0
+  if (!(z >= 0 && z <= length)) return refusal('The place does not lie on the bar.')
+  const e = Math.min(zs.length - 2, Math.max(0, zs.findLastIndex(start => start <= z)))
+  return stateWithin(plan, response.members, e, z - (zs[e] ?? 0))
 }
