@@ -1,5 +1,6 @@
 /** All calculation kinds. One line per kind; a second registration of a name is a programmer's error. */
 import { generalOutline } from '#shared/calc/kinds/general-outline/kind'
+import { imposedTwist } from '#shared/calc/kinds/imposed-twist/kind'
 import { loadCases } from '#shared/calc/kinds/load-cases/kind'
 import { material } from '#shared/calc/kinds/material/kind'
 import { openSection } from '#shared/calc/kinds/open-section/kind'
@@ -35,7 +36,7 @@ export function makeRegistry(kinds: AnyKind[]): Registry {
   }
 }
 
-const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, material, loadCases])
+const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, imposedTwist, material, loadCases])
 
 /** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
 export const calcKind = (name: string): AnyKind => registry.kind(name)

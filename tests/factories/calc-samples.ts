@@ -3,6 +3,7 @@
  * results and the batch. A kind without samples here fails the contract test.
  */
 import { boredPlateInputs, keyedShaftInputs, sharpBracketInputs, thickAngleInputs } from './general-outline'
+import { followingChannelInputs, followingTubeInputs } from './imposed-twist'
 import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, sheet2024, sheet6061, stripInputs } from './open-section'
 import { loadCasesInputs, materialInputs } from './records'
 import { inchShaftInputs, sharedShaftInputs, steppedShaftInputs } from './torque-along-bar'
@@ -18,6 +19,7 @@ export const calcSamples: Record<string, Samples> = {
   'solid-bar': { 'round bar': () => solidBarInputs(), 'flat shaft': flatShaftInputs, 'bar in inches': inchBarInputs, ...Object.fromEntries(Object.keys(solidBarShapes()).map(name => [name, () => solidBarShapes()[name]])) },
   'torque-from-loads': { 'load in a web': webLoadInputs, 'loads in inches': inchLoadsInputs },
   'torque-along-bar': { 'stepped shaft': steppedShaftInputs, 'shared shaft': sharedShaftInputs, 'shaft in inches': inchShaftInputs },
+  'imposed-twist': { 'following channel': followingChannelInputs, 'following tube in inches': followingTubeInputs },
   'material': { 'sheet': materialInputs, 'sheet with knock-down': sheet2024, 'another sheet': sheet6061 },
   'load-cases': { 'torques and forces': loadCasesInputs },
 }

@@ -53,7 +53,7 @@ export function parseBar(inputs: BarInputs, read: TypedReader): BarModel | null 
 }
 
 /** The record a part names, or a fault at the field that names it. */
-export function materialNamed(id: string, path: string, what: string, inputs: BarInputs, materials: readonly MaterialModel[], read: TypedReader): MaterialModel | null {
+export function materialNamed(id: string, path: string, what: string, inputs: Pick<BarInputs, 'materials'>, materials: readonly MaterialModel[], read: TypedReader): MaterialModel | null {
   if (!inputs.materials.some(m => m.id === id)) read.fault(path, `Choose the material of ${what}.`)
   return materials.find(m => m.id === id) ?? null
 }
