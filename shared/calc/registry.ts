@@ -1,4 +1,5 @@
 /** All calculation kinds. One line per kind; a second registration of a name is a programmer's error. */
+import { combinedStress } from '#shared/calc/kinds/combined-stress/kind'
 import { generalOutline } from '#shared/calc/kinds/general-outline/kind'
 import { imposedTwist } from '#shared/calc/kinds/imposed-twist/kind'
 import { loadCases } from '#shared/calc/kinds/load-cases/kind'
@@ -36,7 +37,7 @@ export function makeRegistry(kinds: AnyKind[]): Registry {
   }
 }
 
-const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, imposedTwist, material, loadCases])
+const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, imposedTwist, combinedStress, material, loadCases])
 
 /** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
 export const calcKind = (name: string): AnyKind => registry.kind(name)

@@ -2,6 +2,7 @@
  * Realistic inputs of every calculation kind, for what all kinds have to keep to: the contract test, the golden
  * results and the batch. A kind without samples here fails the contract test.
  */
+import { combinedInputs, panelInputs, powersInputs, steadyInputs } from './combined-stress'
 import { boredPlateInputs, keyedShaftInputs, sharpBracketInputs, thickAngleInputs } from './general-outline'
 import { followingChannelInputs, followingTubeInputs } from './imposed-twist'
 import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, sheet2024, sheet6061, stripInputs } from './open-section'
@@ -20,6 +21,7 @@ export const calcSamples: Record<string, Samples> = {
   'torque-from-loads': { 'load in a web': webLoadInputs, 'loads in inches': inchLoadsInputs },
   'torque-along-bar': { 'stepped shaft': steppedShaftInputs, 'shared shaft': sharedShaftInputs, 'shaft in inches': inchShaftInputs },
   'imposed-twist': { 'following channel': followingChannelInputs, 'following tube in inches': followingTubeInputs },
+  'combined-stress': { 'two fibres': combinedInputs, 'panel': panelInputs, 'steady part': steadyInputs, 'powers': powersInputs },
   'material': { 'sheet': materialInputs, 'sheet with knock-down': sheet2024, 'another sheet': sheet6061 },
   'load-cases': { 'torques and forces': loadCasesInputs },
 }

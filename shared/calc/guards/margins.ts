@@ -29,12 +29,12 @@ function least(rows: MarginRow[]): MarginRow | undefined {
 }
 
 /** The worst stress above yield at limit (G-26); `modes` are those whose allowable is a yield strength. */
-export function yieldGuards(rows: readonly MarginRow[], modes: readonly string[]): Guard[] {
+export function yieldGuards(rows: readonly MarginRow[], modes: readonly string[], stress: 'shear' | 'equivalent' = 'shear'): Guard[] {
   const over = rows.filter(row => modes.includes(row.mode) && row.ms !== null && row.ms < 0)
   const worst = least(over)
   if (!worst) return []
   return [fired('G-26', {
     ...about(worst), values: { 'stress, MPa': worst.applied, 'yield, MPa': worst.allowable },
-    message: `At limit load the shear stress at ${worst.place} in case ${worst.caseId} is ${figure(worst.applied)} MPa, above the yield strength of ${figure(worst.allowable)} MPa.`,
+    message: `At limit load the ${stress} stress at ${worst.place} in case ${worst.caseId} is ${figure(worst.applied)} MPa, above the yield strength of ${figure(worst.allowable)} MPa.`,
   })]
 }
