@@ -3,9 +3,11 @@ import { combinedStress } from '#shared/calc/kinds/combined-stress/kind'
 import { generalOutline } from '#shared/calc/kinds/general-outline/kind'
 import { imposedTwist } from '#shared/calc/kinds/imposed-twist/kind'
 import { loadCases } from '#shared/calc/kinds/load-cases/kind'
+import { marginTable } from '#shared/calc/kinds/margin-table/kind'
 import { material } from '#shared/calc/kinds/material/kind'
 import { openSection } from '#shared/calc/kinds/open-section/kind'
 import { noLinks, type Links } from '#shared/calc/links'
+import { restrainedWarping } from '#shared/calc/kinds/restrained-warping/kind'
 import { solidBar } from '#shared/calc/kinds/solid-bar/kind'
 import { torqueAlongBar } from '#shared/calc/kinds/torque-along-bar/kind'
 import { torqueFromLoads } from '#shared/calc/kinds/torque-from-loads/kind'
@@ -37,7 +39,7 @@ export function makeRegistry(kinds: AnyKind[]): Registry {
   }
 }
 
-const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, imposedTwist, combinedStress, material, loadCases])
+const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, restrainedWarping, imposedTwist, combinedStress, marginTable, material, loadCases])
 
 /** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
 export const calcKind = (name: string): AnyKind => registry.kind(name)

@@ -7,6 +7,7 @@ import { boredPlateInputs, keyedShaftInputs, sharpBracketInputs, thickAngleInput
 import { followingChannelInputs, followingTubeInputs } from './imposed-twist'
 import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, sheet2024, sheet6061, stripInputs } from './open-section'
 import { loadCasesInputs, materialInputs } from './records'
+import { channelBarInputs, hatBarInputs, teeBarInputs } from './restrained-warping'
 import { inchShaftInputs, sharedShaftInputs, steppedShaftInputs } from './torque-along-bar'
 import { inchLoadsInputs, webLoadInputs } from './torque-from-loads'
 import { flatShaftInputs, inchBarInputs, solidBarInputs, solidBarShapes } from './solid-bar'
@@ -22,6 +23,8 @@ export const calcSamples: Record<string, Samples> = {
   'torque-along-bar': { 'stepped shaft': steppedShaftInputs, 'shared shaft': sharedShaftInputs, 'shaft in inches': inchShaftInputs },
   'imposed-twist': { 'following channel': followingChannelInputs, 'following tube in inches': followingTubeInputs },
   'combined-stress': { 'two fibres': combinedInputs, 'panel': panelInputs, 'steady part': steadyInputs, 'powers': powersInputs },
+  'margin-table': { 'least of each mode': () => ({ rows: 'least of each mode' }) },
+  'restrained-warping': { 'channel': () => channelBarInputs(), 'hat with springs': hatBarInputs, 'tee in inches': teeBarInputs },
   'material': { 'sheet': materialInputs, 'sheet with knock-down': sheet2024, 'another sheet': sheet6061 },
   'load-cases': { 'torques and forces': loadCasesInputs },
 }

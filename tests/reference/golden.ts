@@ -1,5 +1,5 @@
 /** What the engine gives at one method revision: every reference row, and every number of the sample calculations. */
-import { calcKind } from '#shared/calc/registry'
+import { calcKind, gathers } from '#shared/calc/registry'
 import { allSamples } from '../factories/calc-samples'
 import { loadEngine } from './engine'
 import { chapterOf, rowKey, sectionOf } from './method-sections'
@@ -42,9 +42,9 @@ async function rowValues(): Promise<[string, number][]> {
   return referenceRows.map(row => [`${chapterOf(sectionOf(row)) === '4' ? 'outline row' : 'row'} ${rowKey(row)}`, row.actual(engine)])
 }
 
-/** @throws where a sample is refused: the contract test tells more. */
+/** What gathers from the other calculations of a note has no numbers of its own. @throws where a sample is refused: the contract test tells more. */
 function sampleValues(): [string, number][] {
-  return allSamples().flatMap(({ kind, name, inputs }): [string, number][] => {
+  return allSamples().filter(({ kind }) => !gathers(kind)).flatMap(({ kind, name, inputs }): [string, number][] => {
     const evaluation = calcKind(kind).evaluate(inputs)
     if (!evaluation.ok) throw new Error(`${kind}, ${name}: ${evaluation.faults.map(fault => `${fault.path}: ${fault.message}`).join(' ')}`)
     const { outputs, margins } = evaluation.result
