@@ -2,7 +2,7 @@
 import { bench, describe } from 'vitest'
 import { evaluateNote } from '#shared/calc/evaluate-note'
 import { computeLinked } from '#shared/calc/note-links'
-import { calcKind } from '#shared/calc/registry'
+import { calcKind, gathers } from '#shared/calc/registry'
 import { allSamples } from '../factories/calc-samples'
 import { largeOpenSection, withLargeTable } from '../factories/large-section'
 
@@ -18,7 +18,7 @@ describe('a hundred walls under a thousand cases', () => {
 })
 
 /** Every sample but those that solve an outline twice over, which have benchmarks of their own. */
-const samples = allSamples().filter(({ kind }) => kind !== 'general-outline')
+const samples = allSamples().filter(({ kind }) => kind !== 'general-outline' && !gathers(kind))
 describe('a note', () => {
   bench(`${samples.length} calculations, the samples of all kinds`, () => {
     for (const { kind, inputs } of samples) calcKind(kind).evaluate(inputs)
