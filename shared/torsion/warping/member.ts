@@ -101,10 +101,11 @@ function writeIntegrals({ GJ, length }: Member, u: number, x: number, shape: Flo
     const [at, left] = [part * x, x * (1 - part)]
     const [first, second] = [swell(u - at, u), swell(at, u)]
     const values = [sinhRatio(u - at, u), sinhRatio(at, u), first / k ** 2, second / k ** 2]
-    values.forEach((value, i) => {
-      shape[o + 4 + i] = (shape[o + 4 + i] as number) + weight * x * value * k / GJ
-      shape[o + 8 + i] = (shape[o + 8 + i] as number) + weight * x * left * value / GJ
-    })
+    for (let i = 0; i < 4; i += 1) {
+      const share = weight * x * (values[i] as number) / GJ
+      shape[o + 4 + i] = (shape[o + 4 + i] as number) + share * k
+      shape[o + 8 + i] = (shape[o + 8 + i] as number) + share * left
+    }
   }
 }
 

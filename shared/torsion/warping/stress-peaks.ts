@@ -16,9 +16,10 @@ export const measures: readonly Measure[] = ['sigma', 'tau', 'mises', 'circle']
 export interface StressPeak { readonly value: number, readonly place: Place, readonly fibre: Fibre }
 export type StressPeaks = Readonly<Record<Measure, StressPeak>>
 
-/** Squares of the measures are a·σ² + b·τ². */
-type Weights = readonly (readonly [sigma: number, tau: number])[]
-const weightsOf = ({ normal, shear }: FibreGroup): Weights => [[1, 0], [0, 1], [1, 3], normal === null || shear === null ? [0, 0] : [normal ** -2, shear ** -2]]
+/** Squares of the measures are a·σ² + b·τ²: a and b of each measure in turn. */
+type Weights = Float64Array
+const weightsOf = ({ normal, shear }: FibreGroup): Weights =>
+  Float64Array.from([1, 0, 0, 1, 1, 3, ...(normal === null || shear === null ? [0, 0] : [normal ** -2, shear ** -2])])
 
 /** A group as flat numbers: σ = |ω·B/Γ + axial|·w + across·|B/Γ|, τ = G t|φ′| + |T_ω/Γ|·s. */
 interface Flat { readonly omega: Float64Array, readonly across: Float64Array, readonly weight: Float64Array, readonly twist: Float64Array, readonly flow: Float64Array, readonly most: readonly [omega: number, weight: number, twist: number, flow: number] }
@@ -46,10 +47,12 @@ function peaksOfGroup(inCase: StressCase, group: FibreGroup, flat: Flat, weights
   const { run: { B, Tw, rate }, gamma, axial } = inCase
   const per = gamma === 0 ? 0 : 1 / gamma
   for (let i = 0; i < B.length; i += 1) {
-    const [stretch, slip, turn] = [(B[i] as number) * per, Math.abs(Tw[i] as number) * per, Math.abs(rate[i] as number)]
+    const stretch = (B[i] as number) * per
+    const slip = Math.abs(Tw[i] as number) * per
+    const turn = Math.abs(rate[i] as number)
     if (canExceed(flat.most, weights, found.square, Math.abs(stretch), slip, turn, Math.abs(axial))) scan(flat, weights, found, i, stretch, slip, turn, axial)
   }
-  const peak = (m: number): StressPeak => refined(inCase, group.fibres[found.fibre[m] as number] as Fibre, weights[m] as readonly [number, number], found.station[m] as number)
+  const peak = (m: number): StressPeak => refined(inCase, group.fibres[found.fibre[m] as number] as Fibre, weights.subarray(2 * m, 2 * m + 2), found.station[m] as number)
   return { sigma: peak(0), tau: peak(1), mises: peak(2), circle: peak(3) }
 }
 
@@ -58,8 +61,7 @@ function canExceed(most: Flat['most'], weights: Weights, square: Float64Array, s
   const sigma = most[0] * stretch + most[1] * axial
   const tau = most[2] * turn + most[3] * slip
   for (let m = 0; m < 4; m += 1) {
-    const weight = weights[m] as readonly [number, number]
-    if (weight[0] * sigma * sigma + weight[1] * tau * tau > (square[m] as number)) return true
+    if ((weights[2 * m] as number) * sigma * sigma + (weights[2 * m + 1] as number) * tau * tau > (square[m] as number)) return true
   }
   return false
 }
@@ -69,8 +71,7 @@ function scan({ omega, across, weight, twist, flow }: Flat, weights: Weights, { 
     const sigma = Math.abs((omega[f] as number) * stretch + (weight[f] as number) * axial) + (across[f] as number) * Math.abs(stretch)
     const tau = (twist[f] as number) * turn + (flow[f] as number) * slip
     for (let m = 0; m < 4; m += 1) {
-      const [a, b] = weights[m] as readonly [number, number]
-      const value = a * sigma * sigma + b * tau * tau
+      const value = (weights[2 * m] as number) * sigma * sigma + (weights[2 * m + 1] as number) * tau * tau
       if (value <= (square[m] as number)) continue
       square[m] = value
       station[m] = i
@@ -83,13 +84,14 @@ function scan({ omega, across, weight, twist, flow }: Flat, weights: Weights, { 
 const STEPS = 3
 
 /** The measure at a place of the bar. */
-function measured({ gamma, axial }: StressCase, fibre: Fibre, [a, b]: readonly [number, number], { B, Tw, rate }: Place): number {
+function measured({ gamma, axial }: StressCase, fibre: Fibre, weights: Weights, { B, Tw, rate }: Place): number {
+  const [a = 0, b = 0] = weights
   const { sigma, tauSv, tauOmega } = fibreStress(fibre, gamma, { B, Tw, rate, axial })
   return Math.sqrt(a * sigma ** 2 + b * (tauSv + tauOmega) ** 2)
 }
 
 /** The largest between the neighbours of a station inside a member; a station at a node stands as it is. */
-function refined(inCase: StressCase, fibre: Fibre, weights: readonly [number, number], i: number): StressPeak {
+function refined(inCase: StressCase, fibre: Fibre, weights: Weights, i: number): StressPeak {
   const { run, ends } = inCase
   const { plan: { member, z } } = run
   const value = (place: Place) => measured(inCase, fibre, weights, place)

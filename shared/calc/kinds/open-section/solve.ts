@@ -76,7 +76,7 @@ function detailedCases(cases: CaseSolution[], places: number, rows: Solution['ma
 const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0)
 
 /** The engine takes moduli of elasticity for all walls or for none. */
-function engineSection(model: OpenSectionModel): OpenSection {
+export function engineSection(model: Pick<OpenSectionModel, 'nodes' | 'walls' | 'junctions'>): OpenSection {
   const withE = model.walls.every(w => w.E !== null)
   return {
     nodes: model.nodes,
