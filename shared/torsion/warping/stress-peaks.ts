@@ -46,14 +46,23 @@ function peaksOfGroup(inCase: StressCase, group: FibreGroup, flat: Flat, weights
   const found: Found = { square: new Float64Array(4).fill(-1), station: new Int32Array(4), fibre: new Int32Array(4) }
   const { run: { B, Tw, rate }, gamma, axial } = inCase
   const per = gamma === 0 ? 0 : 1 / gamma
-  for (let i = 0; i < B.length; i += 1) {
+  const look = (i: number) => {
     const stretch = (B[i] as number) * per
     const slip = Math.abs(Tw[i] as number) * per
     const turn = Math.abs(rate[i] as number)
     if (canExceed(flat.most, weights, found.square, Math.abs(stretch), slip, turn, Math.abs(axial))) scan(flat, weights, found, i, stretch, slip, turn, axial)
   }
+  // The worst station of each of three actions first: what stands elsewhere then seldom exceeds what is known.
+  for (const i of [largestOf(B), largestOf(rate), largestOf(Tw)]) look(i)
+  for (let i = 0; i < B.length; i += 1) look(i)
   const peak = (m: number): StressPeak => refined(inCase, group.fibres[found.fibre[m] as number] as Fibre, weights.subarray(2 * m, 2 * m + 2), found.station[m] as number)
   return { sigma: peak(0), tau: peak(1), mises: peak(2), circle: peak(3) }
+}
+
+function largestOf(values: Float64Array): number {
+  let top = 0
+  for (let i = 1; i < values.length; i += 1) if (Math.abs(values[i] as number) > Math.abs(values[top] as number)) top = i
+  return top
 }
 
 /** Whether any fibre of the group could be worse here than the worst so far: most stations need no closer look. */

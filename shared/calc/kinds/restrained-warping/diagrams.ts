@@ -81,30 +81,34 @@ export function restrainedWarpingPlots(s: WarpingSolution): Plot[] {
   if (!decisive) return []
   const u = shownUnits(s.model)
   const x = { label: 'Station', symbol: 'z', dimension: 'length', unit: u.length } as const
-  const shares: Plot['series'] = [['torque', 'T'], ['by twist', 'Tsv'], ['by warping', 'Tw']].map(([name = '', key]) => ({ name, caseId: decisive.model.id, points: pointsOf(decisive, at => at[key as 'T' | 'Tsv' | 'Tw']) }))
+  const shares = ([['torque', 'T'], ['by twist', 'Tsv'], ['by warping', 'Tw']] as const).map(([name, key]) => ({ name, caseId: decisive.model.id, points: pointsOf(decisive, key) }))
   return [
-    { key: 'twist', title: 'Twist along the bar', x, y: { label: 'Twist', symbol: '\\varphi', dimension: 'angle', unit: '°' }, series: series(s, at => at.phi) },
-    { key: 'bimoment', title: 'Bimoment along the bar', x, y: { label: 'Bimoment', symbol: 'B', dimension: 'bimoment', unit: bimomentUnit(s) }, series: series(s, at => at.B) },
+    { key: 'twist', title: 'Twist along the bar', x, y: { label: 'Twist', symbol: '\\varphi', dimension: 'angle', unit: '°' }, series: series(s, 'phi') },
+    { key: 'bimoment', title: 'Bimoment along the bar', x, y: { label: 'Bimoment', symbol: 'B', dimension: 'bimoment', unit: bimomentUnit(s) }, series: series(s, 'B') },
     { key: 'torque', title: `Torque along the bar, case ${decisive.model.id}`, x, y: { label: 'Torque', symbol: 'T', dimension: 'torque', unit: torqueUnit(s) }, series: shares },
   ]
 }
 
-function series(s: WarpingSolution, value: (at: Place) => number): Plot['series'] {
-  if (s.cases.length <= MOST_LINES) return s.cases.map(c => ({ name: c.model.id, caseId: c.model.id, points: pointsOf(c, value) }))
-  const all = s.cases.map(c => pointsOf(c, value))
-  const outer = (pick: (...values: number[]) => number): [number, number][] => (all[0] ?? []).map(([z], i) => [z, all.reduce((held, points) => pick(held, points[i]?.[1] ?? held), all[0]?.[i]?.[1] ?? 0)])
+type Line = 'phi' | 'B' | 'T' | 'Tw' | 'Tsv'
+
+function series(s: WarpingSolution, line: Line): Plot['series'] {
+  if (s.cases.length <= MOST_LINES) return s.cases.map(c => ({ name: c.model.id, caseId: c.model.id, points: pointsOf(c, line) }))
+  const [first] = s.cases
+  if (!first) return []
+  const outer = (pick: (a: number, b: number) => number): [number, number][] => shownStations(first).map(i => [stationZ(first, i), s.cases.reduce((held, c) => pick(held, valueAt(c, line, i)), valueAt(first, line, i))])
   return [{ name: 'largest of all cases', points: outer(Math.max) }, { name: 'smallest of all cases', points: outer(Math.min) }]
 }
 
-/** Ends of members always stand; between them points are left out where there are too many. */
-function pointsOf({ run }: WarpingCase, value: (at: Place) => number): [number, number][] {
-  const { member } = run.plan
+const valueAt = ({ run }: WarpingCase, line: Line, i: number): number => (line === 'Tsv' ? (run.T[i] ?? 0) - (run.Tw[i] ?? 0) : run[line][i] ?? 0)
+const stationZ = ({ run: { plan } }: WarpingCase, i: number): number => (plan.start[plan.member[i] ?? 0] ?? 0) + (plan.z[i] ?? 0)
+
+/** Ends of members always stand; between them stations are left out where there are too many. */
+function shownStations({ run: { plan: { member } } }: WarpingCase): number[] {
   const step = Math.ceil(member.length / MOST_POINTS)
-  return Array.from(member, (_, i) => i).filter(i => i % step === 0 || member[i - 1] !== member[i] || member[i + 1] !== member[i]).map((i) => {
-    const at = placeOf(run, i)
-    return [at.z, value(at)]
-  })
+  return Array.from(member, (_, i) => i).filter(i => i % step === 0 || member[i - 1] !== member[i] || member[i + 1] !== member[i])
 }
+
+const pointsOf = (c: WarpingCase, line: Line): [number, number][] => shownStations(c).map(i => [stationZ(c, i), valueAt(c, line, i)])
 
 export function comparedTwist(s: WarpingSolution): ComparedValue[] {
   const c = decisiveCase(s)
