@@ -8,7 +8,7 @@ const STEPS = 20
 const LAYER = [0.25, 0.5, 1, 1.5, 2, 3, 4, 6, 8]
 
 /** Places of all stations, both ends of every member among them, with what each end and load gives there. */
-export interface StationPlan { readonly members: readonly Prepared[], readonly start: Float64Array, readonly member: Int32Array, readonly z: Float64Array, readonly shape: Float64Array }
+export interface StationPlan { readonly members: readonly Prepared[], readonly start: Float64Array, readonly member: Int32Array, readonly z: Float64Array, readonly shape: Float64Array, /** Room for the state of one place, used again for each: there are thousands. */ readonly room: { readonly shape: Float64Array, readonly out: StateArrays } }
 
 export interface BarRun extends StateArrays { readonly plan: StationPlan, /** Largest gap of twist between members that meet, over the largest twist: rounding. */ readonly closure: number }
 
@@ -22,7 +22,7 @@ function placesOf({ member: { length }, u, k }: Prepared): number[] {
 export function planStations(members: readonly Prepared[]): StationPlan {
   const places = members.map(placesOf)
   const count = places.reduce((sum, one) => sum + one.length, 0)
-  const plan = { members, start: new Float64Array(members.length), member: new Int32Array(count), z: new Float64Array(count), shape: new Float64Array(SHAPE * count) }
+  const plan = { members, start: new Float64Array(members.length), member: new Int32Array(count), z: new Float64Array(count), shape: new Float64Array(SHAPE * count), room: { shape: new Float64Array(SHAPE), out: states(1) } }
   let [i, start] = [0, 0]
   members.forEach(({ member, u }, e) => {
     plan.start[e] = start
@@ -37,7 +37,12 @@ export function planStations(members: readonly Prepared[]): StationPlan {
   return plan
 }
 
-const states = (count: number): StateArrays => ({ phi: new Float64Array(count), rate: new Float64Array(count), B: new Float64Array(count), T: new Float64Array(count), Tw: new Float64Array(count) })
+/** In one piece of memory: each piece costs as much as it holds. */
+function states(count: number): StateArrays {
+  const all = new Float64Array(5 * count)
+  const part = (i: number) => all.subarray(i * count, (i + 1) * count)
+  return { phi: part(0), rate: part(1), B: part(2), T: part(3), Tw: part(4) }
+}
 
 /** The states of one load case at all stations. */
 export function runOf(plan: StationPlan, ends: readonly MemberEnds[], phi: Float64Array): BarRun {
@@ -65,7 +70,8 @@ export function placeOf({ plan, phi, rate, B, T, Tw }: BarRun, i: number): Place
 /** The state at z of a member. */
 export function stateWithin(plan: StationPlan, ends: readonly MemberEnds[], e: number, z: number): Place {
   const { member, u } = plan.members[e] as Prepared
-  const [shape, out] = [new Float64Array(SHAPE), states(1)]
+  const { shape, out } = plan.room
+  shape.fill(0)
   writeShape(member, u, z, shape, 0)
   writeState(member, u, ends[e] as MemberEnds, z, shape, 0, out, 0)
   const [T, Tw] = [out.T[0] as number, out.Tw[0] as number]

@@ -40,10 +40,10 @@ export function stressPeaks(groups: readonly FibreGroup[]): (inCase: StressCase)
 }
 
 /** Squares, with the station and fibre they stand at. */
-interface Found { readonly square: Float64Array, readonly station: Int32Array, readonly fibre: Int32Array }
+interface Found { readonly square: number[], readonly station: number[], readonly fibre: number[] }
 
 function peaksOfGroup(inCase: StressCase, group: FibreGroup, flat: Flat, weights: Weights): StressPeaks {
-  const found: Found = { square: new Float64Array(4).fill(-1), station: new Int32Array(4), fibre: new Int32Array(4) }
+  const found: Found = { square: [-1, -1, -1, -1], station: [0, 0, 0, 0], fibre: [0, 0, 0, 0] }
   const { run: { B, Tw, rate }, gamma, axial } = inCase
   const per = gamma === 0 ? 0 : 1 / gamma
   const look = (i: number) => {
@@ -55,7 +55,7 @@ function peaksOfGroup(inCase: StressCase, group: FibreGroup, flat: Flat, weights
   // The worst station of each of three actions first: what stands elsewhere then seldom exceeds what is known.
   for (const i of [largestOf(B), largestOf(rate), largestOf(Tw)]) look(i)
   for (let i = 0; i < B.length; i += 1) look(i)
-  const peak = (m: number): StressPeak => refined(inCase, group.fibres[found.fibre[m] as number] as Fibre, weights.subarray(2 * m, 2 * m + 2), found.station[m] as number)
+  const peak = (m: number): StressPeak => refined(inCase, group.fibres[found.fibre[m] as number] as Fibre, weights, m, found.station[m] as number)
   return { sigma: peak(0), tau: peak(1), mises: peak(2), circle: peak(3) }
 }
 
@@ -66,7 +66,7 @@ function largestOf(values: Float64Array): number {
 }
 
 /** Whether any fibre of the group could be worse here than the worst so far: most stations need no closer look. */
-function canExceed(most: Flat['most'], weights: Weights, square: Float64Array, stretch: number, slip: number, turn: number, axial: number): boolean {
+function canExceed(most: Flat['most'], weights: Weights, square: readonly number[], stretch: number, slip: number, turn: number, axial: number): boolean {
   const sigma = most[0] * stretch + most[1] * axial
   const tau = most[2] * turn + most[3] * slip
   for (let m = 0; m < 4; m += 1) {
@@ -93,17 +93,16 @@ function scan({ omega, across, weight, twist, flow }: Flat, weights: Weights, { 
 const STEPS = 3
 
 /** The measure at a place of the bar. */
-function measured({ gamma, axial }: StressCase, fibre: Fibre, weights: Weights, { B, Tw, rate }: Place): number {
-  const [a = 0, b = 0] = weights
+function measured({ gamma, axial }: StressCase, fibre: Fibre, weights: Weights, m: number, { B, Tw, rate }: Place): number {
   const { sigma, tauSv, tauOmega } = fibreStress(fibre, gamma, { B, Tw, rate, axial })
-  return Math.sqrt(a * sigma ** 2 + b * (tauSv + tauOmega) ** 2)
+  return Math.sqrt((weights[2 * m] as number) * sigma ** 2 + (weights[2 * m + 1] as number) * (tauSv + tauOmega) ** 2)
 }
 
 /** The largest between the neighbours of a station inside a member; a station at a node stands as it is. */
-function refined(inCase: StressCase, fibre: Fibre, weights: Weights, i: number): StressPeak {
+function refined(inCase: StressCase, fibre: Fibre, weights: Weights, m: number, i: number): StressPeak {
   const { run, ends } = inCase
   const { plan: { member, z } } = run
-  const value = (place: Place) => measured(inCase, fibre, weights, place)
+  const value = (place: Place) => measured(inCase, fibre, weights, m, place)
   let place = placeOf(run, i)
   let best = value(place)
   if (member[i - 1] !== member[i] || member[i + 1] !== member[i]) return { value: best, place, fibre }
