@@ -8,11 +8,13 @@ import { refuseMovedEngine } from '#server/notes/engine-check'
 import { expectSeen } from '#server/notes/expect-seen'
 import { moveIssue } from '#server/notes/move-issue'
 import { addPart } from '#server/notes/parts'
+import { prepareIssue } from '#server/notes/prepare-heavy'
 import { sign } from '#server/notes/signatures'
 import type { CommandContext } from '#server/utils/command-context'
 
 /** The checker signs that every step was followed; the content hash is fixed here. */
-export function passCheck(context: CommandContext, issueId: string, input: Pass): Promise<void> {
+export async function passCheck(context: CommandContext, issueId: string, input: Pass): Promise<void> {
+  await prepareIssue(context.em, issueId)
   return signOnIssue(context, issueId, 'pass', ['pass'], input.password, async (inside, issue, name, standing) => {
     const { em, actor, clock } = inside
     expectSeen(issue, input.expect)

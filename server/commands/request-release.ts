@@ -5,6 +5,7 @@ import { signOnIssue } from '#server/notes/act-on-issue'
 import { refuseMovedEngine } from '#server/notes/engine-check'
 import { expectSeen } from '#server/notes/expect-seen'
 import { addPart } from '#server/notes/parts'
+import { prepareIssue } from '#server/notes/prepare-heavy'
 import { sign } from '#server/notes/signatures'
 import type { Standing } from '#server/notes/standing'
 import type { CommandContext } from '#server/utils/command-context'
@@ -19,7 +20,8 @@ function acceptDeviations({ actor, clock }: CommandContext, { answers }: Standin
 }
 
 /** The approver signs the release. The issue is locked and a job is left for the worker, which makes the PDF and only then flips the state. */
-export function requestRelease(context: CommandContext, issueId: string, input: Release): Promise<void> {
+export async function requestRelease(context: CommandContext, issueId: string, input: Release): Promise<void> {
+  await prepareIssue(context.em, issueId)
   return signOnIssue(context, issueId, 'sign release', ['release'], input.password, async (inside, issue, name, standing) => {
     const { em, clock } = inside
     expectSeen(issue, input.expect)

@@ -13,6 +13,7 @@ import { findIssue, lockIssue } from '#server/notes/find-issue'
 import { mapRemarks } from '#server/notes/map-remarks'
 import { addPart } from '#server/notes/parts'
 import { takePen } from '#server/notes/pen'
+import { prepareSave } from '#server/notes/prepare-heavy'
 import { runCommand, type CommandContext } from '#server/utils/command-context'
 import { DomainError } from '#server/utils/domain-error'
 
@@ -45,7 +46,9 @@ async function refuseConflict(context: CommandContext, issue: Issue, baseSave: n
 
 /** One save: steps on a base save, checked, recomputed and stored in one transaction. A repeated key answers again and changes nothing. */
 export async function saveNote(context: CommandContext, issueId: string, input: SaveContent): Promise<Issue> {
-  const { note, letter } = await findIssue(context.em, issueId)
+  const found = await findIssue(context.em, issueId)
+  await prepareSave(found, input)
+  const { note, letter } = found
   const name = { chain: noteChain(note.id), act: 'save', subject: { type: 'issue', id: issueId, label: `${note.number} ${letter}` } }
   return runCommand(context, name, async (inside) => {
     const { em, actor, clock } = inside

@@ -1,4 +1,5 @@
 import { closeQueue, useQueue } from '#server/jobs/queue'
+import { closeOutlinePool } from '#server/outline/solve-outline'
 import { startValidation } from '#server/validation/validation-run'
 import { environment } from '#server/utils/environment'
 import { closeOrm, useOrm } from '#server/utils/orm'
@@ -12,6 +13,7 @@ export default defineNitroPlugin((nitro) => {
   console.info(`engine ${ENGINE_VERSION}`)
   startValidation()
   nitro.hooks.hook('close', async () => {
+    await closeOutlinePool()
     await closeQueue()
     await closeOrm()
   })

@@ -21,6 +21,7 @@ export const statusOf = {
   'too-large': 413,
   'not-this-kind': 415,
   'throttled': 429,
+  'engine-busy': 503,
 } as const
 export type ErrorCode = keyof typeof statusOf
 
