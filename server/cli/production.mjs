@@ -15,8 +15,9 @@ async function main() {
     databaseUrl: process.env.DATABASE_URL, baseUrl: process.env.TORQUILL_BASE_URL, authSecret: process.env.NUXT_AUTH_SECRET,
     dataDir: process.env.TORQUILL_DATA_DIR, smtpUrl: process.env.SMTP_URL, filesUrl: process.env.TORQUILL_FILES_URL,
   })
-  say(run(process.execPath, commandOf(build, 'migrate'), { env: { ...env, DATABASE_OWNER_URL: process.env.DATABASE_OWNER_URL } }).trim())
+  // Before anything is changed: a role that owns a table would make giving rights fail half-way.
   run(process.execPath, commandOf(build, 'check-role'), { env })
+  say(run(process.execPath, commandOf(build, 'migrate'), { env: { ...env, DATABASE_OWNER_URL: process.env.DATABASE_OWNER_URL } }).trim())
   delete env.DATABASE_OWNER_URL
   const port = Number(process.env.PORT ?? 3000)
   const services = await startServices(build, env, { port, onLine: say, onEnd: code => process.exit(code ?? 1) })

@@ -11,7 +11,7 @@ export async function addFile(context: CommandContext, issueId: string, upload: 
   const name = { chain: noteChain(note.id), act: purpose === 'figure' ? 'upload figure' : 'upload attachment', subject: { type: 'issue', id: issueId, label: note.number } }
   return runCommand(context, name, async (inside) => {
     const issue = await findIssue(inside.em, issueId)
-    await requireAbility(inside, issue, purpose === 'figure' ? ['write'] : ['remark', 'reply'])
+    await requireAbility(inside, issue, purpose === 'figure' ? ['write'] : ['reply', 'remark'])
     const file = await storeUpload(inside, issue, upload, purpose)
     await recordAct(inside, { ...name, new: { file: file.id, name: file.name, sha256: file.sha256, size: file.size } })
     return file

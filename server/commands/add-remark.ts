@@ -1,6 +1,5 @@
 import { randomUUID } from 'node:crypto'
 import { anchorHolds } from '#shared/note/anchors'
-import { readDocument } from '#shared/note/schema'
 import type { AddRemark } from '#shared/schemas/acts'
 import { recordAct } from '#server/audit/record'
 import { RemarkEntrySchema } from '#server/database/entities/remark-entry'
@@ -9,6 +8,7 @@ import { issueMailProps } from '#server/mail/issue-props'
 import { queueMail } from '#server/mail/queue-mail'
 import { actOnIssue } from '#server/notes/act-on-issue'
 import { attachmentOf } from '#server/notes/attachment'
+import { documentOf } from '#server/notes/reading'
 import type { CommandContext } from '#server/utils/command-context'
 import { DomainError } from '#server/utils/domain-error'
 
@@ -16,7 +16,7 @@ import { DomainError } from '#server/utils/domain-error'
 export function addRemark(context: CommandContext, issueId: string, input: AddRemark): Promise<void> {
   return actOnIssue(context, issueId, 'remark', ['remark'], async (inside, issue, name) => {
     const { em, actor, clock } = inside
-    if (!anchorHolds(readDocument(JSON.parse(issue.document)), input.anchor)) throw new DomainError('stale', 'The words you selected are not in the saved note. Select them again.')
+    if (!anchorHolds(documentOf(issue), input.anchor)) throw new DomainError('stale', 'The words you selected are not in the saved note. Select them again.')
     const fileId = await attachmentOf(inside, issue, input.fileId)
     const number = await em.count(RemarkSchema, { issue }) + 1
     const remark = em.create(RemarkSchema, {

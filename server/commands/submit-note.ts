@@ -6,6 +6,7 @@ import { queueMail } from '#server/mail/queue-mail'
 import { actOnIssue } from '#server/notes/act-on-issue'
 import { eligible } from '#server/notes/candidates'
 import { expectSeen } from '#server/notes/expect-seen'
+import { keepSnapshot } from '#server/notes/keep-snapshot'
 import { moveIssue } from '#server/notes/move-issue'
 import { addPart } from '#server/notes/parts'
 import { layPen } from '#server/notes/pen'
@@ -27,6 +28,7 @@ export function submitNote(context: CommandContext, issueId: string, input: Subm
     const { from, to } = moveIssue(issue, 'submit', clock())
     Object.assign(issue, { analyst: actor, checker, approver, contentHash: null })
     await em.flush()
+    await keepSnapshot(inside, issue)
     await layPen(inside, issue)
     await recordAct(inside, { ...name, old: { state: from }, new: { state: to, save: issue.saveNumber, checker: checker.id, approver: approver.id, contentHash: standing.content.hash, documentHash: issue.documentHash } })
     await queueMail(inside, {

@@ -15,7 +15,7 @@ const grants: Record<string, string> = {
   project_member: 'select, insert, delete',
   remark: 'select, insert, update',
   remark_entry: 'select, insert',
-  save: 'select, insert, update (label)',
+  save: 'select, insert, update (label, snapshot)',
   signature: 'select, insert, update (voided_at, void_reason)',
   stored_file: 'select, insert',
   tick: 'select, insert, update, delete',

@@ -1,6 +1,7 @@
 import { Migration } from '@mikro-orm/migrations'
 import { tables } from './migrations/001-tables'
 import { refusals } from './migrations/002-refusals'
+import { actSnapshots } from './migrations/003-act-snapshots'
 
 class Tables extends Migration {
   override up() {
@@ -14,8 +15,15 @@ class Refusals extends Migration {
   }
 }
 
+class ActSnapshots extends Migration {
+  override up() {
+    this.addSql(actSnapshots)
+  }
+}
+
 /** Migrations in order, listed by hand so that they are bundled. A migration that has run is never edited. */
 export const migrations = [
   { name: '001-tables', class: Tables },
   { name: '002-refusals', class: Refusals },
+  { name: '003-act-snapshots', class: ActSnapshots },
 ]

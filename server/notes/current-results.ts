@@ -1,15 +1,12 @@
 import type { CalcResult, Guard } from '#shared/calc/types'
 import { calculationsOf, type NoteCalculation } from '#shared/note/calculations'
-import { readDocument } from '#shared/note/schema'
 import type { Issue } from '#server/database/entities/issue'
 import { DomainError } from '#server/utils/domain-error'
-import type { Results } from './evaluate-document'
-
-export const resultsOf = (issue: Pick<Issue, 'results'>): Results => JSON.parse(issue.results) as Results
+import { documentOf, resultsOf } from './reading'
 
 /** A calculation of the issue as saved. @throws DomainError not-found */
 export function calculationIn(issue: Issue, calcId: string): NoteCalculation {
-  const found = calculationsOf(readDocument(JSON.parse(issue.document))).find(c => c.id === calcId)
+  const found = calculationsOf(documentOf(issue)).find(c => c.id === calcId)
   if (!found) throw new DomainError('not-found', 'This calculation is not in the saved note any more.')
   return found
 }

@@ -1,15 +1,14 @@
 import { evaluateNote } from '#shared/calc/evaluate-note'
 import { compareEvaluations } from '#shared/calc/result-compare'
 import { calculationsOf } from '#shared/note/calculations'
-import { readDocument } from '#shared/note/schema'
 import type { Issue } from '#server/database/entities/issue'
 import { DomainError } from '#server/utils/domain-error'
-import { resultsOf } from './current-results'
+import { documentOf, resultsOf } from './reading'
 
 /** Calculations that the engine of today computes otherwise than the frozen results say, by label. */
 export function movedCalculations(issue: Issue): { label: string, keys: string[] }[] {
   const results = resultsOf(issue)
-  const calculations = calculationsOf(readDocument(JSON.parse(issue.document)))
+  const calculations = calculationsOf(documentOf(issue))
   const { results: now } = evaluateNote(calculations)
   return calculations.flatMap((calculation) => {
     const [stored, again] = [results[calculation.id], now[calculation.id]]

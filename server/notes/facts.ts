@@ -4,6 +4,7 @@ import { contributedTo, partIn } from '#shared/review/eligibility'
 import type { Refusal, RefusalKind, ReviewFacts } from '#shared/review/facts'
 import { compareLetters } from '#shared/review/letters'
 import { isOnItsWay, wasReleased } from '#shared/review/states'
+import { moveOf } from '#shared/review/transitions'
 import type { Abilities, Act } from '#shared/schemas/issue-view'
 import type { Issue } from '#server/database/entities/issue'
 import type { Person } from '#server/database/entities/person'
@@ -13,6 +14,8 @@ import { DomainError, type ErrorCode } from '#server/utils/domain-error'
 import { penHolder } from './pen'
 import { remainingNow, type RemainingNow } from './remaining-now'
 import { loadStanding, type Standing } from './standing'
+
+const nothing: RemainingNow = { submit: [], pass: [], release: [] }
 
 type Asker = Pick<CommandContext, 'em' | 'clock'> & { actor: Person }
 
@@ -61,7 +64,8 @@ function refused(act: Act, refusal: Refusal, remaining: RemainingNow): DomainErr
 /** Refuses unless one of the acts can be done now. @throws DomainError with the sentence of the first act */
 export async function requireAbility(context: CommandContext, issue: Issue, acts: [Act, ...Act[]]): Promise<Standing> {
   const standing = await loadStanding(context.em, issue)
-  const remaining = remainingNow(standing)
+  // What remains takes a scan of the whole text; most acts do not rest on it.
+  const remaining = acts.some(act => moveOf(issue.state, act)?.needs.includes('complete')) ? remainingNow(standing) : nothing
   const facts = await reviewFacts(context, standing, remaining)
   const refusals = acts.map(act => refusalOf(act, facts))
   const first = refusals[0]

@@ -20,9 +20,8 @@ export async function lockIssue(em: EntityManager, id: string): Promise<Issue> {
   return locked
 }
 
-/** The issue that the next letter is opened from: the newest that is or was in force. @throws DomainError wrong-state */
-export async function newestReleased(em: EntityManager, noteId: string): Promise<Issue> {
-  const issue = await em.findOne(IssueSchema, { note: noteId, releasedAt: { $ne: null } }, { orderBy: { createdAt: 'desc' } })
-  if (!issue) throw new DomainError('wrong-state', 'No issue of this note has been released yet; finish the one that is on its way.')
-  return issue
+/** The issue that the next letter is opened from: the newest that is or was in force; where there is none, the newest, whose state then refuses. */
+export async function issueToFollow(em: EntityManager, noteId: string): Promise<Issue> {
+  const newest = { orderBy: { createdAt: 'desc' } } as const
+  return await em.findOne(IssueSchema, { note: noteId, releasedAt: { $ne: null } }, newest) ?? em.findOneOrFail(IssueSchema, { note: noteId }, newest)
 }

@@ -1,8 +1,6 @@
-import { readDocument } from '#shared/note/schema'
 import { remaining, type RemainingLists } from '#shared/review/remaining'
 import { presentAnswers, presentCheckSheet, presentLoose, presentRemarks, presentTicks } from '#server/presenters/issue-parts'
-import { resultsOf } from './current-results'
-import { looseNumbersOf } from './loose'
+import { documentOf, looseNumbersOf, resultsOf } from './reading'
 import type { Standing } from './standing'
 
 export type RemainingNow = RemainingLists
@@ -12,7 +10,7 @@ export function remainingNow(standing: Standing): RemainingNow {
   const { issue, content } = standing
   const results = resultsOf(issue)
   return remaining({
-    doc: readDocument(JSON.parse(issue.document)), results,
+    doc: documentOf(issue), results,
     answers: presentAnswers(standing, results), loose: presentLoose(standing, looseNumbersOf(issue)), remarks: presentRemarks(standing, new Map()),
     ticks: presentTicks(standing), sheet: presentCheckSheet(standing),
     changeNoted: issue.changeNote.trim() !== '', contentAsPassed: issue.state === 'for approval' ? issue.contentHash === content.hash : null,

@@ -4,7 +4,8 @@ import { tickHash } from '#shared/calc/tick-hash'
 import type { NoteCalculation } from '#shared/note/calculations'
 import { GuardAnswerSchema, type GuardAnswer } from '#server/database/entities/guard-answer'
 import type { Issue } from '#server/database/entities/issue'
-import { calculationIn, resultIn, resultsOf } from './current-results'
+import { calculationIn, resultIn } from './current-results'
+import { resultsOf } from './reading'
 
 /** SHA-256 over what a tick stands on. */
 export function tickHashOf(issue: Issue, calculation: NoteCalculation, answers: Pick<GuardAnswer, 'calcId' | 'guardKey' | 'kind' | 'text'>[]): string {

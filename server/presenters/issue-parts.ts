@@ -1,11 +1,11 @@
 import { answerLapsed } from '#shared/calc/lapse'
 import { calculationsOf } from '#shared/note/calculations'
 import type { LooseNumber } from '#shared/note/loose-numbers'
-import { readDocument } from '#shared/note/schema'
 import { sheetLines } from '#shared/review/check-sheet'
 import type { AnswerView, CheckItemView, LooseView, PersonRef, RemarkView, SignatureView, TickView } from '#shared/schemas/issue-view'
 import type { GuardAnswer } from '#server/database/entities/guard-answer'
 import type { Results } from '#server/notes/evaluate-document'
+import { documentOf } from '#server/notes/reading'
 import { sheetFactsOf } from '#server/notes/sheet-facts'
 import type { Standing } from '#server/notes/standing'
 import { tickHashOf } from '#server/notes/tick-facts'
@@ -50,7 +50,7 @@ export function presentRemarks({ remarks, entries }: Standing, fileNames: Map<st
 }
 
 export function presentTicks({ issue, ticks, answers }: Standing): TickView[] {
-  const calculations = new Map(calculationsOf(readDocument(JSON.parse(issue.document))).map(c => [c.id, c]))
+  const calculations = new Map(calculationsOf(documentOf(issue)).map(c => [c.id, c]))
   return ticks.map((t) => {
     const calculation = calculations.get(t.calcId)
     return { calcId: t.calcId, by: personRef(t.person), at: t.at.toISOString(), save: t.saveNumber, holds: calculation !== undefined && tickHashOf(issue, calculation, answers) === t.hash }

@@ -24,8 +24,11 @@ async function files(): Promise<Storage> {
   return storage
 }
 
+/** @throws when the store has not taken it: a bucket that is not there answers 404, which the driver passes over in silence. */
 export async function putFile(key: string, bytes: Buffer): Promise<void> {
-  await (await files()).setItemRaw(key, bytes)
+  const store = await files()
+  await store.setItemRaw(key, bytes)
+  if (!await store.hasItem(key)) throw new Error(`file ${key} was not taken by the store`)
 }
 
 /** @throws when the store has lost it. */

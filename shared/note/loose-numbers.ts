@@ -4,8 +4,8 @@ import { calculationsOf } from '#shared/note/calculations'
 import { contextOf } from '#shared/note/loose/context'
 import type { FactIndex } from '#shared/note/loose/facts'
 import { factIndex } from '#shared/note/loose/facts'
-import type { Judgement } from '#shared/note/loose/judge'
 import { judge } from '#shared/note/loose/judge'
+import { ScanMemory, type Judged } from '#shared/note/loose/memory'
 import type { Quantity } from '#shared/note/loose/quantities'
 import { quantitiesIn } from '#shared/note/loose/quantities'
 import type { ScannedText } from '#shared/note/loose/texts'
@@ -58,7 +58,7 @@ export interface NoteNames {
   noteTitle?: string
 }
 
-interface Found { scanned: ScannedText, quantity: Quantity, judgement: Judgement }
+interface Found extends Judged { scanned: ScannedText }
 
 const engineValue = ({ token, unit }: Quantity) => unit === null ? null : toEngine(token.value, unit)
 
@@ -72,10 +72,10 @@ function looseNumber({ scanned, quantity, judgement }: Found, ordinal: number): 
   }
 }
 
-function scanText(scanned: ScannedText, index: FactIndex): Found[] {
+function scanText(scanned: ScannedText, index: FactIndex): Judged[] {
   return quantitiesIn(scanned, index).map((quantity) => {
     const context = contextOf(scanned.text, quantity.from, quantity.to, scanned.beyond, index)
-    return { scanned, quantity, judgement: judge(quantity, context, index) }
+    return { quantity, judgement: judge(quantity, context, index) }
   })
 }
 
@@ -92,10 +92,13 @@ function scanText(scanned: ScannedText, index: FactIndex): Found[] {
  * numbers that are part of a name such as a drawing number, an alloy or a standard.
  *
  * @param results Evaluations by the id of the calculation; one that failed gives nothing to compare with.
+ * @param memory Of the scan before, where the caller keeps one; it saves time and changes nothing.
  */
-export function scanLooseNumbers(doc: Node, results: Readonly<Record<string, Evaluation>>, names: NoteNames = {}): LooseNumber[] {
-  const index = factIndex(calculationsOf(doc), results)
-  const found = [...titleText(names.noteTitle ?? ''), ...textsOf(doc)].flatMap(scanned => scanText(scanned, index))
+export function scanLooseNumbers(doc: Node, results: Readonly<Record<string, Evaluation>>, names: NoteNames = {}, memory = new ScanMemory()): LooseNumber[] {
+  const calculations = calculationsOf(doc)
+  const index = memory.begin(results, calculations.map(({ id, label }) => `${id} ${label}`).join('\n'), () => factIndex(calculations, results))
+  const found = [...titleText(names.noteTitle ?? ''), ...textsOf(doc)]
+    .flatMap(scanned => memory.recall(scanned, () => scanText(scanned, index)).map((judged): Found => ({ ...judged, scanned })))
   const counts = new Map<string, number>()
   return found.map((item) => {
     const key = JSON.stringify([item.scanned.blockId, item.scanned.text.slice(item.quantity.from, item.quantity.to)])

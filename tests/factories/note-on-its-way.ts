@@ -12,20 +12,22 @@ import { submitNote } from '#server/commands/submit-note'
 import { tickCalculation } from '#server/commands/tick-calculation'
 import { GuardAnswerSchema } from '#server/database/entities/guard-answer'
 import { IssueSchema, type Issue } from '#server/database/entities/issue'
-import { resultsOf } from '#server/notes/current-results'
+import { resultsOf } from '#server/notes/reading'
 import { sheetFactsOf } from '#server/notes/sheet-facts'
 import { calculation, paragraph, withId } from './note-document'
 import type { makeTeam } from './people'
 import { contextOf, password } from './people'
-import { stripInputs } from './open-section'
+import { thickStripInputs } from './open-section'
 import { insertBlock, insideSection, saveOf } from './steps'
 
 export type Team = Awaited<ReturnType<typeof makeTeam>>
 
 export const issueOf = (orm: MikroORM, id: string) => orm.em.fork().findOneOrFail(IssueSchema, { id }, { populate: ['note'] })
+/** The first calculation of an issue. */
+export const calculationIn = (issue: Issue) => Object.keys(resultsOf(issue))[0] ?? ''
 export const expectOf = ({ state, saveNumber }: Issue) => ({ state, save: saveNumber })
 
-/** A draft that may be submitted: every section settled, one calculation, its guards answered. */
+/** A draft that may be submitted: every section settled, one calculation with a caution, its guards answered. */
 export async function draftReady(orm: MikroORM, team: Team): Promise<{ id: string, calcId: string }> {
   const context = () => contextOf(orm, team.analyst)
   const { id } = await createNote(context(), { projectId: team.project.id, title: 'Strip under torsion', part: 'X-1', drawingIssue: 'A' })
@@ -36,7 +38,7 @@ export async function draftReady(orm: MikroORM, team: Team): Promise<{ id: strin
       change.setNodeAttribute(insideSection(doc, section.key) - 1, 'notApplicable', 'the part is a plain strip')
     }
     insertBlock('scope', paragraph('Both hands of the strip.'))(change, change.doc)
-    insertBlock('section-analysis', withId(calcId, calculation('Strip', { inputs: stripInputs() as unknown as Record<string, unknown> })))(change, change.doc)
+    insertBlock('section-analysis', withId(calcId, calculation('Strip', { inputs: thickStripInputs() as unknown as Record<string, unknown> })))(change, change.doc)
   }))
   const result = resultsOf(await issueOf(orm, id))[calcId]
   for (const guard of result?.ok ? result.result.guards.filter(g => g.severity !== 'information') : []) {
@@ -45,25 +47,45 @@ export async function draftReady(orm: MikroORM, team: Team): Promise<{ id: strin
   return { id, calcId }
 }
 
+async function submitted(orm: MikroORM, team: Team, id: string) {
+  await submitNote(contextOf(orm, team.analyst), id, { expect: expectOf(await issueOf(orm, id)), checkerId: team.checker.id, approverId: team.approver.id })
+}
+
 export async function inCheck(orm: MikroORM, team: Team) {
   const draft = await draftReady(orm, team)
-  const issue = await issueOf(orm, draft.id)
-  await submitNote(contextOf(orm, team.analyst), draft.id, { expect: expectOf(issue), checkerId: team.checker.id, approverId: team.approver.id })
+  await submitted(orm, team, draft.id)
   return draft
 }
 
-/** In check, with every tick, judgement and item of the sheet given. */
+/** Every tick, judgement and item of the sheet given to an issue in check. */
+async function check(orm: MikroORM, team: Team, id: string) {
+  const context = () => contextOf(orm, team.checker)
+  const issue = await issueOf(orm, id)
+  for (const answer of await orm.em.fork().find(GuardAnswerSchema, { issue: id })) await judgeAnswer(context(), id, answer.id, { accepted: true, note: '' })
+  for (const calcId of Object.keys(resultsOf(issue))) await tickCalculation(context(), id, { calcId, ticked: true })
+  for (const { item } of checkItems(sheetFactsOf(issue))) await fillCheckItem(context(), id, { item, verdict: 'ok', evidence: 'looked at' })
+}
+
+/** In check, with all that a pass takes. */
 export async function checked(orm: MikroORM, team: Team) {
   const draft = await inCheck(orm, team)
-  const context = () => contextOf(orm, team.checker)
-  for (const answer of await orm.em.fork().find(GuardAnswerSchema, { issue: draft.id })) await judgeAnswer(context(), draft.id, answer.id, { accepted: true, note: '' })
-  await tickCalculation(context(), draft.id, { calcId: draft.calcId, ticked: true })
-  for (const { item } of checkItems(sheetFactsOf(await issueOf(orm, draft.id)))) await fillCheckItem(context(), draft.id, { item, verdict: 'ok', evidence: 'looked at' })
+  await check(orm, team, draft.id)
   return draft
+}
+
+async function pass(orm: MikroORM, team: Team, id: string) {
+  await passCheck(contextOf(orm, team.checker), id, { expect: expectOf(await issueOf(orm, id)), password })
 }
 
 export async function forApproval(orm: MikroORM, team: Team) {
   const draft = await checked(orm, team)
-  await passCheck(contextOf(orm, team.checker), draft.id, { expect: expectOf(await issueOf(orm, draft.id)), password })
+  await pass(orm, team, draft.id)
   return draft
+}
+
+/** Takes a complete draft of a later letter through its check. */
+export async function passedAgain(orm: MikroORM, team: Team, id: string) {
+  await submitted(orm, team, id)
+  await check(orm, team, id)
+  await pass(orm, team, id)
 }

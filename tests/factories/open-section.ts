@@ -68,6 +68,12 @@ export function stripInputs(): OpenSectionInputs {
   }
 }
 
+/** The same, 8 mm thick: with b/t = 7.5 its slenderness needs an answer (G-02 of the methods reference asks below ten). */
+export function thickStripInputs(): OpenSectionInputs {
+  const inputs = stripInputs()
+  return { ...inputs, walls: inputs.walls.map(wall => ({ ...wall, t: mm('8') })) }
+}
+
 /** The hat stiffener of the demonstration with its twelve imposed rates of twist. */
 export function hatInputs(): OpenSectionInputs {
   const rates: [string, string, string][] = [

@@ -28,6 +28,11 @@ function sentence(text: string, from: number, to: number): { text: string, at: n
   return { text: `${head}${text.slice(from, to)}${tail}`, at: head.length }
 }
 
+function once<T>(make: () => T): () => T {
+  let made: { value: T } | null = null
+  return () => (made ??= { value: make() }).value
+}
+
 interface Mention { id: string, at: number }
 
 function caseMentions(text: string, known: Set<string>): Mention[] {
@@ -59,14 +64,21 @@ function nearest(mentions: Mention[], at: number): Set<string> {
  */
 export function contextOf(text: string, from: number, to: number, beyond: string, index: FactIndex): Context {
   const { text: around, at } = sentence(text, from, to)
-  const cases = nearest(caseMentions(around, index.cases), at)
-  const walls = nearest(wallMentions(around, index.walls), at)
   const whole = `${around} ${beyond}`
+  const named = (mentions: (text: string) => Mention[]) => {
+    const here = nearest(mentions(around), at)
+    return here.size > 0 ? here : new Set(mentions(beyond).map(mention => mention.id))
+  }
+  // Read when asked for: most numbers are near no result, and nobody asks what their sentence speaks of.
+  const cases = once(() => named(words => caseMentions(words, index.cases)))
+  const walls = once(() => named(words => wallMentions(words, index.walls)))
+  const words = once(() => new Set(contentWords(whole)))
+  const tokens = once(() => new Set([...whole.matchAll(NAME)].map(match => match[0].replace(/['’]/g, '′'))))
   return {
-    cases: cases.size > 0 ? cases : new Set(caseMentions(beyond, index.cases).map(mention => mention.id)),
-    walls: walls.size > 0 ? walls : new Set(wallMentions(beyond, index.walls).map(mention => mention.id)),
-    words: new Set(contentWords(whole)),
-    tokens: new Set([...whole.matchAll(NAME)].map(match => match[0].replace(/['’]/g, '′'))),
+    get cases() { return cases() },
+    get walls() { return walls() },
+    get words() { return words() },
+    get tokens() { return tokens() },
   }
 }
 

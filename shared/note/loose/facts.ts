@@ -3,7 +3,7 @@ import type { CalcResult, Evaluation, MarginRow, Output } from '#shared/calc/typ
 import type { NoteCalculation } from '#shared/note/calculations'
 import { symbolBase, symbolKey } from '#shared/note/loose/symbols'
 import { showQuantity } from '#shared/units/display'
-import { fromEngine } from '#shared/units/units'
+import { fromEngine, unitFits } from '#shared/units/units'
 import type { Dimension, UnitId } from '#shared/units/units'
 
 export interface Fact {
@@ -34,6 +34,8 @@ export interface FactIndex {
   all: Fact[]
   /** By dimension, in rising order of magnitude. */
   byDimension: Map<Dimension, Fact[]>
+  /** The lists of `byDimension` that a unit fits, kept as they are asked for. */
+  inUnit: Map<UnitId, Fact[][]>
   /** All, in rising order of the magnitude they have in their own unit. */
   byOwn: Fact[]
   bySymbol: Map<string, Fact[]>
@@ -109,7 +111,7 @@ export function factIndex(calculations: readonly NoteCalculation[], results: Rea
     const evaluation = Object.hasOwn(results, calculation.id) ? results[calculation.id] : undefined
     return evaluation?.ok ? factsOf(evaluation.result, calculation) : []
   }).filter(fact => Number.isFinite(fact.value))
-  const index: FactIndex = { all, byDimension: new Map(), byOwn: [...all].sort((a, b) => Math.abs(a.own) - Math.abs(b.own)), bySymbol: new Map(), byName: new Map(), cases: new Set(), walls: new Set() }
+  const index: FactIndex = { all, byDimension: new Map(), inUnit: new Map(), byOwn: [...all].sort((a, b) => Math.abs(a.own) - Math.abs(b.own)), bySymbol: new Map(), byName: new Map(), cases: new Set(), walls: new Set() }
   for (const fact of all) {
     push(index.byDimension, fact.dimension, fact)
     if (fact.symbol !== '') push(index.bySymbol, fact.symbol, fact)
@@ -121,6 +123,15 @@ export function factIndex(calculations: readonly NoteCalculation[], results: Rea
   }
   for (const facts of index.byDimension.values()) facts.sort((a, b) => Math.abs(a.value) - Math.abs(b.value))
   return index
+}
+
+/** The facts a unit can state, each dimension in rising order of magnitude. */
+export function factsIn(unit: UnitId, index: FactIndex): Fact[][] {
+  const known = index.inUnit.get(unit)
+  if (known) return known
+  const found = [...index.byDimension].filter(([dimension]) => unitFits(unit, dimension)).map(([, sorted]) => sorted)
+  index.inUnit.set(unit, found)
+  return found
 }
 
 /** Facts whose magnitude lies from `low` to `high`, in a list sorted by that magnitude. */

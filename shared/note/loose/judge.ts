@@ -2,7 +2,7 @@
 import { relation } from '#shared/note/loose/context'
 import type { Context } from '#shared/note/loose/context'
 import type { Fact, FactIndex } from '#shared/note/loose/facts'
-import { factsBetween } from '#shared/note/loose/facts'
+import { factsBetween, factsIn } from '#shared/note/loose/facts'
 import { agrees, engineRange } from '#shared/note/loose/precision'
 import type { Quantity } from '#shared/note/loose/quantities'
 import type { Slip } from '#shared/note/loose/slips'
@@ -45,8 +45,7 @@ function matching(quantity: Quantity, index: FactIndex): Fact[] {
   if (beside.length > 0) return beside.filter(fact => states(quantity, fact))
   if (unit === null) return []
   const [low, high] = engineRange(token, unit)
-  return [...index.byDimension].filter(([dimension]) => unitFits(unit, dimension))
-    .flatMap(([, sorted]) => factsBetween(sorted, low, high))
+  return factsIn(unit, index).flatMap(sorted => factsBetween(sorted, low, high))
     .filter(fact => !fact.truncated && agrees(token, fact, unit))
 }
 
@@ -128,6 +127,7 @@ function believed(slips: Slip[], quantity: Quantity, context: Context): Slip[] {
     return level === 3 ? 2 : NEEDED_DIGITS[slip.kind][level]
   }
   const case_ = ({ fact }: Slip) => fact.caseId !== null && context.cases.has(fact.caseId) ? 1 : 0
+  if (slips.length === 0) return []
   return slips
     .filter(slip => quantity.token.digits.length - Math.min(quantity.token.trailingZeros, quantity.token.digits.length - 2) >= needed(slip)
       && (context.cases.size === 0 || slip.fact.caseId === null || case_(slip) === 1))
@@ -139,11 +139,13 @@ function believed(slips: Slip[], quantity: Quantity, context: Context): Slip[] {
 /** Compares one quantity with the results of the note. */
 export function judge(quantity: Quantity, context: Context, index: FactIndex): Judgement {
   const matches = grouped(matching(quantity, index))
-  const byCase = fitting(matches, context.cases, 'caseId', index)
-  if (byCase.meant) return stray(matches, byCase.meant, 'caseId', quantity, context)
-  const byWall = fitting(byCase.groups, context.walls, 'wall', index)
-  if (byWall.meant) return stray(byCase.groups, byWall.meant, 'wall', quantity, context)
-  if (byWall.groups.length > 0) return agreement(byWall.groups, quantity, context)
+  if (matches.length > 0) {
+    const byCase = fitting(matches, context.cases, 'caseId', index)
+    if (byCase.meant) return stray(matches, byCase.meant, 'caseId', quantity, context)
+    const byWall = fitting(byCase.groups, context.walls, 'wall', index)
+    if (byWall.meant) return stray(byCase.groups, byWall.meant, 'wall', quantity, context)
+    if (byWall.groups.length > 0) return agreement(byWall.groups, quantity, context)
+  }
   const unrelated: Judgement = { verdict: 'unrelated', candidates: [], reason: 'No result of the note is near it. Explain where it comes from.' }
   if (quantity.foreign) return unrelated
   const units = quantity.unit !== null ? [quantity.unit] : [...new Set(quantity.beside.map(fact => fact.unit))]

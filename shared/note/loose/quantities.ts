@@ -37,10 +37,20 @@ function dateSpans(text: string): [number, number][] {
   return [...text.matchAll(DATE)].map(match => [match.index, match.index + match[0].length])
 }
 
+/** The numbers that are no part of a date. Both lists are in order, so one walk does. */
+function outside(tokens: NumberToken[], dates: [number, number][]): NumberToken[] {
+  let next = 0
+  return tokens.filter((token) => {
+    while ((dates[next]?.[1] ?? Infinity) < token.to) next += 1
+    const date = dates[next]
+    return !date || token.from < date[0] - 1
+  })
+}
+
 /** Reads the numbers with their units; a number in a list takes the unit at the end of the list. */
 function readNumbers(text: string): Read[] {
   const dates = dateSpans(text)
-  const tokens = numberTokens(text).filter(token => !dates.some(([from, to]) => token.from >= from - 1 && token.to <= to))
+  const tokens = outside(numberTokens(text), dates)
   const reads: Read[] = []
   for (const token of tokens) {
     const found = unitAt(text, token.to, !token.plain)

@@ -4,7 +4,7 @@
  * The list is what makes *near* exact: anything else is unrelated.
  */
 import type { Fact, FactIndex } from '#shared/note/loose/facts'
-import { factsBetween } from '#shared/note/loose/facts'
+import { factsBetween, factsIn } from '#shared/note/loose/facts'
 import type { NumberToken } from '#shared/note/loose/number-tokens'
 import { isValue } from '#shared/note/loose/precision'
 import { toEngine, unitFits, unitsOf } from '#shared/units/units'
@@ -71,12 +71,12 @@ function unitVariants(token: NumberToken, unit: UnitId, index: FactIndex): Varia
   return [...others].map(other => ({ kind: 'unit', how: `it is right in ${other || 'no unit'}, not in ${unit || 'no unit'}`, value: token.value, place: token.place, unit: other }))
 }
 
-function hits(variant: Variant, index: FactIndex, sameKindAs: UnitId): Fact[] {
+function hits(variant: Variant, index: FactIndex, sameKind: readonly Fact[][]): Fact[] {
   const found: Fact[] = []
-  for (const [dimension, sorted] of index.byDimension) {
-    if (!unitFits(variant.unit, dimension) || !unitFits(sameKindAs, dimension)) continue
-    const middle = Math.abs(toEngine(variant.value, variant.unit))
-    const spread = Math.abs(toEngine(variant.place, variant.unit) - toEngine(0, variant.unit))
+  const middle = Math.abs(toEngine(variant.value, variant.unit))
+  const spread = Math.abs(toEngine(variant.place, variant.unit) - toEngine(0, variant.unit))
+  for (const sorted of factsIn(variant.unit, index)) {
+    if (!sameKind.includes(sorted)) continue
     found.push(...factsBetween(sorted, middle - spread, middle + spread).filter(fact => !fact.truncated && isValue(variant.value, variant.place / 2, fact, variant.unit)))
   }
   return found
@@ -94,6 +94,7 @@ function kindSlips(token: NumberToken, unit: UnitId, index: FactIndex): Slip[] {
 /** Every slip that would explain the number, in the order in which they are believed. */
 export function slipsOf(token: NumberToken, unit: UnitId, index: FactIndex): Slip[] {
   if (token.digits.length < 2 || token.value === 0) return []
+  const sameKind = factsIn(unit, index)
   const variants = [...unitVariants(token, unit, index), ...digitVariants(token, unit), ...scaleVariants(token, unit)]
-  return [...variants.flatMap(variant => hits(variant, index, unit).map(fact => ({ kind: variant.kind, fact, how: variant.how }))), ...kindSlips(token, unit, index)]
+  return [...variants.flatMap(variant => hits(variant, index, sameKind).map(fact => ({ kind: variant.kind, fact, how: variant.how }))), ...kindSlips(token, unit, index)]
 }

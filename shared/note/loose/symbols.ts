@@ -47,7 +47,8 @@ function peel(before: string): { rest: string, equated: boolean } {
 
 /** In a chain `θ′ = T/(GJ) = 0.0428` the number belongs to the symbol at its head. */
 function headOfChain(before: string): string | null {
-  const clause = /[^.;,\n]{0,120}$/.exec(before.slice(-120))?.[0] ?? ''
+  const near = before.slice(-120)
+  const clause = near.slice(Math.max(...['.', ';', ',', '\n'].map(end => near.lastIndexOf(end))) + 1)
   const first = clause.indexOf('=')
   if (first < 0 || first === clause.lastIndexOf('=') || !EQUAL_SIGN.test(clause)) return null
   return LAST_WORD.exec(clause.slice(0, first).trimEnd())?.[1] ?? null

@@ -35,10 +35,12 @@ function equationText(blockId: unknown, tex: unknown): ScannedText[] {
 /** An equation inside a paragraph has the place of its atom. */
 function inlineEquations(block: Node): ScannedText[] {
   const found: ScannedText[] = []
+  // Bounded, or a paragraph of many equations would be read once for each.
+  const beyond = blockText(block).replaceAll(ATOM, ' ').slice(0, 300)
   block.forEach((node, offset) => {
     if (node.type.name !== 'inlineEquation') return
     const { text } = plainTex(String(node.attrs.tex))
-    found.push({ blockId: String(block.attrs.id), field: 'text', text, from: () => offset, to: () => offset + 1, beyond: blockText(block).replaceAll(ATOM, ' '), headings: [] })
+    found.push({ blockId: String(block.attrs.id), field: 'text', text, from: () => offset, to: () => offset + 1, beyond, headings: [] })
   })
   return found
 }
@@ -53,11 +55,12 @@ function tableTexts(table: Node): ScannedText[] {
   const found: ScannedText[] = []
   table.forEach((row, _, rowIndex) => {
     const label = row.firstChild?.textContent ?? ''
+    const words = row.textBetween(0, row.content.size, ' ', ' ').slice(0, 300)
     row.forEach((cell, __, column) => {
       const heading = rowIndex > 0 && column < (header?.childCount ?? 0) ? header?.child(column).textContent ?? '' : ''
       const headings = [heading, column > 0 ? label : ''].filter(Boolean)
       cell.descendants((node) => {
-        if (node.isTextblock) found.push(...blockTexts(node, `${heading} ${row.textBetween(0, row.content.size, ' ', ' ')}`.slice(0, 300), headings))
+        if (node.isTextblock) found.push(...blockTexts(node, `${heading} ${words}`.slice(0, 300), headings))
         return !node.isTextblock
       })
     })
