@@ -35,6 +35,10 @@ const spans: ReferenceRow[] = [
   row('§5.1', 'end twist of a bar whose GJ is linear', 'GJ 1e9 → 3e9 N·mm², L 500 mm, T 100 N·m', 1e5 * 500 * Math.log(3) / 2e9, 'rad', rel(1e-12), 'logarithm, algebra', e => solve(e, linear, [rigid(0)], { torques: [{ node: 1, T: 1e5 }] }).response.nodes[1]?.phi ?? Number.NaN),
   row('§5.1', 'end twist of a cantilever under a uniform torque', 'Ø30×400, m 50 N·mm/mm', 50 * 400 ** 2 / (2 * G * Math.PI / 2 * 15 ** 4), 'rad', rel(1e-12), 'm L²/2GJ', e => solve(e, [stepped[0]!], [rigid(0)], { distributed: [{ segment: 0, m1: 50, m2: 50 }] }).response.nodes[1]?.phi ?? Number.NaN),
   row('§5.1', 'end twist of a cantilever under a triangular torque', 'Ø30×400, m 0 → 60 N·mm/mm', 60 * 400 ** 2 / (3 * G * Math.PI / 2 * 15 ** 4), 'rad', rel(1e-12), 'm L²/3GJ', e => solve(e, [stepped[0]!], [rigid(0)], { distributed: [{ segment: 0, m1: 0, m2: 60 }] }).response.nodes[1]?.phi ?? Number.NaN),
+  row('§5.1', 'largest torque of a cantilever where the torque applied along it changes sense', 'L 400 mm, m 40 → −60 N·mm/mm: zero at 160 mm', -60 * 240 / 2, 'N·mm', rel(1e-12), 'area of the triangle beyond, algebra', (e) => {
+    const { bar, response } = solve(e, [stepped[0]!], [rigid(0)], { distributed: [{ segment: 0, m1: 40, m2: -60 }] })
+    return bar.turns(response).reduce((most, at) => (Math.abs(at.T) > Math.abs(most) ? at.T : most), 0)
+  }),
   row('§5.2', 'twist of a bar on a spring', 'Ø30×400, spring 1e6 N·mm/rad, T 100 N·m', 1e5 / 1e6 + 1e5 * 400 / (G * Math.PI / 2 * 15 ** 4), 'rad', rel(1e-12), 'springs in series', e => solve(e, [stepped[0]!], [{ node: 0, stiffness: 1e6 }], { torques: [{ node: 1, T: 1e5 }] }).response.nodes[1]?.phi ?? Number.NaN),
   row('§5.2', 'share of a uniform bar, torque at a third', 'T_A = T b/L', 2 / 3, '', rel(1e-12), 'compatibility', e => -(solve(e, [{ length: 100, stiffness: shaft(9) }, { length: 200, stiffness: shaft(9) }], [rigid(0), rigid(2)], { torques: [{ node: 1, T: 1 }] }).response.reactions[0]?.torque ?? Number.NaN)),
 ]

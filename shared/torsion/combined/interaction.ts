@@ -34,13 +34,9 @@ export function compressionWithShear(Rc: number, Rs: number): Reserve {
 export const bendingWithShear = (Rb: number, Rs: number): Reserve => circleRule(Rb, Rs)
 
 /** The multiplier λ > 0 at which a rising criterion reaches one, by bisection between bounds that hold it. */
-function multiplier(criterion: (lambda: number) => number): number {
-  let [low, high] = [0, 1]
-  while (criterion(high) < 1 && high < 1e12) {
-    low = high
-    high *= 2
-  }
-  for (let i = 0; i < 200 && high - low > 1e-15 * high; i += 1) {
+function multiplier(criterion: (lambda: number) => number, below: number, above: number): number {
+  let [low, high] = [below, above]
+  for (let i = 0; i < 1200 && high - low > 1e-15 * high; i += 1) {
     const middle = (low + high) / 2
     if (criterion(middle) < 1) low = middle
     else high = middle
@@ -53,7 +49,10 @@ export function powerRule(R1: number, R2: number, a: number, b: number): Reserve
   if (!sound(R1, R2)) return unsound
   if (!(Number.isFinite(a) && a > 0 && Number.isFinite(b) && b > 0)) return refusal('The exponents of an interaction must be greater than zero.')
   if (R1 === 0 && R2 === 0) return unloaded
-  return reserve(multiplier(lambda => (lambda * R1) ** a + (lambda * R2) ** b))
+  // One part alone reaches one at 1/R, and both together not before each has reached a half.
+  const above = Math.min(1 / R1, 1 / R2)
+  const below = Math.min(0.5 ** (1 / a) / R1, 0.5 ** (1 / b) / R2)
+  return reserve(multiplier(lambda => (lambda * R1) ** a + (lambda * R2) ** b, below, above))
 }
 
 /** One part of the loading is steady and only the other grows: the margin on the varying load alone (methods §7.4). */

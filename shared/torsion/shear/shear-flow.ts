@@ -151,6 +151,19 @@ export interface SuperposedWall {
   readonly q: number
 }
 
+interface FlowPoint { readonly part: number, readonly q: number }
+
+/** Where the flow turns between the given parts: exact on a straight wall, whose flow is a parabola; on an arc the parabola of three neighbours. */
+function turningPoints(along: readonly FlowPoint[]): FlowPoint[] {
+  return along.flatMap((middle, k) => {
+    const [before, after] = [along[k - 1], along[k + 1]]
+    if (!before || !after) return []
+    const [slope, bend] = [(after.q - before.q) / 2, after.q - 2 * middle.q + before.q]
+    const offset = -slope / bend
+    return Math.abs(offset) < 1 ? [{ part: middle.part + offset * (after.part - middle.part), q: middle.q + slope * offset / 2 }] : []
+  })
+}
+
 /**
  * Direct shear with torsion, wall by wall with sign: the flow of the forces plus the circulating flow of the
  * torque, and on top what varies through the thickness at the worse face.
@@ -160,7 +173,7 @@ export interface SuperposedWall {
 export function superpose(flows: ShearFlows, Vx: number, Vy: number, torsionFlow: readonly number[], faceStress: readonly number[]): SuperposedWall[] {
   return flows.walls.map(({ id, t, perX, perY }, i) => {
     const along = flowParts.map((part, k) => ({ part, q: Vx * (perX[k] ?? 0) + Vy * (perY[k] ?? 0) + (torsionFlow[i] ?? 0) }))
-    const worst = along.reduce((high, one) => (Math.abs(one.q) > Math.abs(high.q) ? one : high))
+    const worst = [...along, ...turningPoints(along)].reduce((high, one) => (Math.abs(one.q) > Math.abs(high.q) ? one : high))
     return { id, tau: Math.abs(worst.q) / t + Math.abs(faceStress[i] ?? 0), part: worst.part, q: worst.q }
   })
 }

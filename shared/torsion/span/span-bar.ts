@@ -31,7 +31,10 @@ export interface SpanBar {
   /** More supports than equilibrium needs: the share of each follows from stiffness (G-21). */
   readonly indeterminate: boolean
   readonly respond: (load: SpanCase) => SpanResponse | Refusal
+  /** Even stations of every segment, the same for every case. */
   readonly stations: (response: SpanResponse, count?: number) => SpanStation[]
+  /** Where torque (m = 0) or twist (T = 0) turns inside a segment: with the ends of the segments, every extreme exactly. */
+  readonly turns: (response: SpanResponse) => SpanStation[]
 }
 
 export const mostSegments = 500
@@ -48,7 +51,7 @@ export function spanBar(segments: readonly Segment[], supports: readonly SpanSup
   const factor = assemble(stiff, supports, kept)
   if (!factor) return refusal('Nothing holds the bar against turning: give at least one support a stiffness.')
   const solver: Solver = { segments, supports, stiff, zs, kept, factor }
-  return { ok: true, length: zs.at(-1) ?? 0, indeterminate: supports.length > 1, respond: load => respond(solver, load), stations: (response, count = 20) => stationsOf(solver, response, count) }
+  return { ok: true, length: zs.at(-1) ?? 0, indeterminate: supports.length > 1, respond: load => respond(solver, load), stations: (response, count = 20) => stationsOf(solver, response, () => Array.from({ length: count + 1 }, (_, i) => i / count)), turns: response => stationsOf(solver, response, turningParts) }
 }
 
 interface Solver { readonly segments: readonly Segment[], readonly supports: readonly SpanSupport[], readonly stiff: readonly number[], readonly zs: readonly number[], readonly kept: readonly number[], readonly factor: Factorised }
@@ -147,16 +150,24 @@ function respond(solver: Solver, load: SpanCase): SpanResponse | Refusal {
   }
 }
 
-function stationsOf({ segments, zs }: Solver, response: SpanResponse, count: number): SpanStation[] {
+function stationsOf({ segments, zs }: Solver, response: SpanResponse, partsOf: (length: number, ends: SpanEnds) => readonly number[]): SpanStation[] {
   return segments.flatMap((segment, e) => {
     const ends = response.segments[e]
     if (!ends) return []
     const torque = (part: number) => ends.T - gathered(segment.length, ends.m1, ends.m2, part)
-    let phi = ends.phi
-    return Array.from({ length: count + 1 }, (_, i): SpanStation => {
-      const part = i / count
-      if (i > 0) phi += flexibilityIntegral(segment, (i - 1) / count, part, torque)
+    let [phi, reached] = [ends.phi, 0]
+    return partsOf(segment.length, ends).map((part): SpanStation => {
+      if (part > reached) phi += flexibilityIntegral(segment, reached, part, torque)
+      reached = part
       return { z: (zs[e] ?? 0) + part * segment.length, segment: e, T: torque(part), phi, rate: torque(part) / stiffnessAt(segment, part) }
     })
   })
+}
+
+/** Parts of a segment strictly inside it at which m or T is zero, in order. */
+function turningParts(length: number, { T, m1, m2 }: SpanEnds): number[] {
+  // T = L (p m1 + p²/2 (m2 − m1)) at p; written so that no root is lost to cancellation.
+  const [curve, own] = [(m2 - m1) / 2, T / length]
+  const half = (m1 + (m1 < 0 ? -1 : 1) * Math.sqrt(m1 ** 2 + 4 * curve * own)) / 2
+  return [m1 / (m1 - m2), own / half, -half / curve].filter(part => part > 0 && part < 1).sort((a, b) => a - b)
 }

@@ -76,6 +76,20 @@ describe('laws of bars along a span', () => {
       near(response.segments.at(-1)!.T - list.at(-1)!.length * (load.m1 + load.m2) / 2, load.T[list.length]!, 1e-9, 1e5)
     }), { numRuns: 500 })
   })
+  it('no station exceeds the ends and the turns of its segment', () => {
+    fc.assert(fc.property(segments, loads, num(1e3, 1e8), (list, load, spring) => {
+      const bar = made(list, supports(list.length, spring))
+      const response = solved(bar, caseOf(list.length, load))
+      const turns = bar.turns(response)
+      const [fine, met] = [bar.stations(response, 37), [...bar.stations(response, 1), ...turns]]
+      const most = (value: (at: (typeof fine)[number]) => number, at: typeof fine) => at.reduce((high, one) => Math.max(high, Math.abs(value(one))), 0)
+      for (const value of [(at: (typeof fine)[number]) => at.T, (at: (typeof fine)[number]) => at.phi]) expect(most(value, fine)).toBeLessThanOrEqual(most(value, met) * (1 + 1e-7) + 1e-12)
+    }), { numRuns: 200 })
+    const held = made([{ length: 100, stiffness: { along: 'uniform', GJ: 1e7 } }], rigid(0))
+    const found = held.turns(solved(held, { distributed: [{ segment: 0, m1: 40, m2: -60 }] }))
+    // m falls from 40 to −60 and is zero at 40 % of the length: algebra.
+    expect(found.some(at => Math.abs(at.z - 40) < 1e-9)).toBe(true)
+  })
   it('a stiffer support takes more', () => {
     fc.assert(fc.property(segments, num(1e3, 1e7), num(1.1, 9), (list, spring, k) => {
       const reaction = (stiffness: number) => Math.abs(solved(made(list, [{ node: 0, stiffness: 'rigid' }, { node: list.length, stiffness }]), { torques: [{ node: list.length, T: 1e4 }] }).reactions[1]!.torque)
@@ -108,6 +122,11 @@ describe('laws of interaction', () => {
       expect(rf).toBeLessThanOrEqual(Math.min(1 / a, 1 / b))
       expect(rf >= 1).toBe(a ** 2 + b ** 2 <= 1 || Math.abs(a ** 2 + b ** 2 - 1) < 1e-12)
     }), runs)
+  })
+  it('however small the ratios or the exponents, the multiplier is found', () => {
+    near(ms(powerRule(1e-20, 0, 1, 2)), 1e20, 1e-12)
+    near(ms(powerRule(1, 0, 0.002, 2)), 1, 1e-12)
+    near(ms(powerRule(2, 2, 0.01, 0.01)), 0.5 ** 101, 1e-9)
   })
   it('with nothing steady, the varying margin is the proportional one', () => {
     fc.assert(fc.property(num(0.01, 3), (b) => {
