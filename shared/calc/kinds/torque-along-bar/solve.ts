@@ -25,11 +25,12 @@ export function solveTorqueAlongBar(model: TorqueAlongBarModel): Solved {
       return []
     }
     const stations = bar.stations(response)
+    const everywhere = [...stations, ...bar.turns(response)]
     const segments = model.segments.map((segment, s): SegmentState => {
-      const torque = stations.reduce((worst, at) => (at.segment === s && Math.abs(at.T) > Math.abs(worst) ? at.T : worst), 0)
+      const torque = everywhere.reduce((worst, at) => (at.segment === s && Math.abs(at.T) > Math.abs(worst) ? at.T : worst), 0)
       return { torque, tau: segment.perTorque === null ? null : segment.perTorque * Math.abs(torque) }
     })
-    return [{ model: one, response, stations, segments, toLimit: levels.toLimit, toUltimate: levels.toUltimate, twistMax: stations.reduce((high, at) => Math.max(high, Math.abs(at.phi)), 0) }]
+    return [{ model: one, response, stations, segments, toLimit: levels.toLimit, toUltimate: levels.toUltimate, twistMax: everywhere.reduce((high, at) => Math.max(high, Math.abs(at.phi)), 0) }]
   })
   if (faults.length > 0) return { ok: false, faults }
   const { rows, governing } = judgeMargins(marginSets(model, cases))
