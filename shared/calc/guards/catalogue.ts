@@ -1,5 +1,5 @@
 /**
- * The guards of an open section as data: what they are called, what the author must write, where they come from.
+ * The guards of all calculation kinds as data: what they are called, what the author must write, where they come from.
  * G-06 (crossing walls, zero length) and a G-01 input without which nothing can be computed are faults of the inputs.
  * Conditions and numbers are judged in guards-*.ts. Severity is that of the ordinary case; a judgement may raise it.
  */
