@@ -1,5 +1,6 @@
 /** One sound call of every public front of the engine, for tests that put hostile numbers into it. */
 import type { Engine } from '../reference/engine'
+import type { Profile } from '#shared/torsion/profiles/profile'
 import { rectangle } from '../reference/outlines'
 import { bentAngle, channel, graph, machinedAngle, openArc } from '../reference/sections'
 
@@ -21,6 +22,20 @@ const solids = [
   { shape: 'circle', outerRadius: 25, innerRadius: 20 }, { shape: 'ellipse', semiMajor: 30, semiMinor: 18, ratio: 0.6 }, { shape: 'rectangle', width: 50, height: 20 },
   { shape: 'equilateral triangle', side: 40 }, { shape: 'right isosceles triangle', leg: 30 }, { shape: 'sector', radius: 20, angle: 1.5 },
   { shape: 'semicircle', radius: 20 }, { shape: 'segment', radius: 12, depth: 2.4 }, { shape: 'hexagon', flats: 24 },
+]
+
+const three = { tLower: 4, tWeb: 3, tUpper: 4 }
+const profiles: Profile[] = [
+  { shape: 'angle', measured: 'outside', make: 'machined', radius: 2, width: 30, height: 40, tWidth: 2, tHeight: 3 },
+  { shape: 'tee', measured: 'outside', make: 'machined', radius: 2, flange: 50, height: 40, tFlange: 3, tStem: 2 },
+  { shape: 'channel', measured: 'inside', make: 'machined', radius: 3, lower: 40, height: 100, upper: 30, ...three },
+  { shape: 'zed', measured: 'mid-line', make: 'machined', radius: 3, lower: 40, height: 100, upper: 30, ...three },
+  { shape: 'hat', measured: 'outside', make: 'bent', radius: 3, brim: 20, height: 40, crown: 40, lean: 0.2, tBrim: 2, tWeb: 2, tCrown: 2 },
+  { shape: 'lipped channel', measured: 'outside', make: 'bent', radius: 3, lip: 15, flange: 40, height: 80, tLip: 2, tFlange: 2, tWeb: 2 },
+  { shape: 'I', measured: 'outside', make: 'machined', radius: 3, lower: 40, height: 100, upper: 30, ...three },
+  { shape: 'J', measured: 'outside', make: 'machined', radius: 3, base: 40, height: 60, cap: 20, tBase: 3, tWeb: 2, tCap: 3 },
+  { shape: 'arc', measured: 'outside', radius: 40, angle: 2, t: 2 },
+  { shape: 'slit tube', measured: 'outside', diameter: 80, t: 2 },
 ]
 
 const box = graph([[0, 0], [100, 0], [100, 60], [0, 60], [50, 0]], [{ from: 0, to: 4, t: 2 }, { from: 4, to: 1, t: 2 }, { from: 1, to: 2, t: 3 }, { from: 2, to: 3, t: 2 }, { from: 3, to: 0, t: 1.5 }])
@@ -79,6 +94,7 @@ export const hostileCalls: readonly HostileCall[] = [
   { name: 'knockDownAt', give: () => [[{ temperature: 20, factor: 1 }, { temperature: 120, factor: 0.8 }], 70] },
   { name: 'characteristicLength', give: () => [71_000, 1e9, 1e8] },
   ...solids.map((solid): HostileCall => ({ name: 'torsionOfSolid', what: solid.shape, give: () => [solid] })),
+  ...profiles.map((profile): HostileCall => ({ name: 'sectionOfProfile', what: profile.shape, give: () => [profile, { G: 26_900, E: 71_000 }] })),
   { name: 'checkOutline', give: () => [rectangle(2, 1)] },
   { name: 'outlineTorsion', give: () => [rectangle(2, 1)], slow: true },
 ]

@@ -15,6 +15,7 @@ export async function loadEngine() {
   const factors = await import('#shared/torsion/factors')
   const allowables = await import('#shared/torsion/allowables')
   const warping = await import('#shared/torsion/warping-length')
+  const profiles = await import('#shared/torsion/profiles/section-of-profile')
   const solids = await import('#shared/torsion/solids/torsion-of-solid')
   const cells = await import('#shared/torsion/cells/torsion-of-cells')
   const cellCorner = await import('#shared/torsion/cells/cell-corner')
@@ -34,7 +35,7 @@ export async function loadEngine() {
   const outlineAgreement = await import('#shared/torsion/outline/agreement')
   const outlineVertices = await import('#shared/torsion/outline/reentrant')
   const outlineLimits = await import('#shared/torsion/outline/published')
-  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...solids, ...cells, ...cellCorner, ...shear, ...warpingBar, ...sectorialRun, ...stressPeaks, ...compression, ...cutBar, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
+  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...profiles, ...solids, ...cells, ...cellCorner, ...shear, ...warpingBar, ...sectorialRun, ...stressPeaks, ...compression, ...cutBar, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
 }
 
 export type Engine = Awaited<ReturnType<typeof loadEngine>>

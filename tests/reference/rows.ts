@@ -3,6 +3,7 @@ import type { ReferenceRow } from './row'
 import { provenBy } from './row'
 import { cellRows } from './cell-rows'
 import { outlineRows } from './outline-rows'
+import { profileRows } from './profile-rows'
 import { programRows } from './program-rows'
 import { sectorialRows } from './sectorial-rows'
 import { solidRows } from './solid-rows'
@@ -12,4 +13,4 @@ import { torsionRows } from './torsion-rows'
 import { unitRows } from './unit-rows'
 import { warpingRows } from './warping-rows'
 
-export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...solidRows, ...cellRows, ...warpingRows, ...spanRows, ...stabilityRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...profileRows, ...solidRows, ...cellRows, ...warpingRows, ...spanRows, ...stabilityRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
