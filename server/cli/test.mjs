@@ -10,6 +10,8 @@ import { startThrowAway } from './throw-away.mjs'
 
 const deep = process.argv.includes('--deep')
 const counts = { passed: 0, failed: 0 }
+/** Named once more at the end: a record of the run may keep its last lines only. */
+const failures = []
 
 function step(name, command, args, env = {}) {
   const began = Date.now()
@@ -22,7 +24,9 @@ function step(name, command, args, env = {}) {
 
 /** Lint and types count as one test each. */
 const single = (name, command, args) => {
-  counts[step(name, command, args) ? 'passed' : 'failed'] += 1
+  const ok = step(name, command, args)
+  counts[ok ? 'passed' : 'failed'] += 1
+  if (!ok) failures.push(name)
 }
 
 function vitest(project, env) {
@@ -30,7 +34,13 @@ function vitest(project, env) {
   rmSync(report, { force: true })
   const ok = step(`${project} tests`, 'npx', ['vitest', 'run', '--project', project, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`], env)
   try {
-    const { numPassedTests, numFailedTests, numPendingTests } = JSON.parse(readFileSync(report, 'utf8'))
+    const { numPassedTests, numFailedTests, numPendingTests, testResults } = JSON.parse(readFileSync(report, 'utf8'))
+    for (const { name, message, status: outcome, assertionResults } of testResults) {
+      if (outcome === 'failed' && !assertionResults.length) failures.push(`${project}: ${name}: ${message.split('\n')[0]}`)
+      for (const { status, fullName, failureMessages } of assertionResults) {
+        if (status === 'failed') failures.push(`${project}: ${fullName}: ${failureMessages[0]?.split('\n')[0] ?? ''}`)
+      }
+    }
     counts.passed += numPassedTests
     counts.failed += numFailedTests
     if (numPendingTests) say(`${numPendingTests} tests were left out`)
@@ -86,6 +96,7 @@ async function main() {
       database.stop()
     }
   }
+  if (failures.length) say(`\nFailed:\n${failures.join('\n')}`)
   say(`\n${counts.passed} passed, ${counts.failed} failed`)
   process.exit(counts.failed ? 1 : 0)
 }

@@ -55,8 +55,10 @@ function lineWithCircle({ a, b }: OutlineEdge, { arc }: OutlineEdge): PlanePoint
   const [ux, uy] = [(b.x - a.x) / length, (b.y - a.y) / length]
   const foot = (arc.cx - a.x) * ux + (arc.cy - a.y) * uy
   const off = (arc.cx - a.x) * uy - (arc.cy - a.y) * ux
+  // The common normal is told by its points on the circle: from a centre that lies on the line every way is as near.
+  const feet = [1, -1].map(side => ({ x: arc.cx - side * arc.radius * uy, y: arc.cy + side * arc.radius * ux }))
   const half = Math.abs(off) < arc.radius ? Math.sqrt(arc.radius ** 2 - off ** 2) : 0
-  return (half === 0 ? [foot] : [foot - half, foot, foot + half]).map(at => ({ x: a.x + at * ux, y: a.y + at * uy }))
+  return [...feet, ...(half === 0 ? [] : [foot - half, foot + half]).map(at => ({ x: a.x + at * ux, y: a.y + at * uy }))]
 }
 
 function circleWithCircle({ arc: p }: OutlineEdge, { arc: q }: OutlineEdge): PlanePoint[] {
@@ -84,9 +86,8 @@ export function nearPairs(p: OutlineEdge, q: OutlineEdge): EdgePair[] {
     }),
   ]
   const between = innerPairs(p, q).map((point) => {
-    const on = nearestOnEdge(point, p)
-    const { distance, part } = nearestOnEdge(edgePoint(p, on.part), q)
-    return { p: on.part, q: part, distance }
+    const [onP, onQ] = [nearestOnEdge(point, p).part, nearestOnEdge(point, q).part]
+    return { p: onP, q: onQ, distance: separation(edgePoint(p, onP), edgePoint(q, onQ)) }
   })
   return [...fromEnds, ...between]
 }
