@@ -6,7 +6,7 @@
 import type { Junction, OpenSection, Refusal } from '#shared/torsion/section'
 import type { MidLine, WallAtNode } from '#shared/torsion/mid-line'
 import { refusal } from '#shared/torsion/section'
-import { smoothTurn, turnBetween } from '#shared/torsion/mid-line'
+import { smoothTurn, tapers, turnBetween } from '#shared/torsion/mid-line'
 import { midLineOf } from '#shared/torsion/section-check'
 import { bendFactor } from '#shared/torsion/bend-factor'
 import { machinedCornerTable } from '#shared/torsion/published'
@@ -49,16 +49,19 @@ export function machinedFactor(ratio: number): number | null {
 
 const near = (a: number, b: number): boolean => Math.abs(a - b) <= equalWithin * Math.max(Math.abs(a), Math.abs(b))
 
+const thicknessThere = ({ wall: { t, tEnd = t }, end }: WallAtNode): number => (end === 'start' ? t : tEnd)
+
 /** Whether the mid-line runs on through a node with nothing changing: no corner at all. */
 function runsOn(meeting: readonly WallAtNode[]): boolean {
   const [a, b] = meeting
-  return meeting.length === 2 && !!a && !!b && turnBetween(a, b) < smoothTurn && near(a.wall.t, b.wall.t)
+  return meeting.length === 2 && !!a && !!b && turnBetween(a, b) < smoothTurn && near(thicknessThere(a), thicknessThere(b))
 }
 
 function twoWallFactor(junction: Junction, a: WallAtNode, b: WallAtNode): CornerFactor {
   const { node, radius, make } = junction
   const { t } = a.wall
   const turned = turnBetween(a, b)
+  if (tapers(a.wall) || tapers(b.wall)) return refusal(`At ${node} a tapering wall meets; the tables hold for walls of one thickness.`)
   if (turned < smoothTurn) return refusal(`At ${node} the thickness steps from ${a.wall.t} to ${b.wall.t} mm; no factor is published here for a step.`)
   if (!near(a.wall.t, b.wall.t)) return refusal(`At ${node} walls of ${a.wall.t} and ${b.wall.t} mm meet; the tables hold for equal walls.`)
   if (!near(a.wall.G, b.wall.G)) return refusal(`At ${node} walls of differing shear modulus meet; the tables hold for one material.`)

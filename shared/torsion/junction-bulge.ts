@@ -6,7 +6,7 @@
 import type { OpenSection, Refusal } from '#shared/torsion/section'
 import type { MidLine, WallAtNode } from '#shared/torsion/mid-line'
 import { refusal } from '#shared/torsion/section'
-import { smoothTurn, turnBetween } from '#shared/torsion/mid-line'
+import { smoothTurn, tapers, turnBetween } from '#shared/torsion/mid-line'
 import { bulgeOfL, bulgeOfT } from '#shared/torsion/junction-formula'
 import { rightAngleWithin } from '#shared/torsion/corner-factor'
 
@@ -88,6 +88,7 @@ function bulgeAt(node: string, r: number, meeting: readonly WallAtNode[], { leng
   const [a, b] = meeting
   if (!a || !b || meeting.length > 3) return refusal(`At ${node} ${meeting.length} walls meet; the junction formula is for an L or a T.`)
   if (meeting.some(({ path }) => path.kind === 'arc')) return refusal(`At ${node} an arc wall meets; the junction formula is for straight walls.`)
+  if (meeting.some(({ wall }) => tapers(wall))) return refusal(`At ${node} a tapering wall meets; the junction formula is for walls of one thickness.`)
   if (meeting.some(({ wall }) => wall.G !== a.wall.G)) return refusal(`At ${node} walls of differing shear modulus meet; the junction formula is for one material.`)
   return meeting.length === 2 ? bulgeL2(node, r, [a, b], lengths) : bulgeT3(node, r, meeting)
 }

@@ -6,18 +6,26 @@ import type { Junction, OpenSection, OpenWall, Point, SectionFault, SectionNode 
 import type { WallPath } from '#shared/torsion/geometry'
 import { along, arcFromTangent, directionOf, distance, leavingDirection, pathEnd, pathLength, pathStart, turn, wallPath } from '#shared/torsion/geometry'
 
-/** A stretch of mid-line with one thickness. A bend belongs half to each of its two walls. */
+/** A stretch of mid-line whose thickness is constant or linear. A bend belongs half to each of its two walls. */
 export interface Piece {
   readonly path: WallPath
   readonly from: string
   readonly to: string
+  /** Thickness at its start and at its end, mm. */
   readonly t: number
+  readonly tEnd: number
   readonly G: number
   readonly E: number | null
   readonly walls: readonly { readonly id: string, readonly part: number }[]
   /** The node whose corner it replaces, for a bend. */
   readonly bendAt: string | null
 }
+
+/** The thickness after `part` (0…1) of a stretch, mm. */
+export const thicknessAt = ({ t, tEnd }: Pick<Piece, 't' | 'tEnd'>, part: number): number => (t === tEnd ? t : t + part * (tEnd - t))
+
+/** Whether the thickness of a wall changes along it. */
+export const tapers = ({ t, tEnd = t }: OpenWall): boolean => tEnd !== t
 
 /** A wall end at a node: which end, and the direction in which the wall leaves the node. */
 export interface WallAtNode { readonly wall: OpenWall, readonly end: 'start' | 'end', readonly direction: number, readonly path: WallPath }
@@ -85,14 +93,14 @@ function bendAt(junction: Junction, meeting: readonly WallAtNode[], corner: Poin
   if (phi < smoothTurn) return null
   if (phi > Math.PI - 1e-3) return bendFault(node, meeting, `At ${node} the walls fold back on each other, which no bend radius can join.`)
   if (a.path.kind === 'arc' || b.path.kind === 'arc') return bendFault(node, meeting, `At ${node} a bend joins an arc wall. Give arc walls tangent to their neighbours; a bend radius is for straight walls.`)
-  if (a.wall.t !== b.wall.t || a.wall.G !== b.wall.G || a.wall.E !== b.wall.E) return bendFault(node, meeting, `At ${node} a bend joins walls of differing thickness or modulus. Bent sheet is one sheet: make them equal or give the corner as machined.`)
+  if (tapers(a.wall) || tapers(b.wall) || a.wall.t !== b.wall.t || a.wall.G !== b.wall.G || a.wall.E !== b.wall.E) return bendFault(node, meeting, `At ${node} a bend joins walls of differing thickness or modulus. Bent sheet is one sheet: make them equal or give the corner as machined.`)
   const middle = radius + a.wall.t / 2
   const trim = middle * Math.tan(phi / 2)
   const start = along(corner, a.direction, trim)
   const path = arcFromTangent(start, a.direction + Math.PI, middle, turn(b.direction - a.direction - Math.PI))
   const walls = [a.wall.id, b.wall.id] as const
   const { t, G, E = null } = a.wall
-  const piece: Piece = { path, from: vertex(node, walls[0]), to: vertex(node, walls[1]), t, G, E, walls: walls.map(id => ({ id, part: 0.5 })), bendAt: node }
+  const piece: Piece = { path, from: vertex(node, walls[0]), to: vertex(node, walls[1]), t, tEnd: t, G, E, walls: walls.map(id => ({ id, part: 0.5 })), bendAt: node }
   return { node, trim, piece, walls }
 }
 
@@ -130,8 +138,8 @@ function trimmed(wall: OpenWall, path: WallPath, bends: ReadonlyMap<string, Bend
   }
   const head = own(wall.from)
   const tail = own(wall.to)
-  const { t, G, E = null, id } = wall
-  const common = { from: head ? vertex(wall.from, id) : wall.from, to: tail ? vertex(wall.to, id) : wall.to, t, G, E, walls: [{ id, part: 1 }], bendAt: null }
+  const { t, tEnd = t, G, E = null, id } = wall
+  const common = { from: head ? vertex(wall.from, id) : wall.from, to: tail ? vertex(wall.to, id) : wall.to, t, tEnd, G, E, walls: [{ id, part: 1 }], bendAt: null }
   if (path.kind === 'arc' || (!head && !tail)) return { ...common, path }
   const length = distance(path.start, path.end)
   const left = length - (head?.trim ?? 0) - (tail?.trim ?? 0)

@@ -1,7 +1,7 @@
 /**
  * Saint-Venant torsion of a thin-walled open section (methods reference §1.9,
  * §1.10): free warping, straight and arc walls, differing thickness and shear
- * modulus. N, mm, MPa, rad.
+ * modulus, thickness that tapers. N, mm, MPa, rad.
  */
 import type { OpenSection, OpenSeam, Refusal } from '#shared/torsion/section'
 import type { BulgeAtNode, JunctionBulge } from '#shared/torsion/junction-bulge'
@@ -25,12 +25,15 @@ export interface WallTorsion {
   readonly developed: number
   /** The length in L·t³/3: developed, but to the outer face or from the face at a junction whose bulge is added. */
   readonly effective: number
+  /** The greatest thickness, mm: what the stress on the flat goes with. */
   readonly t: number
   readonly G: number
   /** Real free ends: 0, 1 or 2. */
   readonly freeEnds: number
   /** Its end at an L junction counted as free beside the bulge: 0, 1 or 2. */
   readonly cornerEnds: number
+  /** What its free ends take off, N·mm², ≤ 0. */
+  readonly endTerm: number
   /** N·mm², before corrections, after them, and as a part of the whole. */
   readonly plainGJ: number
   readonly GJ: number
@@ -70,19 +73,20 @@ function bulgeShare(bulge: JunctionBulge, wall: string): number {
   return part * bulge.G * bulge.J
 }
 
-interface WallParts extends Omit<WallTorsion, 'share'> { readonly lengthTerm: number, readonly endTerm: number, readonly bulgeTerm: number }
+interface WallParts extends Omit<WallTorsion, 'share'> { readonly lengthTerm: number, readonly bulgeTerm: number }
 
 function wallParts(section: OpenSection, { atNode, lengths, pieces }: MidLine, bulges: readonly JunctionBulge[]): WallParts[] {
   const ends = (id: string): number => atNode.get(id)?.length ?? 0
-  return section.walls.map(({ id, from, to, t, G }) => {
+  return section.walls.map(({ id, from, to, t: start, tEnd = start, G }) => {
+    const t = Math.max(start, tEnd)
     const developed = sum(pieces.flatMap(piece => piece.walls.filter(wall => wall.id === id).map(({ part }) => part * pathLength(piece.path))))
     const effective = developed + sum(bulges.map(bulge => bulge.lengthChange[id] ?? 0))
-    const freeEnds = [from, to].filter(node => ends(node) === 1).length
-    const cornerEnds = bulges.filter(({ cornerEnd }) => cornerEnd === id).length
-    const stiffness = wallStiffness({ G, t, developed, effective, ends: freeEnds + cornerEnds, junctions: bulges.length > 0 })
+    const free = [...ends(from) === 1 ? [start] : [], ...ends(to) === 1 ? [tEnd] : []]
+    const corners = bulges.filter(({ cornerEnd }) => cornerEnd === id).map(() => start)
+    const stiffness = wallStiffness({ G, thickness: [start, tEnd], developed, effective, ends: [...free, ...corners], junctions: bulges.length > 0 })
     const bulgeTerm = sum(bulges.map(bulge => bulgeShare(bulge, id)))
     const L = lengths.get(id) ?? developed
-    return { id, L, slenderness: L / t, developed, effective, t, G, freeEnds, cornerEnds, ...stiffness, bulgeTerm, GJ: stiffness.plainGJ + stiffness.lengthTerm + stiffness.endTerm + bulgeTerm }
+    return { id, L, slenderness: L / t, developed, effective, t, G, freeEnds: free.length, cornerEnds: corners.length, ...stiffness, bulgeTerm, GJ: stiffness.plainGJ + stiffness.lengthTerm + stiffness.endTerm + bulgeTerm }
   })
 }
 
@@ -103,7 +107,7 @@ export function torsionOfOpenSection(section: OpenSection): OpenTorsion | Refusa
     ok: true, GJ, J: parts.every(part => part.G === G) ? GJ / G : null,
     plainGJ: sum(parts.map(part => part.plainGJ)), lengthTerm: sum(parts.map(part => part.lengthTerm)), endTerm, bulgeTerm,
     correctionShare: (Math.abs(endTerm) + Math.abs(bulgeTerm)) / GJ, endLoss: endLossOf(applied(bulges).length > 0),
-    perWall: parts.map(({ lengthTerm: _length, endTerm: _end, bulgeTerm: _bulge, ...wall }) => ({ ...wall, share: wall.GJ / GJ })),
+    perWall: parts.map(({ lengthTerm: _length, bulgeTerm: _bulge, ...wall }) => ({ ...wall, share: wall.GJ / GJ })),
     developed: sum(parts.map(part => part.developed)), bulges, corners: cornersOnMidLine(section, midLine), seams,
   }
 }

@@ -11,9 +11,10 @@ const seamGap = 1e-6
 const fault = (code: FaultCode, message: string, walls: readonly string[] = [], nodes: readonly string[] = []): SectionFault => ({ code, message, walls, nodes })
 const positive = (value: number): boolean => Number.isFinite(value) && value > 0
 
-function wallNumbers({ id, t, G, E, arc }: OpenWall): SectionFault[] {
+function wallNumbers({ id, t, tEnd, G, E, arc }: OpenWall): SectionFault[] {
   const faults: SectionFault[] = []
   if (!positive(t)) faults.push(fault('bad-number', `Wall ${id} needs a thickness greater than zero.`, [id]))
+  if (tEnd !== undefined && !positive(tEnd)) faults.push(fault('bad-number', `Wall ${id} needs a thickness greater than zero at its end.`, [id]))
   if (!positive(G)) faults.push(fault('bad-number', `Wall ${id} needs a shear modulus greater than zero.`, [id]))
   if (E !== undefined && !positive(E)) faults.push(fault('bad-number', `Wall ${id} needs a modulus of elasticity greater than zero.`, [id]))
   if (!arc) return faults

@@ -21,8 +21,10 @@ export interface OpenWall {
   readonly id: string
   readonly from: string
   readonly to: string
-  /** Thickness, mm. */
+  /** Thickness, mm: at `from`, where `tEnd` gives another at `to`. */
   readonly t: number
+  /** Thickness at `to` of a wall that tapers linearly along its mid-line, mm. */
+  readonly tEnd?: number
   /** Shear modulus, MPa. */
   readonly G: number
   /** Modulus of elasticity, MPa. Where walls differ in it, sectorial properties are weighted by it. */

@@ -9,6 +9,7 @@ import type { Piece } from '#shared/torsion/mid-line'
 import type { Station, WalkedPiece } from '#shared/torsion/stations'
 import { refusal } from '#shared/torsion/section'
 import { directionOf, distance, pathEnd, pathLength, pathPoint, pathStart } from '#shared/torsion/geometry'
+import { thicknessAt } from '#shared/torsion/mid-line'
 import { midLineOf } from '#shared/torsion/section-check'
 import { sectorialGrowth, sectorialTurns } from '#shared/torsion/sectorial-growth'
 import { stationsOf, walk } from '#shared/torsion/stations'
@@ -152,7 +153,7 @@ export function sectorialProperties(section: OpenSection): SectorialProperties |
   const result = aboutShearCentre(section, pieces, shearCentre, weigh, { centroid, weightedArea, size })
   if (!Object.values(result).every(value => typeof value !== 'number' || Number.isFinite(value))) return refusal('The sectorial properties are not finite. Check coordinates and thicknesses.')
   return {
-    ok: true, A: pieces.reduce((total, { path, t }) => total + pathLength(path) * t, 0), centroid, ...moments, shearCentre, ...result,
+    ok: true, A: pieces.reduce((total, piece) => total + pathLength(piece.path) * thicknessAt(piece, 0.5), 0), centroid, ...moments, shearCentre, ...result,
     weightedArea, referenceE: weigh.referenceE, weighted: weigh.weighted, oneLine,
   }
 }

@@ -8,6 +8,7 @@ import type { Point } from '#shared/torsion/section'
 import type { WallPath } from '#shared/torsion/geometry'
 import type { Piece } from '#shared/torsion/mid-line'
 import { pathLength, pathPoint, tangentAt } from '#shared/torsion/geometry'
+import { thicknessAt } from '#shared/torsion/mid-line'
 import { sectorialGrowth } from '#shared/torsion/sectorial-growth'
 
 /** Abscissas and weights of the eight-point rule on (−1, 1); symmetric, so half is listed. Standard tables, checked by the test of the rule. */
@@ -70,12 +71,13 @@ export function walk(pieces: readonly Piece[], pole: Point): { walked: WalkedPie
 export function stationsOf(walked: readonly WalkedPiece[], pole: Point, weigh: (piece: Piece) => number): Station[] {
   const stations: Station[] = []
   for (const { piece, startOmega } of walked) {
-    const { path, t } = piece
-    const area = pathLength(path) * t * weigh(piece)
+    const { path } = piece
+    const length = pathLength(path) * weigh(piece)
     for (const { part, weight } of rulePoints(path)) {
       // Written out: copying a point into each of some thousand stations took most of the time of a long section.
       const { x, y } = pathPoint(path, part)
-      stations.push({ x, y, area: area * weight, omega: startOmega + sectorialGrowth(path, pole, part), t, tangent: tangentAt(path, part) })
+      const t = thicknessAt(piece, part)
+      stations.push({ x, y, area: length * t * weight, omega: startOmega + sectorialGrowth(path, pole, part), t, tangent: tangentAt(path, part) })
     }
   }
   return stations

@@ -30,6 +30,9 @@ export const twoMaterials = graph([[0, 40], [0, 0], [60, 0], [60, 40]], [{ from:
 /** C-43: one wall 30 × 3. */
 export const strip30x3 = chain([[0, 0], [30, 0]], 3)
 
+/** C-120: one wall of 40 that grows from 2 to 3. */
+export const taperedStrip: OpenSection = { ...chain([[0, 0], [40, 0]], 2), walls: [{ id: 'w0', from: '0', to: '1', t: 2, tEnd: 3, G: 26_900 }] }
+
 /** C-44: equal legs of 10 outside, t = 1, fillet 0.5, sharp outer corner. */
 export const machinedAngle = chain([[9.5, 0], [0, 0], [0, 9.5]], 1, fillet(0.5, 1))
 

@@ -5,7 +5,7 @@ import type { OpenSection } from '#shared/torsion/section'
 import type { OpenTorsion } from '#shared/torsion/open-section'
 import { given } from './engine'
 import { abs, rel, row } from './row'
-import { bentAngle, channel, doublySymmetricI, machinedAngle, machinedTee, strip30x3, twoMaterials } from './sections'
+import { bentAngle, channel, doublySymmetricI, machinedAngle, machinedTee, strip30x3, taperedStrip, twoMaterials } from './sections'
 
 const thin = 'thin-wall theory, algebra'
 const junction = 'El Darwish & Johnston 1965, coefficients from memory; boundary elements agree to 0.3 %'
@@ -40,7 +40,8 @@ const stiffness: ReferenceRow[] = [
   row('C-43', 'one wall with two free ends', 'L 30, t 3 mm', 252.983280340336, 'mm⁴', rel(2e-7), 'exact series of Saint-Venant', e => J(e, strip30x3)),
   row('C-44', 'machined angle J', 'legs 10 outside, t 1, fillet 0.5, sharp outer corner', 6.34623047007496, 'mm⁴', rel(1e-9), junction, e => J(e, machinedAngle)),
   row('C-46', 'machined tee J', 'flange 14×1, stem to 10 overall ×1, fillets 0.5', 8.01181666666667, 'mm⁴', rel(1e-9), junction, e => J(e, machinedTee)),
-  row('§1.10', 'slit tube J', 'R 50, t 2 mm', 837.758, 'mm⁴', rel(1e-6), thin, e => e.wallStiffness({ G: 1, t: 2, developed: 100 * Math.PI, effective: 100 * Math.PI, ends: 0, junctions: false }).plainGJ),
+  row('§1.10', 'slit tube J', 'R 50, t 2 mm', 837.758, 'mm⁴', rel(1e-6), thin, e => e.wallStiffness({ G: 1, thickness: [2, 2], developed: 100 * Math.PI, effective: 100 * Math.PI, ends: [], junctions: false }).plainGJ),
+  row('C-120', 'J of a tapering wall', 'L 40, t 2 → 3 mm', 216.666666666667, 'mm⁴', rel(1e-12), 'L/12 (t₁+t₂)(t₁²+t₂²), algebra', e => plainJ(e, taperedStrip)),
   row('C-92', 'stress from an imposed rate of twist', 'θ′ 4e-5 rad/mm, t 3 mm, G 26 900 MPa', 3.228, 'MPa', rel(1e-12), 'τ = G t θ′', e => e.faceStress(26_900, 3, 4e-5)),
   row('§6', 'torque from an imposed rate of twist', 'channel C-38, θ′ 4e-5 rad/mm', 2804.773333, 'N·mm', rel(2e-10), 'T = GJ θ′', e => given(e.respondToRate(uncorrected(e, channel), 4e-5)).torque),
 ]

@@ -24,11 +24,14 @@ export function parseWalls(inputs: WallTable & { materials: readonly { id: strin
   const reaches = inputs.walls.map((wall, i) => readReach(wall.end, `walls.${i}.end`, read))
   const thicknesses = inputs.walls.map((wall, i) =>
     read.positive(wall.t, `walls.${i}.t`, { label: `the thickness of wall ${wall.id}`, dimension: 'length', typical: 'thickness' }))
+  const endThicknesses = inputs.walls.map((wall, i) => wall.tEnd
+    ? read.positive(wall.tEnd, `walls.${i}.tEnd`, { label: `the thickness at the end of wall ${wall.id}`, dimension: 'length', typical: 'thickness' })
+    : null)
   const junctions = inputs.junctions.flatMap((junction, i) => readJunction(junction, i, inputs.walls, read))
   const walls = inputs.walls.map((wall, i) => {
     const material = materials.find(m => m.id === wall.material)
     if (!inputs.materials.some(m => m.id === wall.material)) read.fault(`walls.${i}.material`, `Choose the material of wall ${wall.id}.`)
-    return { wall, reach: reaches[i] ?? null, t: thicknesses[i] ?? null, material }
+    return { wall, reach: reaches[i] ?? null, t: thicknesses[i] ?? null, tEnd: endThicknesses[i] ?? null, material }
   })
   if (inputs.walls.length === 0) read.fault('walls', 'Add at least one wall.')
   if (read.faults.length > 0 || !x || !y) return null
@@ -36,16 +39,17 @@ export function parseWalls(inputs: WallTable & { materials: readonly { id: strin
   const places = placeNodes(inputs.walls, reaches, { x: x.value, y: y.value }, read)
   if (!places) return null
   const model: ModelWall[] = []
-  walls.forEach(({ wall, reach, t, material }, i) => {
+  walls.forEach(({ wall, reach, t, tEnd, material }, i) => {
     const to = places.ends[i]
     const from = places.nodes.get(wall.from)
     if (!reach || !t || !material || !to || !from) return
     const target = places.nodes.get(to)
     const length = reach.arc ? reach.arc.radius * Math.abs(reach.arc.sweep) : target ? Math.hypot(target.x - from.x, target.y - from.y) : 0
-    if (reach.arc && reach.arc.radius <= t.value / 2) read.fault(`walls.${i}.end.radius`, `The mid-line radius of arc ${wall.id} must be more than half its thickness.`)
+    const tMax = Math.max(t.value, tEnd?.value ?? 0)
+    if (reach.arc && reach.arc.radius <= tMax / 2) read.fault(`walls.${i}.end.radius`, `The mid-line radius of arc ${wall.id} must be more than half its thickness.`)
     if (!(length > 0)) read.fault(`walls.${i}.end`, `G-06: wall ${wall.id} has no length; move its end or remove it.`)
     model.push({
-      id: wall.id, name: wall.name, from: wall.from, to, t, material, length,
+      id: wall.id, name: wall.name, from: wall.from, to, t, tEnd, tMax, material, length,
       ...directionsOf(reach, from, target ?? from), G: material.G, E: material.E, lengthTyped: reach.lengthTyped, ...(reach.arc ? { arc: reach.arc } : {}),
     })
   })

@@ -22,14 +22,18 @@ const wall = z.strictObject({
   id: identifier, name, from: identifier, to: identifier, end: wallEnd, t: quantity('Thickness', 'length', { symbol: 't' }), material: identifier,
 })
 
+/** A wall whose thickness may change along it. */
+const taperingWall = wall.extend({ tEnd: quantity('Thickness at its end', 'length', { symbol: 't_2', description: 'Only of a wall that tapers; linear along it.' }).nullable().optional() })
+
 /** Inside radius at a node where walls meet: a machined fillet, or the inside radius of a bend. */
 const junction = z.strictObject({ node: identifier, radius: quantity('Inside radius', 'length', { symbol: 'r' }), make: choice('Make', ['machined', 'bent']) })
 
 export const start = z.strictObject({ x, y })
 export const walls = z.array(wall).max(MAX_WALLS).meta({ title: 'Walls', part: 'walls' })
+export const taperingWalls = z.array(taperingWall).max(MAX_WALLS).meta({ title: 'Walls', part: 'walls' })
 export const junctions = z.array(junction).max(MAX_WALLS).meta({ title: 'Corners', part: 'junctions' })
 
-export type WallInput = z.infer<typeof wall>
+export type WallInput = z.infer<typeof taperingWall>
 export type WallEndInput = WallInput['end']
 export type JunctionInput = z.infer<typeof junction>
 /** What `parseWalls` reads of a calculation's inputs. */

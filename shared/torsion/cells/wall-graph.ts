@@ -70,10 +70,11 @@ function soundNumbers({ nodes, walls }: WallSection): string | null {
     seen.add(id)
   }
   const ids = new Set<string>()
-  for (const { id, from, to, t, G, arc } of walls) {
+  for (const { id, from, to, t, tEnd = t, G, arc } of walls) {
     if (ids.has(id)) return `The wall ${id} is given twice.`
     ids.add(id)
     if (!(Number.isFinite(t) && t > 0)) return `Wall ${id} needs a thickness greater than zero.`
+    if (tEnd !== t) return `Wall ${id} tapers; here a wall has one thickness. Part it into steps.`
     if (!(Number.isFinite(G) && G > 0)) return `Wall ${id} needs a shear modulus greater than zero.`
     if (arc && !(Number.isFinite(arc.radius) && arc.radius > 0)) return `Wall ${id} needs a radius greater than zero.`
     if (arc && !(Number.isFinite(arc.sweep) && arc.sweep !== 0 && Math.abs(arc.sweep) <= 2 * Math.PI * (1 + 1e-12))) return `Wall ${id} needs a swept angle other than zero and of at most a full circle.`
@@ -100,7 +101,7 @@ function placesFault({ nodes, walls }: WallSection, paths: readonly WallPath[], 
   }
   const empty = walls.findIndex((_, i) => pathLength(paths[i] ?? { kind: 'line', start: { x: 0, y: 0 }, end: { x: 0, y: 0 } }) <= together * size)
   if (empty >= 0) return `Wall ${walls[empty]?.id ?? ''} has no length. Move one of its ends.`
-  const pieces = walls.map((wall, i): Piece => ({ path: paths[i] as WallPath, from: wall.from, to: wall.to, t: wall.t, G: wall.G, E: wall.E ?? null, walls: [{ id: wall.id, part: 1 }], bendAt: null }))
+  const pieces = walls.map((wall, i): Piece => ({ path: paths[i] as WallPath, from: wall.from, to: wall.to, t: wall.t, tEnd: wall.t, G: wall.G, E: wall.E ?? null, walls: [{ id: wall.id, part: 1 }], bendAt: null }))
   const [crossed] = crossings(pieces, size)
   if (crossed) return `Walls ${crossed.a.walls[0]?.id ?? ''} and ${crossed.b.walls[0]?.id ?? ''} meet without a common node. Put a node there or move a wall.`
   return connected(walls) ? null : 'The walls fall into parts that are not joined. Join them, or compute each part for itself.'

@@ -2,6 +2,7 @@
  * The sectorial coordinate and its statical moment along every stretch of an open section, and the stresses
  * of restrained warping at the same fibre (methods §3.3). mm², mm⁴; MPa.
  */
+import { thicknessAt } from '#shared/torsion/mid-line'
 import { midLineOf } from '#shared/torsion/section-check'
 import { pathLength, pathPoint, tangentAt } from '#shared/torsion/geometry'
 import { refusal, type OpenSection, type Point, type Refusal } from '#shared/torsion/section'
@@ -52,7 +53,7 @@ export function sectorialRun(section: OpenSection): SectorialRun | Refusal {
   const runs = walked.map(({ piece, startOmega }) => {
     const length = pathLength(piece.path)
     const omega = (part: number) => startOmega - mean + sectorialGrowth(piece.path, pole, part)
-    const moment = (part: number) => part * length * piece.t * weigh(piece.E) * rulePoints(piece.path).reduce((sum, one) => sum + one.weight * omega(part * one.part), 0)
+    const moment = (part: number) => part * length * weigh(piece.E) * rulePoints(piece.path).reduce((sum, one) => sum + one.weight * thicknessAt(piece, part * one.part) * omega(part * one.part), 0)
     return { piece, length, omega, moment }
   })
   const start = gatherFromFreeEdges(runs.map(({ piece }) => piece), runs.map(({ moment }) => moment(1)))
@@ -62,14 +63,14 @@ export function sectorialRun(section: OpenSection): SectorialRun | Refusal {
     const tangent = tangentAt(piece.path, part)
     const along = (at.x - pole.x) * Math.cos(tangent) + (at.y - pole.y) * Math.sin(tangent)
     return {
-      wall: piece.bendAt === null ? piece.walls[0]?.id ?? '' : `bend ${piece.bendAt}`, at, t: piece.t, G: piece.G, weight: weigh(piece.E),
-      omega: gammaPrimary === 0 ? 0 : omega(part), across: secondary ? Math.abs(along) * piece.t / 2 : 0, S: gammaPrimary === 0 ? 0 : (start[i] ?? 0) + moment(part),
+      wall: piece.bendAt === null ? piece.walls[0]?.id ?? '' : `bend ${piece.bendAt}`, at, t: thicknessAt(piece, part), G: piece.G, weight: weigh(piece.E),
+      omega: gammaPrimary === 0 ? 0 : omega(part), across: secondary ? Math.abs(along) * thicknessAt(piece, part) / 2 : 0, S: gammaPrimary === 0 ? 0 : (start[i] ?? 0) + moment(part),
     }
   }))
   // ∫S dω by parts on each stretch: [S ω] − ∫ω dS, with dS = ω t ds.
   const closed = runs.reduce((sum, { piece, length, omega, moment }, i) => {
     const S = (part: number) => (start[i] ?? 0) + moment(part)
-    const square = length * piece.t * weigh(piece.E) * rulePoints(piece.path).reduce((total, one) => total + one.weight * omega(one.part) ** 2, 0)
+    const square = length * weigh(piece.E) * rulePoints(piece.path).reduce((total, one) => total + one.weight * thicknessAt(piece, one.part) * omega(one.part) ** 2, 0)
     return sum + S(1) * omega(1) - S(0) * omega(0) - square
   }, 0)
   return { ok: true, properties, fibres, residual: gammaPrimary === 0 ? 0 : Math.abs(closed + gammaPrimary) / gammaPrimary }

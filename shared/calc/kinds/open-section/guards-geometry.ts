@@ -45,7 +45,7 @@ function seams(s: Solution): Guard[] {
 function curvature(s: Solution): Guard[] {
   const arcs = s.model.walls.flatMap((wall): Guard[] => {
     if (!wall.arc) return []
-    const ratio = wall.arc.radius / wall.t.value
+    const ratio = wall.arc.radius / wall.tMax
     return below(ratio, CURVED)
       ? [fired('G-08', { of: wall.id, wall: wall.id, values: { 'r/t': ratio }, message: `Arc ${wall.id} has a mean radius of ${figure(ratio)} times its thickness, below ${CURVED}.` })]
       : []

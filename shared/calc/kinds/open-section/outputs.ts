@@ -54,6 +54,7 @@ function sectorialOutputs(s: Solution, u: ShownUnits): Output[] {
 function wallOutputs(s: Solution, u: ShownUnits): Output[] {
   return s.walls.flatMap(({ wall, J, share, slenderness }) => [
     ...output(`t:${wall.id}`, `t_{${sub(wall.id)}}`, `Thickness, wall ${wall.id}`, wall.t.value, 'length', wall.t.unit, '§1.9', { wall: wall.id }),
+    ...output(`tEnd:${wall.id}`, `t_{2,${sub(wall.id)}}`, `Thickness at its end, wall ${wall.id}`, wall.tEnd?.value ?? null, 'length', wall.t.unit, '§1.9', { wall: wall.id }),
     ...output(`L:${wall.id}`, `L_{${sub(wall.id)}}`, `Mid-line length between nodes, wall ${wall.id}`, wall.length, 'length', u.length, '§1.9', { wall: wall.id }),
     ...output(`J:${wall.id}`, `J_{${sub(wall.id)}}`, `Part of J, wall ${wall.id}`, J, 'inertia', u.inertia, '§1.9', { wall: wall.id }),
     ...output(`share:${wall.id}`, `T_{${sub(wall.id)}}/T`, `Torque share, wall ${wall.id}`, share, 'ratio', '%', '§1.9', { wall: wall.id }),

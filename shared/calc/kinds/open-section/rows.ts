@@ -6,7 +6,7 @@ export function wallRows(s: Solution): WallRow[] {
   const least = leastBy(s, row => row.wall)
   const cases = s.cases.filter(c => s.detailed.has(c.model.id))
   return s.walls.map(({ wall, J, share, slenderness }) => ({
-    wall: wall.id, name: wall.name, length: wall.length, thickness: wall.t.value, G: wall.G, J, share, slenderness, material: wall.material.id,
+    wall: wall.id, name: wall.name, length: wall.length, thickness: wall.tMax, G: wall.G, J, share, slenderness, material: wall.material.id,
     torque: Object.fromEntries(cases.map(c => [c.model.id, c.torque * share])),
     tau: Object.fromEntries(cases.map(c => [c.model.id, c.tau.get(wall.id) ?? 0])),
     leastMargin: least.get(wall.id) ?? null,

@@ -7,7 +7,7 @@ import { declarationFields } from '#shared/calc/parts/declaration-fields'
 import { choice, declared, optionalQuantity, source, unitSystem } from '#shared/calc/parts/fields'
 import { factors, loading } from '#shared/calc/parts/loading-fields'
 import { materials } from '#shared/calc/parts/material-fields'
-import { junctions, start, walls } from '#shared/calc/parts/wall-fields'
+import { junctions, start, taperingWalls } from '#shared/calc/parts/wall-fields'
 
 const declarations = z.strictObject({
   ...declarationFields,
@@ -17,7 +17,7 @@ const declarations = z.strictObject({
 export const openSectionSchema = z.strictObject({
   units: unitSystem,
   start,
-  walls,
+  walls: taperingWalls,
   junctions,
   materials,
   loading,

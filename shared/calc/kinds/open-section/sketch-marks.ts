@@ -1,6 +1,6 @@
 /** Balloons, dimensions, arrows and flags around the walls, placed where they hide nothing. */
 import type { Shape } from '#shared/calc/types'
-import type { ModelWall } from '#shared/calc/parts/wall-model'
+import { thicknessAlong, type ModelWall } from '#shared/calc/parts/wall-model'
 import { shownUnits } from '#shared/calc/parts/shown-units'
 import { midLine, polar, type Pt } from '#shared/calc/kinds/open-section/sketch-walls'
 import type { Solution } from '#shared/calc/kinds/open-section/solution'
@@ -41,7 +41,7 @@ export function wallSpots(s: Solution, room: Room, beyond: number): Spot[] {
 interface Middle { at: Pt, direction: number, half: number }
 export function middleOf(s: Solution, wall: ModelWall, part = 0.5): Middle {
   const stations = midLine(s, wall)
-  const half = wall.t.value / 2
+  const half = thicknessAlong(wall, part) / 2
   const [a, b] = [stations[0], stations.at(-1)]
   if (stations.length > 2) {
     const mid = stations[Math.round((stations.length - 1) * part)]
@@ -113,8 +113,9 @@ const lengthText = (wall: ModelWall, unit: 'mm' | 'cm' | 'm' | 'in' | 'ft') => w
 export function thicknessNotes(s: Solution, room: Room): Shape[] {
   const seen = new Set<string>()
   return [...s.walls].sort((a, b) => b.wall.length - a.wall.length).flatMap(({ wall }): Shape[] => {
-    if (seen.has(wall.t.typed) || seen.size > 8) return []
-    seen.add(wall.t.typed)
+    const thickness = wall.tEnd ? `${wall.t.typed} to ${wall.tEnd.typed}` : wall.t.typed
+    if (seen.has(thickness) || seen.size > 8) return []
+    seen.add(thickness)
     const places = [0.22, 0.78, 0.5].flatMap(part => ([-1, 1] as const).map((side) => {
       const m = middleOf(s, wall, part)
       return polar(m.at, m.direction + side * outerSide(m, room.centre) * Math.PI / 2, m.half + 17 * room.pixel)
@@ -122,7 +123,7 @@ export function thicknessNotes(s: Solution, room: Room): Shape[] {
     const clear = (p: Pt) => Math.min(...room.taken.map(t => distance(p, t.at) - t.radius - 14 * room.pixel), 0)
     const at = places.reduce((a, b) => clear(b) > clear(a) + 1e-9 ? b : a)
     room.taken.push({ at, radius: 15 * room.pixel })
-    return [{ type: 'label', at, text: `t ${wall.t.typed}`, role: 'note', anchor: 'middle' }]
+    return [{ type: 'label', at, text: `t ${thickness}`, role: 'note', anchor: 'middle' }]
   })
 }
 

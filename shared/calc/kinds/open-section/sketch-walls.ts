@@ -1,6 +1,6 @@
 /** Outlines of the walls: faces at half the thickness either side of the mid-line, bends round, corners mitred, fillets filled. */
 import type { Shape } from '#shared/calc/types'
-import type { ModelWall } from '#shared/calc/parts/wall-model'
+import { thicknessAlong, thicknessAtNode, type ModelWall } from '#shared/calc/parts/wall-model'
 import type { CornerSolution, Solution } from '#shared/calc/kinds/open-section/solution'
 
 export type Pt = [number, number]
@@ -32,10 +32,10 @@ export function midLine(s: Solution, wall: ModelWall): Station[] {
 /** One closed outline per wall; the first half of the points is one face, the second half the other, back. */
 export function wallShapes(s: Solution, level: (wall: string) => number): Shape[] {
   return s.walls.map(({ wall }) => {
-    const half = wall.t.value / 2
     const stations = bendEnds(s, wall, midLine(s, wall))
-    const left = stations.map(({ at, direction }) => polar(at, direction + Math.PI / 2, half))
-    const right = stations.map(({ at, direction }) => polar(at, direction - Math.PI / 2, half))
+    const half = (i: number) => thicknessAlong(wall, i / (stations.length - 1)) / 2
+    const left = stations.map(({ at, direction }, i) => polar(at, direction + Math.PI / 2, half(i)))
+    const right = stations.map(({ at, direction }, i) => polar(at, direction - Math.PI / 2, half(i)))
     closeEnd(s, wall, { node: wall.from, atStart: true }, left, right)
     closeEnd(s, wall, { node: wall.to, atStart: false }, left, right)
     return { type: 'path', points: [...left, ...right.reverse()], closed: true, role: 'wall', level: level(wall.id), wall: wall.id }
@@ -100,8 +100,8 @@ function closeEnd(s: Solution, wall: ModelWall, end: End, left: Pt[], right: Pt[
 /** Where the faces of a wall meet those of its neighbours, counter-clockwise and clockwise of its leaving direction. */
 function facesAtNode(wall: ModelWall, meeting: ModelWall[], node: string, at: Pt): [Pt, Pt] {
   const own = leavingDirection(wall, node)
-  const half = wall.t.value / 2
-  const others = meeting.filter(w => w !== wall).map(w => ({ half: w.t.value / 2, angle: positive(leavingDirection(w, node) - own) }))
+  const half = thicknessAtNode(wall, node) / 2
+  const others = meeting.filter(w => w !== wall).map(w => ({ half: thicknessAtNode(w, node) / 2, angle: positive(leavingDirection(w, node) - own) }))
   const next = others.reduce((a, b) => b.angle < a.angle ? b : a)
   const previous = others.reduce((a, b) => b.angle > a.angle ? b : a)
   const corner = (angle: number, theirs: number, side: 1 | -1): Pt => polar(polar(at, own, reach(angle, half, theirs)), own + side * Math.PI / 2, half)
@@ -134,7 +134,7 @@ export function filletShapes(s: Solution, level: (wall: string) => number): Shap
       if (!next || next.wall === wall) return []
       const between = positive(next.angle - angle)
       if (between > 175 * Math.PI / 180) return []
-      return [fillet([at.x, at.y], angle, wall.t.value / 2, next.wall.t.value / 2, between, r, Math.max(level(wall.id), level(next.wall.id)))]
+      return [fillet([at.x, at.y], angle, thicknessAtNode(wall, c.node) / 2, thicknessAtNode(next.wall, c.node) / 2, between, r, Math.max(level(wall.id), level(next.wall.id)))]
     })
   })
 }

@@ -21,6 +21,8 @@ export interface WallSolution {
   share: number
   /** Length between mid-line intersections over thickness. */
   slenderness: number
+  /** What its free ends take off J, mm⁴. */
+  ends: number
   /** Stress at the worse face over G t θ′: 1 for a straight wall, more on the inside of an arc. */
   faceFactor: number
 }

@@ -1,5 +1,5 @@
 /** Inner corners: where walls meet, how far the material turns there, and the stress factor or the reason why none is given. */
-import type { ModelJunction, ModelWall } from '#shared/calc/parts/wall-model'
+import { thicknessAtNode, type ModelJunction, type ModelWall } from '#shared/calc/parts/wall-model'
 import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
 import type { CornerSolution } from '#shared/calc/kinds/open-section/solution'
 import type { OpenTorsion } from '#shared/torsion/open-section'
@@ -14,15 +14,15 @@ export function cornersOf(model: OpenSectionModel, torsion: OpenTorsion): Corner
     if (!first) return []
     const junction = model.junctions.find(j => j.node === node) ?? null
     const interior = materialAngle(node, walls)
-    const step = walls.length === 2 && walls.some(w => w.t.value !== first.t.value)
+    const step = walls.length === 2 && walls.some(w => thicknessAtNode(w, node) !== thicknessAtNode(first, node))
     const reEntrant = interior > RE_ENTRANT || step
     if (!reEntrant && !junction) return []
-    const thickest = walls.reduce((a, b) => b.t.value > a.t.value ? b : a)
+    const thickest = walls.reduce((a, b) => b.tMax > a.tMax ? b : a)
     return [{
       node, junction, walls, interior: step ? Math.max(interior, 1.5 * Math.PI) : interior,
       factor: factor.ok ? { ok: true, K: factor.K, source: factor.source === 'bend' ? 'closed form of a concentric bend' : 'table of machined right angles' } : { ok: false, reason: withoutPlace(factor.reason) },
-      sharp: reEntrant && !hasRadius(junction), ratio: (junction?.radius.value ?? 0) / thickest.t.value,
-      worst: walls.reduce((a, b) => b.G * b.t.value > a.G * a.t.value ? b : a),
+      sharp: reEntrant && !hasRadius(junction), ratio: (junction?.radius.value ?? 0) / thickest.tMax,
+      worst: walls.reduce((a, b) => b.G * b.tMax > a.G * a.tMax ? b : a),
     }]
   })
 }

@@ -82,6 +82,7 @@ export function engineSection(model: Pick<OpenSectionModel, 'nodes' | 'walls' | 
     nodes: model.nodes,
     walls: model.walls.map(w => ({
       id: w.id, from: w.from, to: w.to, t: w.t.value, G: w.G,
+      ...(w.tEnd ? { tEnd: w.tEnd.value } : {}),
       ...(withE && w.E !== null ? { E: w.E } : {}),
       ...(w.arc ? { arc: { radius: w.arc.radius, sweep: w.arc.sweep, startDirection: w.arc.direction } } : {}),
     })),
@@ -107,11 +108,11 @@ function wallSolutions(model: OpenSectionModel, torsion: OpenTorsion): WallSolut
   return torsion.perWall.flatMap((w): WallSolution[] => {
     const wall = model.walls.find(m => m.id === w.id)
     if (!wall) return []
-    const strip = wall.arc ? stripFactor({ radius: wall.arc.radius, t: wall.t.value }) : null
+    const strip = wall.arc ? stripFactor({ radius: wall.arc.radius, t: wall.tMax }) : null
     return [{
       wall, freeEnds: w.freeEnds, cornerEnds: w.cornerEnds, developed: w.developed, effective: w.effective,
       Jplain: w.plainGJ / w.G, J: w.GJ / w.G, GJ: w.GJ, share: w.share, slenderness: w.slenderness,
-      faceFactor: strip?.ok ? strip.K : 1,
+      faceFactor: strip?.ok ? strip.K : 1, ends: -w.endTerm / w.G,
     }]
   })
 }
@@ -127,7 +128,7 @@ function corrections(model: OpenSectionModel, torsion: OpenTorsion) {
   return {
     bulges, noBulge: torsion.bulges.flatMap(({ node, bulge }) => bulge.ok ? [] : [{ node, reason: bulge.reason }]),
     bulge: sum(bulges.map(b => b.J)), endLoss: torsion.endLoss,
-    ends: -sum(torsion.perWall.map(w => torsion.endLoss * w.t ** 4 * (w.freeEnds + w.cornerEnds))),
+    ends: sum(torsion.perWall.map(w => w.endTerm / w.G)),
   }
 }
 

@@ -62,13 +62,14 @@ function cornersShown(s: Solution, all: boolean): CornerSolution[] {
 function faceLines(c: CaseSolution, w: WallSolution): WorkingLine[] {
   const { wall } = w
   const rate = Math.abs(c.rate)
-  const product = `${qty(wall.G, 'MPa')}\\cdot ${qty(wall.t.value, 'mm')}\\cdot ${qty(rate, 'rad/mm')}`
+  const product = `${qty(wall.G, 'MPa')}\\cdot ${qty(wall.tMax, 'mm')}\\cdot ${qty(rate, 'rad/mm')}`
   const tau = c.tau.get(wall.id) ?? 0
-  if (!wall.arc) return [line(`${sym('\\tau', wall.id)} = G\\,${sym('t', wall.id)}\\,|\\theta'|`, product, res(tau, 'MPa'))]
-  const ri = wall.arc.radius - wall.t.value / 2
+  const t = sym('t', wall.tEnd ? `max,${wall.id}` : wall.id)
+  if (!wall.arc) return [line(`${sym('\\tau', wall.id)} = G\\,${t}\\,|\\theta'|`, product, res(tau, 'MPa'))]
+  const ri = wall.arc.radius - wall.tMax / 2
   return [
-    bendFactorLine(sym('K', wall.id), ri, wall.t.value, w.faceFactor),
-    line(`${sym('\\tau', wall.id)} = ${sym('K', wall.id)}\\,G\\,${sym('t', wall.id)}\\,|\\theta'|`, `${num(w.faceFactor)}\\cdot ${product}`, res(tau, 'MPa')),
+    bendFactorLine(sym('K', wall.id), ri, wall.tMax, w.faceFactor),
+    line(`${sym('\\tau', wall.id)} = ${sym('K', wall.id)}\\,G\\,${t}\\,|\\theta'|`, `${num(w.faceFactor)}\\cdot ${product}`, res(tau, 'MPa')),
   ]
 }
 
@@ -77,10 +78,10 @@ function cornerLines(c: CaseSolution, k: CornerSolution): WorkingLine[] {
   const K = sym('K', `c,${k.node}`)
   const { worst } = k
   const factor = k.junction?.make === 'bent'
-    ? bendFactorLine(K, k.junction.radius.value, worst.t.value, k.factor.K)
+    ? bendFactorLine(K, k.junction.radius.value, worst.tMax, k.factor.K)
     : tableLine(K, k.ratio, k.factor.K)
   return [factor, line(`${sym('\\tau', k.node)} = ${K}\\,G\\,t\\,|\\theta'|`,
-    `${num(k.factor.K)}\\cdot ${qty(worst.G, 'MPa')}\\cdot ${qty(worst.t.value, 'mm')}\\cdot ${qty(Math.abs(c.rate), 'rad/mm')}`, res(c.corner.get(k.node) ?? 0, 'MPa'))]
+    `${num(k.factor.K)}\\cdot ${qty(worst.G, 'MPa')}\\cdot ${qty(worst.tMax, 'mm')}\\cdot ${qty(Math.abs(c.rate), 'rad/mm')}`, res(c.corner.get(k.node) ?? 0, 'MPa'))]
 }
 
 /** Between two points of the table: the lesser of the chord in x = r/t and the chord in logarithms. */

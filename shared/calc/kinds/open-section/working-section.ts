@@ -3,6 +3,7 @@ import type { WorkingLine, WorkingStep } from '#shared/calc/types'
 import type { CornerSolution, Solution, WallSolution } from '#shared/calc/kinds/open-section/solution'
 import { addends, line, num, qty, res, sym } from '#shared/calc/parts/tex'
 import { bulgeL, bulgeT } from '#shared/torsion/published'
+import { cubicThickness } from '#shared/torsion/wall-stiffness'
 
 export function sectionSteps(s: Solution): WorkingStep[] {
   return [
@@ -66,15 +67,26 @@ function bulgeLines(b: Solution['bulges'][number]): WorkingLine[] {
   ]
 }
 
+/** A wall whose thickness tapers: (t₁ + t₂)(t₁² + t₂²)/12 stands for t³/3, and each free end takes off by its own thickness. */
+function taperLine(w: WallSolution, length: string, share: number | null, { c, t1, t2 }: { c: number, t1: number, t2: number }): WorkingLine {
+  const [a, b] = [sym('t', `1,${w.wall.id}`), sym('t', `2,${w.wall.id}`)]
+  return line(
+    `${sym('J', w.wall.id)} = \\frac{${length}}{12}(${a}+${b})(${a}^2+${b}^2)${w.ends > 0 ? ' - c\\sum t_e^4' : ''}${share === null ? '' : ' + \\sum\\tfrac12 J_b'}`,
+    `\\frac{${num(w.effective)}}{12}(${num(t1)}+${num(t2)})(${num(t1)}^2+${num(t2)}^2)${w.ends > 0 ? ` - ${num(c)}\\cdot ${num(w.ends / c)}` : ''}${share === null ? '' : ` + ${num(share)}`}`,
+    res(w.J, 'mm⁴'),
+  )
+}
+
 /** One wall: Lt³/3, less its ends, plus its half of each bulge. */
 function wallLines(s: Solution, w: WallSolution): WorkingLine[] {
   const { wall } = w
   const ends = w.freeEnds + w.cornerEnds
-  const share = w.J - w.effective * wall.t.value ** 3 / 3 + s.endLoss * wall.t.value ** 4 * ends
+  const share = w.J - w.effective * cubicThickness([wall.t.value, (wall.tEnd ?? wall.t).value]) + w.ends
   const hasBulge = Math.abs(share) > 1e-9 * w.J
   const changed = Math.abs(w.effective - w.developed) > 1e-9 * w.developed
   const length = changed ? sym('L', `e,${wall.id}`) : s.corners.some(c => c.junction?.make === 'bent' && c.walls.includes(wall)) ? sym('L', `d,${wall.id}`) : sym('L', wall.id)
   const t = sym('t', wall.id)
+  if (wall.tEnd) return [taperLine(w, length, hasBulge ? share : null, { c: s.endLoss, t1: wall.t.value, t2: wall.tEnd.value })]
   return [
     ...(changed ? [line(`${sym('L', `e,${wall.id}`)} = ${sym('L', wall.id)} + \\Delta L`, `${qty(w.developed, 'mm')} ${w.effective < w.developed ? '-' : '+'} ${qty(Math.abs(w.effective - w.developed), 'mm')}`, res(w.effective, 'mm'))] : []),
     line(

@@ -1,5 +1,6 @@
 /** The derivation with the numbers put in: from the load through J, the rate of twist and the stress to the margin. */
 import type { WorkingLine, WorkingStep } from '#shared/calc/types'
+import { thicknessAlong } from '#shared/calc/parts/wall-model'
 import type { Measured } from '#shared/calc/parts/model'
 import { sub, line, num, qty, res, sym } from '#shared/calc/parts/tex'
 import type { Solution } from '#shared/calc/kinds/open-section/solution'
@@ -31,7 +32,7 @@ function conversions(s: Solution): WorkingStep[] {
   return [{
     heading: 'Typed values in N, mm, MPa and rad', method: '§10',
     lines: [
-      ...model.walls.flatMap(w => from(sym('t', w.id), w.t, 'length')),
+      ...model.walls.flatMap(w => [...from(sym('t', w.tEnd ? `1,${w.id}` : w.id), w.t, 'length'), ...from(sym('t', `2,${w.id}`), w.tEnd, 'length')]),
       ...model.junctions.flatMap(j => from(sym('r', j.node), j.radius, 'length')),
       ...from('L', model.length, 'length'), ...from('\\varphi_a', model.twistAllowed, 'angle'), ...materials, ...cases,
     ],
@@ -43,7 +44,7 @@ function sectorial(s: Solution): WorkingStep[] {
   const p = s.sectorial
   if (!p) return []
   const by = '\\text{along the mid-line}'
-  const area = s.walls.map(w => `${num(w.developed)}\\cdot ${num(w.wall.t.value)}`)
+  const area = s.walls.map(w => `${num(w.developed)}\\cdot ${num(thicknessAlong(w.wall, 0.5))}`)
   const gamma = p.GammaSecondary > 0
     ? line('\\Gamma = \\Gamma_1 + \\int \\frac{t^2}{12}\\rho^2\\,\\mathrm{d}A', `${num(p.GammaPrimary)} + ${num(p.GammaSecondary)}`, res(p.Gamma, 'mm⁶'))
     : line('\\Gamma = \\int \\omega^2\\,\\mathrm{d}A', by, res(p.Gamma, 'mm⁶'))

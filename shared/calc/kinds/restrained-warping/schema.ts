@@ -4,7 +4,7 @@ import { declarationFields } from '#shared/calc/parts/declaration-fields'
 import { choice, declared, identifier, optionalQuantity, quantity, source, unitSystem } from '#shared/calc/parts/fields'
 import { caseHead, factors } from '#shared/calc/parts/loading-fields'
 import { materials } from '#shared/calc/parts/material-fields'
-import { junctions, start, walls } from '#shared/calc/parts/wall-fields'
+import { junctions, start, taperingWalls } from '#shared/calc/parts/wall-fields'
 
 export const MAX_SUPPORTS = 40
 export const MAX_LOADS = 60
@@ -42,7 +42,7 @@ const loadCase = z.strictObject({
 export const restrainedWarpingSchema = z.strictObject({
   units: unitSystem,
   start,
-  walls,
+  walls: taperingWalls,
   junctions,
   materials,
   length: quantity('Length of the bar', 'length', { symbol: 'L' }),
