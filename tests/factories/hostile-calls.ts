@@ -106,7 +106,7 @@ export const notFronts: Readonly<Record<string, readonly string[]>> = {
     'significant', 'texNumber', 'texQuantity', 'texUnit', 'withUnit', 'unboundedSentence',
   ],
   'a bare formula behind a front': [
-    'endLossOf', 'faceStress', 'wallStiffness', 'cornersOnMidLine', 'bulgeOfL', 'bulgeOfT', 'stripAsWagner', 'stripIn', 'stripRateLimit', 'bareReserve', 'passes', 'specialFactor', 'shearAllowables',
+    'endLossOf', 'faceStress', 'cubicThickness', 'wallStiffness', 'cornersOnMidLine', 'bulgeOfL', 'bulgeOfT', 'stripAsWagner', 'stripIn', 'stripRateLimit', 'bareReserve', 'passes', 'specialFactor', 'shearAllowables',
     'shearYieldFromTension', 'respondOfSolid', 'isFin', 'cellMatrix', 'closedBendFactor', 'areaMoments', 'vonMises', 'plateStress', 'panelCoefficient', 'fittedCoefficient', 'cappedAtYield',
     'loopCorners', 'windingNumber', 'reentrantVertices',
   ],

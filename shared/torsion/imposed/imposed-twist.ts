@@ -38,6 +38,8 @@ export interface FollowingResponse {
 export function followTwist(part: FollowingPart, { rate, gradient, offset, fibre, E }: ImposedTwist): FollowingResponse | Refusal {
   if (![rate, gradient, offset, fibre].every(Number.isFinite)) return refusal('Rate of twist, its change, offset and fibre must be finite numbers.')
   if (!(Number.isFinite(part.GJ) && part.GJ > 0)) return refusal('The part needs a torsional stiffness greater than zero.')
+  if (!(Number.isFinite(E) && E > 0)) return refusal('The part needs a modulus of elasticity greater than zero.')
+  if (part.warping && !(part.warping.EG >= 0 && part.warping.E > 0 && Number.isFinite(part.warping.omega))) return refusal('The warping stiffness must be zero or more, and its modulus of elasticity greater than zero.')
   const curvature = offset * gradient
   return finiteOrRefused({
     ok: true as const, torque: part.GJ * rate, tau: part.shearPerRate * Math.abs(rate),

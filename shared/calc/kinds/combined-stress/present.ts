@@ -92,7 +92,7 @@ const REACHED: Record<Rule['by'], string> = {
   circle: 'RF = \\frac{1}{\\sqrt{R_n^2+R_s^2}}', powers: '(RF\\,R_n)^a + (RF\\,R_s)^b = 1', panel: 'RF', steady: 'R_{steady}^2 + (RF\\,R_{varying})^2 = 1', none: '',
 }
 
-function interactionLines(s: CombinedSolution, { point, sigma, tau, toUltimate, ratios, reserve }: CombinedState): WorkingLine[] {
+function interactionLines(s: CombinedSolution, { point, sigma, tau, toUltimate, ratios, reserve, exhausted }: CombinedState): WorkingLine[] {
   if (!ratios || !reserve?.ok || reserve.rf === null) return []
   const { rule, factors } = s.model
   const factor = toUltimate * factors.special
@@ -103,7 +103,7 @@ function interactionLines(s: CombinedSolution, { point, sigma, tau, toUltimate, 
     ? rule.loaded === 'compression'
       ? line('RF = \\frac{2}{R_c+\\sqrt{R_c^2+4R_s^2}}', `\\frac{2}{${num(Rn)}+\\sqrt{${num(Rn)}^2+4\\cdot ${num(Rs)}^2}}`, num(reserve.rf))
       : line('RF = \\frac{1}{\\sqrt{R_b^2+R_s^2}}', `\\frac{1}{\\sqrt{${num(Rn)}^2+${num(Rs)}^2}}`, num(reserve.rf))
-    : line(REACHED[rule.by], rule.by === 'circle' ? `\\frac{1}{\\sqrt{${num(Rn)}^2+${num(Rs)}^2}}` : '\\text{solved for the multiplier}', num(reserve.rf))
+    : line(exhausted ? `R_{steady} \\ge 1:\\quad ${REACHED.circle}` : REACHED[rule.by], rule.by === 'circle' || exhausted ? `\\frac{1}{\\sqrt{${num(Rn)}^2+${num(Rs)}^2}}` : '\\text{solved for the multiplier}', num(reserve.rf))
   return [
     line('R_n = \\frac{f\\,|\\sigma|}{F_n}', `\\frac{${num(factor)}\\cdot ${qty(Math.abs(sigma), 'MPa')}}{${qty(Fn, 'MPa')}}`, num(Rn)),
     line('R_s = \\frac{f\\,\\tau}{F_s}', `\\frac{${num(factor)}\\cdot ${qty(tau, 'MPa')}}{${qty(Fs, 'MPa')}}`, num(Rs)),

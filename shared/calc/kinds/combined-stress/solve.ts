@@ -28,7 +28,7 @@ export interface CombinedModel {
   unusual: Unusual[]
 }
 /** Ratios at ultimate with the factors in force, and their reserve by the rule. */
-export interface CombinedState { point: CombinedPoint, sigma: number, tau: number, equivalent: number, toLimit: number, toUltimate: number, ratios: { Rn: number, Rs: number } | null, reserve: Reserve | Refusal | null }
+export interface CombinedState { point: CombinedPoint, sigma: number, tau: number, equivalent: number, toLimit: number, toUltimate: number, ratios: { Rn: number, Rs: number } | null, reserve: Reserve | Refusal | null, /** The steady part alone reaches the criterion: the reserve is that of all loads together. */ exhausted: boolean }
 export interface CombinedSolution extends JudgedMargins { model: CombinedModel, states: CombinedState[] }
 
 export function parseCombinedStress(value: unknown, links: Links = noLinks): ParsedModel<CombinedModel> {
@@ -89,9 +89,10 @@ export function solveCombinedStress(model: CombinedModel): { ok: true, solution:
     const { sigma, tau } = atOneFibre(point.normal.map(one => one.sigma), { sv: point.torsion, omega: point.warping, direct: point.direct })
     const factor = levels.toUltimate * model.factors.special
     const ratios = ratiosOf(model.rule, point, Math.abs(sigma) * factor, tau * factor)
-    const reserve = ratios && reserveOf(model.rule, ratios)
+    const exhausted = ratios !== null && steadyAlone(model.rule, ratios)
+    const reserve = ratios && (exhausted ? circleRule(ratios.Rn, ratios.Rs) : reserveOf(model.rule, ratios))
     if (reserve && !reserve.ok) faults.push({ path: `points.${i}`, message: reserve.reason })
-    return [{ point, sigma, tau, equivalent: vonMises(sigma, tau), toLimit: levels.toLimit, toUltimate: levels.toUltimate, ratios, reserve }]
+    return [{ point, sigma, tau, equivalent: vonMises(sigma, tau), toLimit: levels.toLimit, toUltimate: levels.toUltimate, ratios, reserve, exhausted }]
   })
   return faults.length > 0 ? { ok: false, faults } : { ok: true, solution: { model, states, ...judgeMargins(marginSets(model, states)) } }
 }
@@ -103,6 +104,9 @@ function ratiosOf(rule: Rule, { material, temperature }: CombinedPoint, sigma: n
   const k = knockdownOf(material, temperature?.value)
   return material.Ftu === null || material.Fsu === null ? null : { Rn: sigma / (k * material.Ftu), Rs: tau / (k * material.Fsu) }
 }
+
+/** No multiplier of the varying part remains; what the loads together lack is still a number, and a negative margin. */
+const steadyAlone = (rule: Rule, { Rn, Rs }: { Rn: number, Rs: number }): boolean => rule.by === 'steady' && (rule.steady === 'normal' ? Rn : Rs) >= 1
 
 function reserveOf(rule: Rule, { Rn, Rs }: { Rn: number, Rs: number }): Reserve | Refusal {
   switch (rule.by) {
