@@ -7,7 +7,7 @@ import { isUnit } from '#shared/units/units'
 
 /** Written forms that the rules below do not reach. Left side: after `tidy`. */
 const otherSpellings: Record<string, UnitId> = {
-  'mpa': 'MPa', 'gpa': 'GPa', 'kpa': 'kPa', 'pa': 'Pa', 'PSI': 'psi', 'KSI': 'ksi', 'MSI': 'Msi', 'msi': 'Msi', 'MN/m²': 'MPa',
+  'mpa': 'MPa', 'gpa': 'GPa', 'kpa': 'kPa', 'hpa': 'hPa', 'pa': 'Pa', 'PSI': 'psi', 'KSI': 'ksi', 'MSI': 'Msi', 'msi': 'Msi', 'MN/m²': 'MPa',
   'kn': 'kN', 'LBF': 'lbf', 'kips': 'kip', 'KIP': 'kip', 'klbf': 'kip',
   'in.': 'in', 'inch': 'in', 'inches': 'in', '″': 'in', '"': 'in', 'ft.': 'ft', '′': 'ft',
   'Nm': 'N·m', 'Nmm': 'N·mm', 'kNm': 'kN·m', 'm·N': 'N·m', 'mm·N': 'N·mm',

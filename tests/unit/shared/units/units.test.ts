@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest'
 import fc from 'fast-check'
+import { given } from '../../../reference/engine'
+import { graph, strip30x3 } from '../../../reference/sections'
+import { torsionOfCells } from '#shared/torsion/cells/torsion-of-cells'
+import { torsionOfOpenSection } from '#shared/torsion/open-section'
+import { respondToTorque } from '#shared/torsion/response'
+import type { Solid } from '#shared/torsion/solids/solid'
+import { torsionOfSolid } from '#shared/torsion/solids/torsion-of-solid'
+import { parseQuantity } from '#shared/units/quantity'
 import type { UnitId } from '#shared/units/units'
 import { parseUnit } from '#shared/units/parse-unit'
 import { dimensionOf, dimensions, engineUnit, fromEngine, intervalFromEngine, intervalToEngine, isUnit, toEngine, unitFits, unitsOf } from '#shared/units/units'
@@ -43,9 +51,35 @@ describe('the common slips (methods reference §10) each differ by what they sho
     ['N·m against N·mm', 'N·m', 'N·mm', 1e3], ['cm⁴ against mm⁴', 'cm⁴', 'mm⁴', 1e4], ['m⁴ against mm⁴', 'm⁴', 'mm⁴', 1e12],
     ['cm⁶ against mm⁶', 'cm⁶', 'mm⁶', 1e6], ['GPa against MPa', 'GPa', 'MPa', 1e3], ['lbf·ft against lbf·in', 'lbf·ft', 'lbf·in', 12],
     ['kip against lbf', 'kip', 'lbf', 1e3], ['ksi against psi', 'ksi', 'psi', 1e3], ['Msi against ksi', 'Msi', 'ksi', 1e3],
-    ['kPa against Pa', 'kPa', 'Pa', 1e3], ['°/m taken as rad/mm', '°/m', 'rad/mm', Math.PI / 180e3], ['rad/m taken as rad/mm', 'rad/m', 'rad/mm', 1e-3],
+    ['kPa against Pa', 'kPa', 'Pa', 1e3], ['kPa against hPa', 'kPa', 'hPa', 10], ['lbf·in against N·mm', 'lbf·in', 'N·mm', 112.9848290276167],
+    ['slug against lbm', 'slug/ft³', 'lb/ft³', 32.17404855643044], ['°/m taken as rad/mm', '°/m', 'rad/mm', Math.PI / 180e3], ['rad/m taken as rad/mm', 'rad/m', 'rad/mm', 1e-3],
   ] as const)('%s', (_, a, b, expected) => {
     expect(ratio(a, b) / expected).toBeCloseTo(1, 13)
+  })
+})
+
+/** Slips of geometry and of load: what the result says of them. */
+describe('the common slips in a calculation', () => {
+  const J = (solid: Solid) => given(torsionOfSolid(solid)).J
+  it('the diameter entered for the radius, or the full axes of an ellipse for the semi-axes: J × 16', () => {
+    expect(J({ shape: 'circle', outerRadius: 24, innerRadius: 0 }) / J({ shape: 'circle', outerRadius: 12, innerRadius: 0 })).toBeCloseTo(16, 12)
+    expect(J({ shape: 'ellipse', semiMajor: 40, semiMinor: 24, ratio: 0 }) / J({ shape: 'ellipse', semiMajor: 20, semiMinor: 12, ratio: 0 })).toBeCloseTo(16, 12)
+  })
+
+  it('outer dimensions taken for those of the mid-line: a box 102 × 52 × 2 has 4A²t/ΣL of 100 × 50', () => {
+    const box = (b: number, h: number) => given(torsionOfCells(graph([[0, 0], [b, 0], [b, h], [0, h]], [[0, 1], [1, 2], [2, 3], [3, 0]].map(([from = 0, to = 0]) => ({ from, to, t: 2 }))))).GJ / 26_900
+    expect(box(100, 50)).toBeCloseTo(4 * 5000 ** 2 * 2 / 300, 6)
+    expect(box(102, 52) / box(100, 50)).toBeCloseTo((102 * 52 / 5000) ** 2 * 300 / 308, 10)
+  })
+
+  it('the torque of a pair taken for that of one part: stress and twist × 2', () => {
+    const open = given(torsionOfOpenSection(strip30x3))
+    const [one, pair] = [given(respondToTorque(open, 500)), given(respondToTorque(open, 1000))]
+    expect([pair.tauMax / one.tauMax, pair.rate / one.rate]).toEqual([2, 2])
+  })
+
+  it('a decimal comma is asked for, never guessed', () => {
+    expect(parseQuantity({ text: '12,5', unit: 'N·m' }, 'torque').ok).toBe(false)
   })
 })
 
