@@ -21,10 +21,11 @@ export default defineConfig({
       {
         resolve: { alias },
         test: {
-          name: 'browser', include: ['tests/browser/**/*.test.ts'], globalSetup: ['tests/api/global-setup.ts'],
+          name: 'browser', include: ['tests/browser/**/*.test.ts'], globalSetup: ['tests/api/global-setup.ts'], expect: { poll: { timeout: 20_000 } },
           testTimeout: 300_000, hookTimeout: 120_000, fileParallelism: false,
         },
       },
+      { resolve: { alias }, test: { name: 'measure', include: ['tests/bench/**/*.measure.ts'], globalSetup: ['tests/api/global-setup.ts'], testTimeout: 600_000, hookTimeout: 120_000, fileParallelism: false } },
       { resolve: { alias }, test: { name: 'deep', include: ['tests/deep/**/*.test.ts'], testTimeout: 600_000, fileParallelism: false } },
     ],
   },

@@ -1,7 +1,7 @@
+import { isDeepStrictEqual } from 'node:util'
 import { evaluateNote } from '#shared/calc/evaluate-note'
 import type { NoteCalc, Results } from '#shared/calc/note-links'
 import { ENGINE_VERSION } from '#shared/calc/registry'
-import { canonicalJson } from '#shared/note/canonical'
 import type { NoteCalculation } from '#shared/note/calculations'
 
 export type { Results }
@@ -16,7 +16,7 @@ export function evaluateDocument(calculations: NoteCalculation[], before?: Befor
   const byId = new Map(before?.calculations.map(c => [c.id, c]))
   const sameInputs = (now: NoteCalc) => {
     const then = byId.get(now.id)
-    return then !== undefined && then.kind === now.kind && then.kindVersion === now.kindVersion && canonicalJson(then.inputs) === canonicalJson(now.inputs)
+    return then !== undefined && then.kind === now.kind && then.kindVersion === now.kindVersion && isDeepStrictEqual(then.inputs, now.inputs)
   }
   const held = before?.engineVersion === ENGINE_VERSION ? { byId, results: before.results } : null
   const { results, computed } = evaluateNote(calculations, held ? { ...held, sameInputs } : undefined)

@@ -40,15 +40,28 @@ export const fitsDimension = (has: Dimension, asked: Dimension): boolean =>
 /** Another calculation that the inputs name, and where. `key` is absent where a whole record or table is taken. */
 export interface FoundLink { path: string, calculation: string, key?: string }
 
+/** Inputs are never changed in place, and a note asks for the same links several times over. */
+const found = new WeakMap<object, readonly FoundLink[]>()
+
 /** Every calculation that the inputs name: single values under `from`, records under `record`, tables under `table`. */
-export function linksOf(inputs: unknown, path: readonly string[] = []): FoundLink[] {
+export function linksOf(inputs: unknown): readonly FoundLink[] {
   if (typeof inputs !== 'object' || inputs === null) return []
-  return Object.entries(inputs).flatMap(([field, inside]): FoundLink[] => {
-    const at = path.join('.')
-    if ((field === 'record' || field === 'table') && typeof inside === 'string') return [{ path: at, calculation: inside }]
+  const known = found.get(inputs)
+  if (known) return known
+  const links: FoundLink[] = []
+  gatherLinks(inputs, '', links)
+  found.set(inputs, links)
+  return links
+}
+
+function gatherLinks(inputs: object, at: string, links: FoundLink[]): void {
+  for (const [field, inside] of Object.entries(inputs) as [string, unknown][]) {
+    if (typeof inside === 'string' && (field === 'record' || field === 'table')) links.push({ path: at, calculation: inside })
+    if (typeof inside !== 'object' || inside === null) continue
     const source = field === 'from' ? sourceIn(inside) : null
-    return source ? [{ path: at, ...source }] : linksOf(inside, [...path, field])
-  })
+    if (source) links.push({ path: at, ...source })
+    else gatherLinks(inside, at === '' ? field : `${at}.${field}`, links)
+  }
 }
 
 function sourceIn(value: unknown): LinkSource | null {

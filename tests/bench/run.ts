@@ -11,6 +11,7 @@ import { fileURLToPath } from 'node:url'
 import { ENGINE_VERSION } from '#shared/calc/registry'
 import { baselineName } from './baseline-name'
 import { compareOutlines, comparisonTable } from './compare-outline'
+import type { Measured } from './note-in-use.measure'
 
 interface Benchmark { name: string, mean: number, min: number, p75: number, sampleCount: number }
 interface Report { files: { groups: { fullName: string, benchmarks: Benchmark[] }[] }[] }
@@ -33,6 +34,22 @@ function measured(): Row[] {
   }
 }
 
+/** The large note in the built server, the database and Chromium. */
+function measuredInUse(): Measured[] {
+  const folder = mkdtempSync(join(tmpdir(), 'torquill-measured-'))
+  const report = join(folder, 'measured.json')
+  try {
+    const { status } = spawnSync('npx', ['vitest', 'run', '--project', 'measure'], { stdio: ['ignore', 'ignore', 'inherit'], env: { ...process.env, TORQUILL_MEASURED: report } })
+    if (status !== 0) throw new Error('The large note could not be measured; vitest says why above.')
+    return JSON.parse(readFileSync(report, 'utf8')) as Measured[]
+  } finally {
+    rmSync(folder, { recursive: true, force: true })
+  }
+}
+
+const tableInUse = (rows: readonly Measured[]) => rows.map(({ name, median, least, baseline, ofBaseline }) =>
+  `${name}: median ${figures(median)} ms, least ${figures(least)}${baseline === '' ? '' : `, ${figures(ofBaseline)} of ${baseline}`}`).join('\n')
+
 const figures = (value: number) => Number(value.toPrecision(3)).toString()
 
 function table(rows: readonly Row[]): string {
@@ -45,6 +62,7 @@ function table(rows: readonly Row[]): string {
 const began = loadavg()[0]
 const rows = measured()
 const outlines = compareOutlines()
+const inUse = measuredInUse()
 const machine = { node: process.versions.node, processor: cpus()[0]?.model ?? '', cores: availableParallelism(), loadBefore: began }
-writeFileSync(fileURLToPath(new URL('./results.json', import.meta.url)), `${JSON.stringify({ engine: ENGINE_VERSION, machine, rows, outlines }, null, 2)}\n`)
-process.stdout.write(`${table(rows)}\n\nGeneral outline beside a general finite-element program, CPU time\n${comparisonTable(outlines)}\n`)
+writeFileSync(fileURLToPath(new URL('./results.json', import.meta.url)), `${JSON.stringify({ engine: ENGINE_VERSION, machine, rows, outlines, inUse }, null, 2)}\n`)
+process.stdout.write(`${table(rows)}\n\nGeneral outline beside a general finite-element program, CPU time\n${comparisonTable(outlines)}\n\nA note of two hundred calculations and three hundred pages in use\n${tableInUse(inUse)}\n`)

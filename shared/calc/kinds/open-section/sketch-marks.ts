@@ -15,13 +15,21 @@ const MOST_MARKED = 24
 const MOST_NAMED = 60
 const distance = (a: Pt, b: Pt) => Math.hypot(a[0] - b[0], a[1] - b[1])
 
-/** Distance of the nearest of these spots from any of the points, negative where one lies inside. */
-export function clearOf(points: Pt[], spots: Spot[]): number {
+/**
+ * Distance of the nearest of these spots from any of the points, negative where one lies inside. Once it is known
+ * to be no more than `enough`, which of the spots is nearest no longer matters and the search ends.
+ */
+export function clearOf(points: Pt[], spots: Spot[], enough = -Infinity): number {
   let least = Infinity
   for (const [x, y] of points) {
     for (const { at: [u, v], radius } of spots) {
-      // Asked some hundred thousand times for one sketch, where Math.hypot is by far the slowest part of an evaluation.
-      least = Math.min(least, Math.sqrt((x - u) * (x - u) + (y - v) * (y - v)) - radius)
+      // Asked some hundred thousand times for one sketch: most spots are too far off in x or y alone, and Math.hypot is slow.
+      const reach = least + radius
+      const [dx, dy] = [x - u, y - v]
+      if (dx >= reach || -dx >= reach || dy >= reach || -dy >= reach) continue
+      const clear = Math.sqrt(dx * dx + dy * dy) - radius
+      if (clear < least) least = clear
+      if (least <= enough) return least
     }
   }
   return least

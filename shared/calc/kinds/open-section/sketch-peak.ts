@@ -43,17 +43,18 @@ function peakAt(s: Solution, at: Pt, away: Pt, text: string, room: Room): Shape 
   const around = places.flatMap(({ knee, end }) => [knee, end])
   const walls = nearby(around, wallSpots(s, room, 1), 0)
   const hidden = nearby(around, [...wallSpots(s, room, ARROWS), ...room.taken], (LINE_RADIUS + CLEAR + 5) * p)
-  const hides = ({ knee, end, leaderFrom }: Flag) => {
-    const lettering = clearOf(along(knee, end, 8 * p).map(([x, y]): Pt => [x, y + 5 * p]), hidden) / p - LINE_RADIUS
+  /** What a flag costs by what it hides; `most` at which it is no longer wanted. */
+  const hides = ({ knee, end, leaderFrom }: Flag, most: number) => {
+    const lettering = clearOf(along(knee, end, 8 * p).map(([x, y]): Pt => [x, y + 5 * p]), hidden, (CLEAR - most + LINE_RADIUS) * p) / p - LINE_RADIUS
     // The leader starts on a wall and may pass through marks, but through a wall only if nothing else serves.
-    const leader = clearOf(along(leaderFrom, knee, 6 * p), walls) < 0 ? CROSSING : CLEAR
+    const leader = clearOf(along(leaderFrom, knee, 6 * p), walls, -1e-12) < 0 ? CROSSING : CLEAR
     return CLEAR - Math.min(lettering, leader, CLEAR)
   }
   let [best, least]: [Flag | undefined, number] = [undefined, Infinity]
   for (const flag of places) {
     // The places come in order of their cost where they hide nothing: none that follows can be better.
     if (flag.cost >= least) break
-    const cost = flag.cost + hides(flag)
+    const cost = flag.cost + hides(flag, least - flag.cost)
     if (cost < least) [best, least] = [flag, cost]
   }
   if (!best) return { type: 'peak', at, text, away }
