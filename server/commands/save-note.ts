@@ -1,19 +1,20 @@
 import { createHash, randomUUID } from 'node:crypto'
+import { isDeepStrictEqual } from 'node:util'
 import { ENGINE_VERSION } from '#shared/calc/registry'
-import { canonicalJson } from '#shared/note/canonical'
-import { calculationsOf } from '#shared/note/calculations'
+import { calculationsOf, type NoteCalculation } from '#shared/note/calculations'
 import { applySteps, type AppliedSteps } from '#shared/note/steps'
 import type { SaveContent } from '#shared/schemas/notes'
 import { noteChain, recordAct } from '#server/audit/record'
 import type { Issue } from '#server/database/entities/issue'
 import { SaveSchema } from '#server/database/entities/save'
-import { evaluateDocument, summaryOf, type Results } from '#server/notes/evaluate-document'
+import { evaluateDocument, summaryOf } from '#server/notes/evaluate-document'
 import { requireAbility } from '#server/notes/facts'
 import { findIssue, lockIssue } from '#server/notes/find-issue'
 import { mapRemarks } from '#server/notes/map-remarks'
 import { addPart } from '#server/notes/parts'
 import { takePen } from '#server/notes/pen'
 import { prepareSave } from '#server/notes/prepare-heavy'
+import { documentOf, resultsOf } from '#server/notes/reading'
 import { runCommand, type CommandContext } from '#server/utils/command-context'
 import { DomainError } from '#server/utils/domain-error'
 
@@ -24,18 +25,24 @@ const sha256 = (text: string) => createHash('sha256').update(text).digest('hex')
 
 /** The steps applied to the stored document, checked against schema and limits, leading to what the browser shows. */
 function nextDocument(issue: Issue, input: SaveContent) {
-  const applied = applySteps(JSON.parse(issue.document), input.steps)
+  const applied = applySteps(documentOf(issue), input.steps)
   if (!applied.ok) throw new DomainError('invalid-document', applied.message, { details: { code: applied.code } })
   const hash = sha256(applied.canonical)
   if (hash !== input.docHash) throw new DomainError('invalid-document', 'The steps do not lead to the document your browser shows. Copy your last words and load the page again.', { details: { code: 'hash-differs' } })
   return { applied, hash }
 }
 
+/** Null where no calculation changed: most saves are of words, and the results of a long note are megabytes. */
 function recompute(issue: Issue, { before, doc }: AppliedSteps) {
-  return evaluateDocument(calculationsOf(doc), {
-    calculations: calculationsOf(before), results: JSON.parse(issue.results) as Results, engineVersion: issue.engineVersion,
-  })
+  const [then, now] = [calculationsOf(before), calculationsOf(doc)]
+  const sameEach = then.length === now.length && then.every((one, i) => sameCalculation(one, now[i]))
+  if (sameEach && issue.engineVersion === ENGINE_VERSION) return null
+  return evaluateDocument(now, { calculations: then, results: resultsOf(issue), engineVersion: issue.engineVersion })
 }
+
+const sameCalculation = (one: NoteCalculation, other: NoteCalculation | undefined): boolean =>
+  other !== undefined && one.id === other.id && one.kind === other.kind && one.kindVersion === other.kindVersion
+  && one.title === other.title && isDeepStrictEqual(one.inputs, other.inputs)
 
 async function refuseConflict(context: CommandContext, issue: Issue, baseSave: number) {
   if (issue.saveNumber === baseSave) return
@@ -58,17 +65,19 @@ export async function saveNote(context: CommandContext, issueId: string, input: 
     await takePen(inside, issue)
     await refuseConflict(inside, issue, input.baseSave)
     const { applied, hash } = nextDocument(issue, input)
-    const { results, changed } = recompute(issue, applied)
+    const evaluated = recompute(issue, applied)
+    const changed = evaluated?.changed ?? {}
     const number = issue.saveNumber + 1
     const old = { save: issue.saveNumber, documentHash: issue.documentHash }
     em.create(SaveSchema, {
       id: randomUUID(), issue, number, author: actor, at: clock(), steps: JSON.stringify(input.steps),
-      snapshot: number % snapshotEvery === 0 ? applied.canonical : null, documentHash: hash, changedResults: canonicalJson(changed),
+      snapshot: number % snapshotEvery === 0 ? applied.canonical : null, documentHash: hash, changedResults: JSON.stringify(changed),
       engineVersion: ENGINE_VERSION, label: null, idempotencyKey: input.key,
     })
     Object.assign(issue, {
-      document: applied.canonical, documentHash: hash, results: canonicalJson(results), engineVersion: ENGINE_VERSION, saveNumber: number,
-      savedAt: clock(), savedBy: actor, lastChangeAt: clock(), ...summaryOf(results),
+      document: applied.canonical, documentHash: hash, engineVersion: ENGINE_VERSION, saveNumber: number,
+      savedAt: clock(), savedBy: actor, lastChangeAt: clock(),
+      ...(evaluated ? { results: JSON.stringify(evaluated.results), ...summaryOf(evaluated.results) } : {}),
     })
     await em.flush()
     await addPart(inside, issue, 'contributor')

@@ -1,17 +1,19 @@
 import { createHash } from 'node:crypto'
 import type { EntityManager } from '@mikro-orm/postgresql'
 import { contentText } from '#shared/review/content-hash'
-import { GuardAnswerSchema } from '#server/database/entities/guard-answer'
+import { GuardAnswerSchema, type GuardAnswer } from '#server/database/entities/guard-answer'
 import type { Issue } from '#server/database/entities/issue'
-import { LooseDecisionSchema } from '#server/database/entities/loose-decision'
+import { LooseDecisionSchema, type LooseDecision } from '#server/database/entities/loose-decision'
 import { contentRead, resultsOf, type Content } from './reading'
 
 export type { Content }
 
-/** All frozen parts of an issue as canonical text, and its SHA-256. Made here only. */
 export async function contentOf(em: EntityManager, issue: Issue): Promise<Content> {
-  const answers = await em.find(GuardAnswerSchema, { issue })
-  const loose = await em.find(LooseDecisionSchema, { issue })
+  return contentFrom(issue, await em.find(GuardAnswerSchema, { issue }), await em.find(LooseDecisionSchema, { issue }))
+}
+
+/** All frozen parts of an issue as canonical text, and its SHA-256. Made here only. */
+export function contentFrom(issue: Issue, answers: readonly GuardAnswer[], loose: readonly LooseDecision[]): Content {
   const rest = {
     number: issue.note.number, letter: issue.letter, title: issue.title, part: issue.part, drawingIssue: issue.drawingIssue, changeNote: issue.changeNote, engineVersion: issue.engineVersion,
     answers: answers.map(a => ({ calcId: a.calcId, guardKey: a.guardKey, kind: a.kind, text: a.text, facts: a.facts, authorId: a.author.id, at: a.at.toISOString() })),

@@ -3,11 +3,11 @@ import { evaluateNote } from '#shared/calc/evaluate-note'
 import { linksFor, type NoteCalc } from '#shared/calc/note-links'
 import { calcKind, isCalcKind } from '#shared/calc/registry'
 import { calculationsOf } from '#shared/note/calculations'
-import { readDocument } from '#shared/note/schema'
 import { applySteps } from '#shared/note/steps'
 import type { SaveContent } from '#shared/schemas/notes'
 import type { Issue } from '#server/database/entities/issue'
 import { findIssue } from '#server/notes/find-issue'
+import { documentOf } from '#server/notes/reading'
 import { prepareOutlines } from '#server/outline/prepare-outlines'
 import { DomainError } from '#server/utils/domain-error'
 
@@ -30,13 +30,13 @@ export async function prepareHeavy(calculations: readonly NoteCalc[]): Promise<v
 /** The same for the issue as it is saved. */
 export async function prepareIssue(em: EntityManager, issueId: string): Promise<void> {
   const issue = await findIssue(em, issueId)
-  await prepareHeavy(calculationsOf(readDocument(JSON.parse(issue.document))))
+  await prepareHeavy(calculationsOf(documentOf(issue)))
 }
 
 /** The same for the document that a save leads to; steps that do not apply are refused where they are checked. */
 export async function prepareSave(issue: Issue, { steps }: SaveContent): Promise<void> {
   if (!mayBeHeavy(issue.document) && !mayBeHeavy(JSON.stringify(steps))) return
-  const applied = applySteps(JSON.parse(issue.document), steps)
+  const applied = applySteps(documentOf(issue), steps)
   if (applied.ok) await prepareHeavy(calculationsOf(applied.doc))
 }
 

@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto'
 import type { EntityManager } from '@mikro-orm/postgresql'
+import { readDocument } from '#shared/note/schema'
 import { applySteps } from '#shared/note/steps'
 import { SaveSchema, type Save } from '#server/database/entities/save'
 import { DomainError } from '#server/utils/domain-error'
@@ -15,7 +16,7 @@ export async function rebuildSave(em: EntityManager, issueId: string, number: nu
   const from = saves.findLastIndex(s => s.snapshot !== null && s.snapshot !== undefined)
   let document = saves[from]?.snapshot ?? ''
   for (const later of saves.slice(from + 1)) {
-    const applied = applySteps(JSON.parse(document), JSON.parse(later.steps))
+    const applied = applySteps(readDocument(JSON.parse(document)), JSON.parse(later.steps))
     if (!applied.ok) throw new Error(`save ${later.number} of ${issueId} cannot be rebuilt: ${applied.message}`)
     document = applied.canonical
   }

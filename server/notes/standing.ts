@@ -8,7 +8,7 @@ import { RemarkSchema, type Remark } from '#server/database/entities/remark'
 import { RemarkEntrySchema, type RemarkEntry } from '#server/database/entities/remark-entry'
 import { SignatureSchema, type Signature } from '#server/database/entities/signature'
 import { TickSchema, type Tick } from '#server/database/entities/tick'
-import { contentOf, type Content } from './content'
+import { contentFrom, type Content } from './content'
 
 /** What is known of the other issues of a note without reading their documents. */
 export type IssueLine = Omit<Issue, 'document' | 'results'>
@@ -26,22 +26,25 @@ export interface Standing {
   ticks: Tick[]
   sheet: CheckEntry[]
   signatures: Signature[]
-  content: Content
+  /** Made when it is asked for: most acts do not rest on it, and it is as long as the note. */
+  readonly content: Content
 }
 
 export async function loadStanding(em: EntityManager, issue: Issue): Promise<Standing> {
   const of = { issue: issue.id }
   const issues = await em.find(IssueSchema, { note: issue.note.id }, { orderBy: { createdAt: 'desc' }, exclude: ['document', 'results'] })
   const remarks = await em.find(RemarkSchema, of, { populate: ['author', 'closedBy'], orderBy: { number: 'asc' } })
+  const answers = await em.find(GuardAnswerSchema, of, { populate: ['author', 'judgedBy', 'approvedBy'], orderBy: { at: 'asc' } })
+  const decisions = await em.find(LooseDecisionSchema, of, { populate: ['author'] })
   return {
-    issue, issues, remarks,
+    issue, issues, remarks, answers, decisions,
     parts: await em.find(IssuePartSchema, { issue: { $in: issues.map(i => i.id) } }, { populate: ['person'] }),
-    answers: await em.find(GuardAnswerSchema, of, { populate: ['author', 'judgedBy', 'approvedBy'], orderBy: { at: 'asc' } }),
-    decisions: await em.find(LooseDecisionSchema, of, { populate: ['author'] }),
     entries: await em.find(RemarkEntrySchema, { remark: { $in: remarks.map(r => r.id) } }, { populate: ['author'], orderBy: { at: 'asc' } }),
     ticks: await em.find(TickSchema, of, { populate: ['person'] }),
     sheet: await em.find(CheckEntrySchema, of, { populate: ['person'] }),
     signatures: await em.find(SignatureSchema, of, { populate: ['person'], orderBy: { at: 'asc' } }),
-    content: await contentOf(em, issue),
+    get content() {
+      return contentFrom(issue, answers, decisions)
+    },
   }
 }

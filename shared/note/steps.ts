@@ -5,7 +5,7 @@ import { checkDocument } from '#shared/note/check-document'
 import type { DocumentFault } from '#shared/note/document-fault'
 import { documentFault } from '#shared/note/document-fault'
 import { isRecord, jsonFault } from '#shared/note/plain-json'
-import { noteSchema, readDocument } from '#shared/note/schema'
+import { noteSchema } from '#shared/note/schema'
 
 /** One save carries at most this much; the editor merges its steps, so that an hour of typing stays far below. */
 export const STEP_LIMITS = { count: 5000, characters: 16 * 1024 * 1024, values: 400_000, depth: 80 }
@@ -45,13 +45,12 @@ function applyAll(before: Node, steps: unknown[]): { doc: Node, steps: Step[] } 
 /**
  * Applies editing steps to a stored document and checks what comes out as
  * strictly as a document sent whole. All or nothing.
- * @param stored The stored document as JSON; it was checked when it was stored.
+ * @param before The stored document; it was checked when it was stored.
  * @param stepsJson Steps as the editor sent them: untrusted.
  */
-export function applySteps(stored: unknown, stepsJson: unknown): AppliedSteps | DocumentFault {
+export function applySteps(before: Node, stepsJson: unknown): AppliedSteps | DocumentFault {
   const fault = stepsFault(stepsJson)
   if (fault) return fault
-  const before = readDocument(stored)
   const applied = applyAll(before, stepsJson as unknown[])
   if ('ok' in applied) return applied
   const checked = checkDocument(applied.doc.toJSON())

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest'
 import { blankDocument } from '#shared/note/blank-note'
 import { checkDocument } from '#shared/note/check-document'
 import { applySteps } from '#shared/note/steps'
+import { readDocument } from '#shared/note/schema'
 import { buildDocument, p, section, stableId } from '#server/database/seeders/demo/build-document'
 import { demoClock } from '#server/database/seeders/demo/demo-clock'
 import { changeBetween } from '#server/database/seeders/demo/document-steps'
@@ -24,7 +25,7 @@ describe('documents of the demonstration', () => {
       for (const save of SAVES.filter(one => one.note === number)) {
         const after = buildDocument(number, save.sections, 1)
         const { steps, docHash } = changeBetween(stored, after)
-        const applied = applySteps(stored, JSON.parse(JSON.stringify(steps)))
+        const applied = applySteps(readDocument(stored), JSON.parse(JSON.stringify(steps)))
         if (!applied.ok) throw new Error(`${number} ${save.at}: ${applied.message}`)
         expect(createHash('sha256').update(applied.canonical).digest('hex')).toBe(docHash)
         stored = JSON.parse(applied.canonical)

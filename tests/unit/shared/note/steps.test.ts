@@ -31,7 +31,7 @@ describe('the steps of a save', () => {
       tr.addMark(at(A) + 1, at(A) + 4, noteSchema().mark('bold'))
       tr.setNodeAttribute(at(CALC) + 6, 'inputs', { t: { text: '1.8', unit: 'mm' } })
     })
-    const applied = applySteps(stored, edit.json)
+    const applied = applySteps(readDocument(stored), edit.json)
     expect(applied).toMatchObject({ ok: true, canonical: canonicalJson(edit.doc.toJSON()) })
     expect(applied.ok && applied.steps).toHaveLength(3)
   })
@@ -52,7 +52,7 @@ describe('the steps of a save', () => {
     ['one with inputs that are no object', [{ stepType: 'attr', pos: at(CALC), attr: 'inputs', value: 7 }], 'steps.do-not-apply'],
     ['one nested 5,000 deep', JSON.parse(`[{"stepType":"replace","slice":${'{"content":['.repeat(5000)}${']}'.repeat(5000)}}]`), 'steps.malformed'],
   ])('are refused: %s', (_, json, code) => {
-    const applied = applySteps(stored, json)
+    const applied = applySteps(readDocument(stored), json)
     expect(applied.ok ? 'ok' : applied.code).toBe(code)
   })
 })
@@ -88,7 +88,7 @@ describe('for any document and any steps', () => {
         const from = a % doc.content.size
         return { stepType: 'replace', from, to: Math.min(doc.content.size, from + b), ...(value ? { slice: { content: [{ type: 'text', text: value }] } } : {}) }
       })
-      const applied = applySteps(stored, json)
+      const applied = applySteps(readDocument(stored), json)
       if (!applied.ok) return
       sound += 1
       expect(checkDocument(applied.doc.toJSON())).toMatchObject({ ok: true, canonical: applied.canonical })
