@@ -16,6 +16,7 @@ import { useResultsStore } from '~/stores/results'
  */
 export interface CalcDraft {
   calcId: string
+  kind: string
   inputs: ShallowRef<unknown>
   editable: ComputedRef<boolean>
   dirty: ComputedRef<boolean>
@@ -80,7 +81,7 @@ export function provideCalcDraft(mount: Mount, editable: ComputedRef<boolean>): 
     inputs.value = now.attrs.inputs
   })
   const draft: CalcDraft = {
-    calcId, inputs, editable, set, commit, put, revert,
+    calcId, kind: String(node.value.attrs.kind), inputs, editable, set, commit, put, revert,
     dirty: computed(() => inputs.value !== node.value.attrs.inputs),
     faults: computed(() => {
       const evaluation = results.evaluationOf(calcId) ?? faulty.value

@@ -1,4 +1,5 @@
 /** All calculation kinds. One line per kind; a second registration of a name is a programmer's error. */
+import { closedSection } from '#shared/calc/kinds/closed-section/kind'
 import { combinedStress } from '#shared/calc/kinds/combined-stress/kind'
 import { generalOutline } from '#shared/calc/kinds/general-outline/kind'
 import { imposedTwist } from '#shared/calc/kinds/imposed-twist/kind'
@@ -39,7 +40,7 @@ export function makeRegistry(kinds: AnyKind[]): Registry {
   }
 }
 
-const registry = makeRegistry([openSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, restrainedWarping, imposedTwist, combinedStress, marginTable, material, loadCases])
+const registry = makeRegistry([openSection, closedSection, generalOutline, solidBar, torqueFromLoads, torqueAlongBar, restrainedWarping, imposedTwist, combinedStress, marginTable, material, loadCases])
 
 /** @throws when no kind has this name; ask `isCalcKind` first where the name comes from a document. */
 export const calcKind = (name: string): AnyKind => registry.kind(name)

@@ -2,6 +2,7 @@
  * Realistic inputs of every calculation kind, for what all kinds have to keep to: the contract test, the golden
  * results and the batch. A kind without samples here fails the contract test.
  */
+import { boxInputs, finnedBoxInputs, inchTubeInputs, twoCellInputs } from './closed-section'
 import { combinedInputs, panelInputs, powersInputs, steadyInputs } from './combined-stress'
 import { boredPlateInputs, keyedShaftInputs, sharpBracketInputs, thickAngleInputs } from './general-outline'
 import { followingChannelInputs, followingTubeInputs } from './imposed-twist'
@@ -17,6 +18,7 @@ export type Samples = Record<string, () => unknown>
 
 export const calcSamples: Record<string, Samples> = {
   'open-section': { strip: stripInputs, hat: hatInputs, 'lipped channel': () => lippedChannelInputs(), angle: angleInputs, channel: channelInputs, 'bracket in inches': bracketInputs },
+  'closed-section': { 'box': boxInputs, 'two cells': twoCellInputs, 'tube in inches': inchTubeInputs, 'box with a lip': finnedBoxInputs },
   'general-outline': { 'thick angle': thickAngleInputs, 'sharp bracket': sharpBracketInputs, 'keyed shaft in inches': keyedShaftInputs, 'bored plate': boredPlateInputs },
   'solid-bar': { 'round bar': () => solidBarInputs(), 'flat shaft': flatShaftInputs, 'bar in inches': inchBarInputs, ...Object.fromEntries(Object.keys(solidBarShapes()).map(name => [name, () => solidBarShapes()[name]])) },
   'torque-from-loads': { 'load in a web': webLoadInputs, 'loads in inches': inchLoadsInputs },

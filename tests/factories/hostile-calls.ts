@@ -85,6 +85,13 @@ export const hostileCalls: readonly HostileCall[] = [
   { name: 'respondToTorque', give: engine => [opened(engine), 10_000], hostile: [1] },
   { name: 'respondToRate', give: engine => [opened(engine), 4e-5], hostile: [1] },
   ...[machinedAngle, bentAngle].map((section, i): HostileCall => ({ name: 'cornerFactor', what: `section ${i + 1}`, give: () => [section, '1'] })),
+  {
+    name: 'cellWarping', give: () => [box],
+    ask: (engine, [section]) => {
+      const torsion = engine.torsionOfCells(section as never)
+      return torsion.ok ? engine.cellWarping(section as never, torsion) : torsion
+    },
+  },
   { name: 'machinedFactor', give: () => [0.5] },
   { name: 'bendFactor', give: () => [0.5, 1] },
   { name: 'stripFactor', give: () => [{ radius: 1, t: 1 }] },

@@ -82,6 +82,14 @@ const cells: ReferenceRow[] = [
   row('§2.2', 'stress in a fin', 'two cells with fins, T 5000 N·m', 4 * 5e6 / 4425721.082970866, 'MPa', rel(1e-10), 'G t θ′', e => response(e, twoCellsWithFins, 5000).face[at(e, twoCellsWithFins, 'fin1')] ?? Number.NaN),
 ]
 
+const warping = (section: WallSection) => (e: Engine) => given(e.cellWarping(section, torsion(e, section))).largest
+const uniformBox: WallSection = { nodes: singleBox.nodes, walls: singleBox.walls.map(one => ({ ...one, t: 2 })) }
+const planeBox: WallSection = { nodes: singleBox.nodes, walls: singleBox.walls.map((one, i) => ({ ...one, t: i % 2 ? 4 : 2 })) }
+const warped: ReferenceRow[] = [
+  row('§3.8', 'warping at the corners of a box of one thickness, per rate of twist', '120×60, t 2 mm', 120 * 60 * 60 / (4 * 180), 'mm²', rel(1e-10), 'ab(a − b)/4(a + b), from dw/ds = q/(Gtθ′) − p', warping(uniformBox)),
+  row('§3.8', 'warping where p·t is the same in every wall', '120×60, t 2 and 4 mm', 0, 'mm²', abs(1e-9), 'it keeps plane', warping(planeBox)),
+]
+
 const K = (radius: number, make: 'machined' | 'bent') => (e: Engine) => given(e.cellCornerFactor(radius, 1, make)).K
 const corners: ReferenceRow[] = [
   ...([[0.125, 2.4], [0.25, 1.88], [0.5, 1.46], [1, 1.15]] as const).map(([r, value]) => row('§2.3', 'machined corner in a cell, K', `r/t ${r}`, value, '', rel(1e-12), elements, K(r, 'machined'))),
@@ -105,4 +113,4 @@ const directShear: ReferenceRow[] = [
   row('C-91', 'shear centre of a box with unequal webs', '120×60, left 3, right 1.5, covers 2 mm; from the left web', 45.6140350877193, 'mm', rel(1e-9), 'closed-cell shear flow, zero twist; 2600/57', e => shear(e, unequalWebs).shearCentre.x),
 ]
 
-export const cellRows: readonly ReferenceRow[] = [...cells, ...corners, ...directShear]
+export const cellRows: readonly ReferenceRow[] = [...cells, ...warped, ...corners, ...directShear]

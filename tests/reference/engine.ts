@@ -18,6 +18,7 @@ export async function loadEngine() {
   const profiles = await import('#shared/torsion/profiles/section-of-profile')
   const solids = await import('#shared/torsion/solids/torsion-of-solid')
   const cells = await import('#shared/torsion/cells/torsion-of-cells')
+  const cellWarping = await import('#shared/torsion/cells/cell-warping')
   const cellCorner = await import('#shared/torsion/cells/cell-corner')
   const shear = await import('#shared/torsion/shear/shear-flow')
   const warpingBar = await import('#shared/torsion/warping/warping-bar')
@@ -35,7 +36,7 @@ export async function loadEngine() {
   const outlineAgreement = await import('#shared/torsion/outline/agreement')
   const outlineVertices = await import('#shared/torsion/outline/reentrant')
   const outlineLimits = await import('#shared/torsion/outline/published')
-  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...profiles, ...solids, ...cells, ...cellCorner, ...shear, ...warpingBar, ...sectorialRun, ...stressPeaks, ...compression, ...cutBar, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
+  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...profiles, ...solids, ...cells, ...cellCorner, ...cellWarping, ...shear, ...warpingBar, ...sectorialRun, ...stressPeaks, ...compression, ...cutBar, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
 }
 
 export type Engine = Awaited<ReturnType<typeof loadEngine>>

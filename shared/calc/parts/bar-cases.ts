@@ -2,7 +2,7 @@
 import type { CaseRow, Fault, MarginRow } from '#shared/calc/types'
 import type { BarModel } from '#shared/calc/parts/bar-fields'
 import type { CaseModel, MaterialModel } from '#shared/calc/parts/model'
-import { judgeMargins, marginSet, type JudgedMargins, type MarginMode, type MarginPlace, type MarginSet } from '#shared/calc/parts/margin-rows'
+import { judgeMargins, linearSet, marginSet, type JudgedMargins, type MarginMode, type MarginPlace, type MarginSet } from '#shared/calc/parts/margin-rows'
 import { knockdownOf, levelsOf, lowestStrength, strengthUnit } from '#shared/calc/parts/strength'
 
 /** Stress of a place per torque, MPa per N·mm. */
@@ -55,22 +55,24 @@ export function barMargins(bar: BarModel, cases: readonly BarCase[], places: rea
 export function stressSets(bar: BarModel, cases: readonly BarCase[], places: readonly StressPlace[], ultimate: MarginMode, yielding: MarginMode): MarginSet[] {
   const { factors } = bar
   const caseIds = cases.map(c => c.model.id)
+  const shown = places.map((place): MarginPlace => ({ ...place, unit: strengthUnit(place.materials) }))
   const set = (mode: MarginMode, name: 'Fsu' | 'Fsy', factor: (c: BarCase) => number) => {
-    const strength = strengthTable(places, cases, name)
-    return marginSet(mode, places.map(place => ({ ...place, unit: strengthUnit(place.materials) })), caseIds, (p, i) => {
-      const [place, c, allowable] = [places[p], cases[i], strength(p, i)]
-      return place && c && allowable !== null ? { applied: place.perTorque * Math.abs(c.torque) * factor(c), allowable } : null
-    })
+    const allowables = strengthsByMaterials(cases, name)
+    return linearSet(mode, shown, caseIds, p => places[p]?.perTorque ?? 0, Float64Array.from(cases, c => Math.abs(c.torque) * factor(c)), p => allowables(places[p]?.materials ?? []))
   }
   return [set(ultimate, 'Fsu', c => c.toUltimate * factors.special), set(yielding, 'Fsy', c => c.toLimit * factors.specialAtLimit)]
 }
 
-/** Strength of a place in a case; cases without a temperature share one value. */
-function strengthTable(places: readonly StressPlace[], cases: readonly BarCase[], name: 'Fsu' | 'Fsy') {
-  const cold = places.map(place => lowestStrength(place.materials, name, () => 1))
-  return (p: number, i: number): number | null => {
-    const temperature = cases[i]?.model.temperature?.value
-    return temperature === undefined ? cold[p] ?? null : lowestStrength(places[p]?.materials ?? [], name, m => knockdownOf(m, temperature))
+/** The strength in every case, once for each set of materials; null where one of them has none. */
+function strengthsByMaterials(cases: readonly BarCase[], name: 'Fsu' | 'Fsy'): (materials: readonly MaterialModel[]) => Float64Array | null {
+  const known = new Map<string, Float64Array | null>()
+  return (materials) => {
+    const key = materials.map(m => m.id).join(' ')
+    const held = known.get(key)
+    if (held !== undefined) return held
+    const found = lowestStrength(materials, name, () => 1) === null ? null : Float64Array.from(cases, c => lowestStrength(materials, name, m => knockdownOf(m, c.model.temperature?.value)) ?? Number.NaN)
+    known.set(key, found)
+    return found
   }
 }
 

@@ -36,5 +36,8 @@ export const junctions = z.array(junction).max(MAX_WALLS).meta({ title: 'Corners
 export type WallInput = z.infer<typeof taperingWall>
 export type WallEndInput = WallInput['end']
 export type JunctionInput = z.infer<typeof junction>
+/** Whether the walls of a kind may taper. */
+export const mayTaper = (schema: z.ZodType): boolean => schema instanceof z.ZodObject && schema.shape.walls === taperingWalls
+
 /** What `parseWalls` reads of a calculation's inputs. */
 export interface WallTable { start: z.infer<typeof start>, walls: WallInput[], junctions: JunctionInput[] }

@@ -6,3 +6,5 @@ export const closedMachinedTable: readonly (readonly [number, number])[] = [[0.1
 export const circularFacePart = 0.5
 /** A system of cells that is worse conditioned than this is refused. */
 export const worstCondition = 1e10
+/** Warping below this part of the size squared is that of rounded dimensions; a rectangle of sides 1 : 0.98 lies above it (own judgement). */
+export const leastWarping = 1e-3

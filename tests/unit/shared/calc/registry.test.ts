@@ -6,5 +6,5 @@ it('throws on a kind registered twice', () => {
   expect(() => makeRegistry([kind, kind])).toThrow('registered twice')
 })
 it('throws on a kind that is not registered', () => {
-  expect(() => calcKind('closed-section')).toThrow('not registered')
+  expect(() => calcKind('no-such-kind')).toThrow('not registered')
 })

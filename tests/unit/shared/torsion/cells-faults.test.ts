@@ -18,6 +18,7 @@ const parts: Mutation[] = [
   { name: 'circulations', module: 'torsion/cholesky', spoil: array('solveFactorised') },
   { name: 'length of a wall', module: 'torsion/geometry', spoil: result('pathLength') },
   { name: 'area of a cell', module: 'torsion/sectorial-growth', spoil: result('sectorialGrowth') },
+  { name: 'warping of a closed section', module: at('cell-warping'), spoil: result('cellWarping', 'largest') },
   { name: 'bend factor in a cell', module: at('cell-corner'), spoil: result('cellCornerFactor', 'K') },
   { name: 'second moments', module: 'torsion/shear/shear-flow', spoil: result('torqueAbout') },
   { name: 'shear centre', module: 'torsion/shear/shear-flow', spoil: (all) => {
