@@ -2,6 +2,7 @@ import { MikroORM, type Options } from '@mikro-orm/postgresql'
 import { Migrator } from '@mikro-orm/migrations'
 import { entities } from './entities'
 import { migrations } from './migrations'
+import { quickenLiterals } from './quick-literals'
 
 /** ORM options for a role. Nothing is discovered from files: the server and the worker are bundles. */
 export function ormOptions(clientUrl: string): Options {
@@ -19,4 +20,4 @@ export function ormOptions(clientUrl: string): Options {
   }
 }
 
-export const connect = (clientUrl: string) => MikroORM.init(ormOptions(clientUrl))
+export const connect = async (clientUrl: string) => quickenLiterals(await MikroORM.init(ormOptions(clientUrl)))
