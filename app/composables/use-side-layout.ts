@@ -1,7 +1,7 @@
 import { useEventListener, useResizeObserver } from '@vueuse/core'
 import { nextTick, onMounted, shallowRef, watch, type Ref } from 'vue'
 import { placeNotes, type Placed } from '~/editor/place-notes'
-import { anchorSelectors, type SideItem } from '~/editor/side-items'
+import { anchorsOf, anchorsOn, type SideItem } from '~/editor/side-items'
 
 const LINE = 9
 
@@ -11,11 +11,10 @@ export function useSideLayout(items: Ref<readonly SideItem[]>, sheet: Ref<HTMLEl
   const order = shallowRef<string[]>([])
   let frame = 0
 
-  function anchorY(item: SideItem, top: number): number {
-    const root = sheet.value
-    if (!root || (item.kind === 'remark' && item.remark.anchorState === 'orphaned')) return 0
-    for (const selector of anchorSelectors(item)) {
-      const element = root.querySelector(selector)
+  function anchorY(item: SideItem, anchors: ReadonlyMap<string, HTMLElement>, top: number): number {
+    if (item.kind === 'remark' && item.remark.anchorState === 'orphaned') return 0
+    for (const anchor of anchorsOf(item)) {
+      const element = anchors.get(anchor)
       const rect = element?.getClientRects()[0]
       if (!element || !rect) continue
       const inLine = element.tagName === 'SPAN'
@@ -28,8 +27,9 @@ export function useSideLayout(items: Ref<readonly SideItem[]>, sheet: Ref<HTMLEl
     const root = sheet.value
     if (!root) return
     const top = root.getBoundingClientRect().top
-    const height = (id: string) => column.value?.querySelector<HTMLElement>(`[data-note="${CSS.escape(id)}"]`)?.offsetHeight ?? 40
-    const wanted = items.value.map(item => ({ id: item.id, y: anchorY(item, top), height: height(item.id) })).sort((a, b) => a.y - b.y)
+    const anchors = anchorsOn(root)
+    const heights = new Map([...column.value?.querySelectorAll<HTMLElement>('[data-note]') ?? []].map(note => [note.dataset.note ?? '', note.offsetHeight]))
+    const wanted = items.value.map(item => ({ id: item.id, y: anchorY(item, anchors, top), height: heights.get(item.id) ?? 40 })).sort((a, b) => a.y - b.y)
     const taken = [...root.querySelectorAll('.oc')].map((element) => {
       const rect = element.getBoundingClientRect()
       return { top: rect.top - top, bottom: rect.bottom - top }

@@ -35,10 +35,24 @@ export function isOpen(item: SideItem): boolean {
   return item.state.open
 }
 
-/** Where an item's anchor is drawn: the mark in the text, the guard's line, or the calculation. */
-export function anchorSelectors(item: SideItem): string[] {
-  if (item.kind === 'guard') return [`[data-guard="${CSS.escape(item.id)}"]`, `#calc-${CSS.escape(item.calcId)}`]
-  if (item.kind === 'remark' && item.remark.anchor.kind === 'calculation') return [`#calc-${CSS.escape(item.remark.anchor.calcId)}`]
+/** Where an item's anchor is drawn, the best first: the mark in the text, the guard's line, the block, or the calculation. */
+export function anchorsOf(item: SideItem): string[] {
+  if (item.kind === 'guard') return [`guard ${item.id}`, `calculation ${item.calcId}`]
+  if (item.kind === 'remark' && item.remark.anchor.kind === 'calculation') return [`calculation ${item.remark.anchor.calcId}`]
   const block = item.kind === 'loose' ? item.loose.blockId : item.remark.anchor.kind === 'text' ? item.remark.anchor.blockId : ''
-  return [`[data-mark="${CSS.escape(item.id)}"]`, `[data-id="${CSS.escape(block)}"]`, `#calc-${CSS.escape(block)}`]
+  return [`mark ${item.id}`, `block ${block}`, `calculation ${block}`]
+}
+
+/** Everything on the sheet that an item may be anchored to, found in one pass: a long note has thousands of both. */
+export function anchorsOn(sheet: HTMLElement): Map<string, HTMLElement> {
+  const found = new Map<string, HTMLElement>()
+  const add = (name: string, element: HTMLElement) => found.has(name) || found.set(name, element)
+  for (const element of sheet.querySelectorAll<HTMLElement>('[data-guard], [data-mark], [data-id], [id^="calc-"]')) {
+    const { guard, mark, id } = element.dataset
+    if (guard !== undefined) add(`guard ${guard}`, element)
+    if (mark !== undefined) add(`mark ${mark}`, element)
+    if (id !== undefined) add(`block ${id}`, element)
+    if (element.id.startsWith('calc-')) add(`calculation ${element.id.slice('calc-'.length)}`, element)
+  }
+  return found
 }

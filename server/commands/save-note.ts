@@ -5,11 +5,11 @@ import { calculationsOf, type NoteCalculation } from '#shared/note/calculations'
 import { applySteps, type AppliedSteps } from '#shared/note/steps'
 import type { SaveContent } from '#shared/schemas/notes'
 import { noteChain, recordAct } from '#server/audit/record'
-import type { Issue } from '#server/database/entities/issue'
+import { IssueSchema, type Issue } from '#server/database/entities/issue'
 import { SaveSchema } from '#server/database/entities/save'
 import { evaluateDocument, summaryOf } from '#server/notes/evaluate-document'
 import { requireAbility } from '#server/notes/facts'
-import { findIssue, lockIssue } from '#server/notes/find-issue'
+import { lockIssue } from '#server/notes/find-issue'
 import { mapRemarks } from '#server/notes/map-remarks'
 import { addPart } from '#server/notes/parts'
 import { takePen } from '#server/notes/pen'
@@ -53,7 +53,9 @@ async function refuseConflict(context: CommandContext, issue: Issue, baseSave: n
 
 /** One save: steps on a base save, checked, recomputed and stored in one transaction. A repeated key answers again and changes nothing. */
 export async function saveNote(context: CommandContext, issueId: string, input: SaveContent): Promise<Issue> {
-  const found = await findIssue(context.em, issueId)
+  // The results are read once, under the lock.
+  const found = await context.em.findOne(IssueSchema, { id: issueId }, { populate: ['note'], exclude: ['results'], refresh: true })
+  if (!found) throw new DomainError('not-found', 'There is no such issue.')
   await prepareSave(found, input)
   const { note, letter } = found
   const name = { chain: noteChain(note.id), act: 'save', subject: { type: 'issue', id: issueId, label: `${note.number} ${letter}` } }

@@ -8,6 +8,7 @@ import type { SaveContent } from '#shared/schemas/notes'
 import type { Issue } from '#server/database/entities/issue'
 import { findIssue } from '#server/notes/find-issue'
 import { documentOf } from '#server/notes/reading'
+import { readDocument } from '#shared/note/schema'
 import { prepareOutlines } from '#server/outline/prepare-outlines'
 import { DomainError } from '#server/utils/domain-error'
 
@@ -34,9 +35,9 @@ export async function prepareIssue(em: EntityManager, issueId: string): Promise<
 }
 
 /** The same for the document that a save leads to; steps that do not apply are refused where they are checked. */
-export async function prepareSave(issue: Issue, { steps }: SaveContent): Promise<void> {
+export async function prepareSave(issue: Pick<Issue, 'id' | 'document'>, { steps }: SaveContent): Promise<void> {
   if (!mayBeHeavy(issue.document) && !mayBeHeavy(JSON.stringify(steps))) return
-  const applied = applySteps(documentOf(issue), steps)
+  const applied = applySteps(readDocument(JSON.parse(issue.document)), steps)
   if (applied.ok) await prepareHeavy(calculationsOf(applied.doc))
 }
 

@@ -25,8 +25,9 @@ export interface Measured { name: string, median: number, least: number, baselin
 
 type Edit = Parameters<typeof saveOf>[2]
 
-const CALCULATIONS = 200
-const PAGES = 300
+/** A smaller note shows sooner where time goes. */
+const CALCULATIONS = Number(process.env.TORQUILL_CALCULATIONS ?? 200)
+const PAGES = Number(process.env.TORQUILL_PAGES ?? 300)
 const found: Measured[] = []
 let orm: MikroORM
 let team: Team
