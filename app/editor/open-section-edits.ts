@@ -3,33 +3,17 @@ import type { LoadingInput } from '#shared/calc/parts/loading-fields'
 import type { MaterialInput } from '#shared/calc/parts/material-fields'
 import type { OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
 import type { WallEndInput, WallInput } from '#shared/calc/parts/wall-fields'
+import { nextLetters, nextNumbered } from '#shared/calc/walls/names'
 import type { UnitId } from '#shared/units/units'
 
 const empty = (unit: UnitId): TypedQuantity => ({ text: '', unit })
 const degrees = (text: string): TypedQuantity => ({ text, unit: '°' })
 
-export const lengthUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? 'mm' : 'in')
+export const lengthUnit = (inputs: Pick<OpenSectionInputs, 'units'>): UnitId => (inputs.units === 'SI' ? 'mm' : 'in')
 export const torqueUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? 'N·m' : 'lbf·in')
 export const rateUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? '°/m' : '°/ft')
 export const stressUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? 'MPa' : 'ksi')
 export const temperatureUnit = (inputs: OpenSectionInputs): UnitId => (inputs.units === 'SI' ? '°C' : '°F')
-
-/** a, b, … z, then aa, ab: the first that no wall bears. */
-export function nextLetters(used: readonly string[]): string {
-  for (let n = 0; ; n++) {
-    const letters = n < 26 ? letter(n) : letter(Math.floor(n / 26) - 1) + letter(n % 26)
-    if (!used.includes(letters)) return letters
-  }
-}
-const letter = (n: number) => String.fromCharCode(97 + n)
-
-/** `prefix` and the first number that is free. */
-export function nextNumbered(prefix: string, used: readonly string[], digits = 1): string {
-  for (let n = 1; ; n++) {
-    const id = `${prefix}${String(n).padStart(digits, '0')}`
-    if (!used.includes(id)) return id
-  }
-}
 
 /** The next wall goes on from the end of the last one, square to it, as thick and of the same material. */
 export function nextWall(inputs: OpenSectionInputs): WallInput {

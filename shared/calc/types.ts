@@ -92,9 +92,9 @@ export interface WorkingStep { heading: string, method: string, lines: WorkingLi
 export type Shape
   = | { type: 'path', points: [number, number][], closed: boolean, role: ShapeRole, level?: number, wall?: string }
     | { type: 'line', from: [number, number], to: [number, number], role: ShapeRole }
-    | { type: 'label', at: [number, number], text: string, role: ShapeRole, anchor?: 'start' | 'middle' | 'end' }
+    | { type: 'label', at: [number, number], text: string, sub?: string, role: ShapeRole, anchor?: 'start' | 'middle' | 'end' }
     | { type: 'balloon', at: [number, number], text: string, leaderTo: [number, number] }
-    | { type: 'dimension', from: [number, number], to: [number, number], offset: number, text: string }
+    | { type: 'dimension', from: [number, number], to: [number, number], offset: number, text: string, /** The text is a symbol, and this its index. */ symbol?: true, sub?: string }
     | { type: 'centroid', at: [number, number] }
     /** `side`: on which side its letter stands, +1 right and up. */
     | { type: 'shear-centre', at: [number, number], side?: [number, number] }

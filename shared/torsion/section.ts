@@ -47,9 +47,14 @@ export interface OpenSection {
 }
 
 /** Why something cannot be given: a sentence for the analyst, never a guessed number. */
-export interface Refusal { readonly ok: false, readonly reason: string }
+export interface Refusal {
+  readonly ok: false
+  readonly reason: string
+  /** Symbol of the dimension of a profile that stands in the way, or `make`. */
+  readonly at?: string
+}
 
-export const refusal = (reason: string): Refusal => ({ ok: false, reason })
+export const refusal = (reason: string, at?: string): Refusal => ({ ok: false, reason, ...(at === undefined ? {} : { at }) })
 
 export type FaultCode
   = | 'no-walls' | 'bad-number' | 'duplicate-id' | 'unknown-node' | 'zero-length' | 'arc-mismatch' | 'loop' | 'not-connected'

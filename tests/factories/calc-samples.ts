@@ -7,6 +7,7 @@ import { combinedInputs, panelInputs, powersInputs, steadyInputs } from './combi
 import { boredPlateInputs, keyedShaftInputs, sharpBracketInputs, thickAngleInputs } from './general-outline'
 import { followingChannelInputs, followingTubeInputs } from './imposed-twist'
 import { angleInputs, bracketInputs, channelInputs, hatInputs, lippedChannelInputs, sheet2024, sheet6061, stripInputs } from './open-section'
+import { hatProfileInputs, slitTubeProfileInputs, teeProfileInputs, zedProfileInputs } from './profile-inputs'
 import { loadCasesInputs, materialInputs } from './records'
 import { channelBarInputs, hatBarInputs, teeBarInputs } from './restrained-warping'
 import { inchShaftInputs, sharedShaftInputs, steppedShaftInputs } from './torque-along-bar'
@@ -17,7 +18,7 @@ import { flatShaftInputs, inchBarInputs, solidBarInputs, solidBarShapes } from '
 export type Samples = Record<string, () => unknown>
 
 export const calcSamples: Record<string, Samples> = {
-  'open-section': { strip: stripInputs, hat: hatInputs, 'lipped channel': () => lippedChannelInputs(), angle: angleInputs, channel: channelInputs, 'bracket in inches': bracketInputs },
+  'open-section': { strip: stripInputs, hat: hatInputs, 'lipped channel': () => lippedChannelInputs(), angle: angleInputs, channel: channelInputs, 'bracket in inches': bracketInputs, 'hat by profile': hatProfileInputs, 'tee by profile': teeProfileInputs, 'zed by profile in inches': zedProfileInputs, 'slit tube by profile': slitTubeProfileInputs },
   'closed-section': { 'box': boxInputs, 'two cells': twoCellInputs, 'tube in inches': inchTubeInputs, 'box with a lip': finnedBoxInputs },
   'general-outline': { 'thick angle': thickAngleInputs, 'sharp bracket': sharpBracketInputs, 'keyed shaft in inches': keyedShaftInputs, 'bored plate': boredPlateInputs },
   'solid-bar': { 'round bar': () => solidBarInputs(), 'flat shaft': flatShaftInputs, 'bar in inches': inchBarInputs, ...Object.fromEntries(Object.keys(solidBarShapes()).map(name => [name, () => solidBarShapes()[name]])) },

@@ -50,7 +50,11 @@ export function listInputs(inputs: Entries, context: NoteContext | null = null):
   })
 }
 
+/** Where a profile stands, the wall table rests: it is kept for the editor and nothing of it is read. */
+const inForce = (inputs: Entries): Entries =>
+  inputs.profile === undefined ? inputs : Object.fromEntries(Object.entries(inputs).filter(([key]) => key !== 'start' && key !== 'walls' && key !== 'junctions'))
+
 export const inputListing = (calculation: NoteCalculation, context: NoteContext): Content => ruledTable({
   columns: [{ width: 96, head: 'Input' }, { width: '*', head: 'As typed' }],
-  rows: listInputs(calculation.inputs, context).map(({ place, value }) => [{ text: place, color: INK2 }, value]),
+  rows: listInputs(inForce(calculation.inputs), context).map(({ place, value }) => [{ text: place, color: INK2 }, value]),
 })

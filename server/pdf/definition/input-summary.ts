@@ -1,5 +1,6 @@
 import type { Content } from 'pdfmake/interfaces'
 import { openSectionSchema, type OpenSectionInputs } from '#shared/calc/kinds/open-section/schema'
+import { dimensionsOf } from '#shared/calc/parts/parse-profile'
 import { formFields, type FormField } from '#shared/calc/form/form-fields'
 import { calcKind, isCalcKind } from '#shared/calc/registry'
 import type { CalcResult, TypedQuantity } from '#shared/calc/types'
@@ -16,7 +17,7 @@ const typed = (quantity: TypedQuantity | null) => quantity === null || quantity.
 /** What the results beside it rest on, in a few lines; everything typed stands in the appendix. */
 export function inputSummary(calculation: NoteCalculation, result: CalcResult, context: NoteContext): Content {
   const parsed = calculation.kind === 'open-section' ? openSectionSchema.safeParse(calculation.inputs) : null
-  const facts = parsed?.success ? openSectionFacts(parsed.data) : [['Inputs', factsOfForm(calculation, context)] satisfies Fact]
+  const facts = parsed?.success ? openSectionFacts(parsed.data, context) : [['Inputs', factsOfForm(calculation, context)] satisfies Fact]
   return {
     table: {
       widths: [70, '*'],
@@ -44,16 +45,24 @@ function factsOfForm({ kind, inputs }: NoteCalculation, context: NoteContext): s
   return facts(formFields(calcKind(kind).schema), inputs).join('; ')
 }
 
-function openSectionFacts(inputs: OpenSectionInputs): Fact[] {
+function openSectionFacts(inputs: OpenSectionInputs, context: NoteContext): Fact[] {
   const { factors, junctions, materials } = inputs
   const special = [['fitting', factors.fitting], ['casting', factors.casting], ['bearing', factors.bearing]].filter(([, value]) => value !== '')
   return [
     ...materials.map((one): Fact => ['Material', `${one.id}, ${one.name}, ${one.form}, to ${one.specification}; basis ${one.basis}, ${one.loadPath} load path; ${one.source}, ${one.edition}`]),
-    ['Corners', junctions.length === 0 ? 'none given' : junctions.map(one => `${one.node} ${one.make} ${typed(one.radius)}`).join(', ')],
+    ...(inputs.profile ? [profileFact(inputs.profile, context)] : []),
+    ['Corners', inputs.profile ? 'as the profile says' : junctions.length === 0 ? 'none given' : junctions.map(one => `${one.node} ${one.make} ${typed(one.radius)}`).join(', ')],
     ['Bar', `length ${typed(inputs.length)}, ends ${inputs.ends === 'unknown' ? 'not known' : inputs.ends}, twist allowed ${typed(inputs.twistAllowed)}${inputs.twistOrigin ? ` (${inputs.twistOrigin})` : ''}`],
     ['Factors', `${factors.ultimate} limit to ultimate${special.map(([name, value]) => `, ${name} ${value}`).join('')}${special.length > 0 ? factors.onLimit ? ', at limit too' : ', at ultimate only' : ''}${factors.reason ? ` (${factors.reason})` : ''}`],
     ['Loads', loads(inputs.loading)],
   ]
+}
+
+/** Shape, way of measuring and every dimension with its unit. */
+function profileFact(profile: NonNullable<OpenSectionInputs['profile']>, context: NoteContext): Fact {
+  const values = new Map<string, unknown>(Object.entries(profile))
+  const dimensions = dimensionsOf(profile.shape).map(({ key, title }) => `${title.toLowerCase()} ${inLine(values.get(key), context)}`)
+  return ['Profile', `${profile.shape}, ${profile.measured} dimensions${'make' in profile ? `, ${profile.make}` : ''}: ${dimensions.join(', ')}; material ${profile.material}`]
 }
 
 function loads(loading: OpenSectionInputs['loading']): string {

@@ -53,7 +53,7 @@ export function unit([x, y]: Pixel): Pixel {
   return size > 0 ? [x / size, y / size] : [1, 0]
 }
 
-export interface TextStyle { anchor?: 'start' | 'middle' | 'end', colour?: string, size?: number, weight?: number, italic?: boolean, ground?: boolean, rotate?: number }
+export interface TextStyle { anchor?: 'start' | 'middle' | 'end', colour?: string, size?: number, weight?: number, italic?: boolean, ground?: boolean, rotate?: number, /** An index under the line behind it. */ sub?: string }
 
 /** One line of lettering. `ground` lays paper behind it so that it reads over a line. */
 export function text(canvas: Canvas, place: Pixel, value: string, style: TextStyle = {}): string {
@@ -61,8 +61,8 @@ export function text(canvas: Canvas, place: Pixel, value: string, style: TextSty
   const anchor = style.anchor ?? 'start'
   const turn = style.rotate ? ` transform="rotate(${n(style.rotate)} ${at(place)})"` : ''
   const look = `font-family="${style.italic ? SERIF : SANS}" font-size="${n(size)}"${style.italic ? ' font-style="italic"' : ''}${style.weight ? ` font-weight="${style.weight}"` : ''}`
-  const letters = `<text x="${n(place[0])}" y="${n(place[1])}" text-anchor="${anchor}" fill="${style.colour ?? canvas.palette.ink}" ${look}${turn}>${escapeXml(value)}</text>`
-  return style.ground ? groundBehind(canvas, place, value, size, anchor, turn) + letters : letters
+  const letters = `<text x="${n(place[0])}" y="${n(place[1])}" text-anchor="${anchor}" fill="${style.colour ?? canvas.palette.ink}" ${look}${turn}>${escapeXml(value)}${style.sub ? `<tspan dy="${n(size * 0.22)}" font-size="${n(size * 0.74)}">${escapeXml(style.sub)}</tspan>` : ''}</text>`
+  return style.ground ? groundBehind(canvas, place, value + (style.sub ?? ''), size, anchor, turn) + letters : letters
 }
 
 /** Lettering of this face is about half as wide as it is high. */

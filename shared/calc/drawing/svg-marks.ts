@@ -9,7 +9,7 @@ export function drawMark(canvas: Canvas, shape: Shape): string {
   switch (shape.type) {
     case 'path': return drawPath(canvas, shape)
     case 'line': return drawLine(canvas, shape)
-    case 'label': return text(canvas, canvas.px(shape.at), shape.text, { anchor: shape.anchor ?? 'start', italic: shape.role === 'axis', size: shape.role === 'axis' ? 12.5 : 11.5, colour: shape.role === 'note' ? canvas.palette.ink3 : canvas.palette.ink })
+    case 'label': return text(canvas, canvas.px(shape.at), shape.text, { anchor: shape.anchor ?? 'start', italic: shape.role === 'axis', size: shape.role === 'axis' ? 12.5 : 11.5, colour: shape.role === 'note' ? canvas.palette.ink3 : canvas.palette.ink, ...(shape.sub ? { sub: shape.sub } : {}) })
     case 'balloon': return drawBalloon(canvas, shape)
     case 'dimension': return drawDimension(canvas, shape)
     case 'centroid': return drawCentroid(canvas, shape)
@@ -60,7 +60,7 @@ function drawDimension(canvas: Canvas, shape: Of<'dimension'>): string {
   const length = Math.hypot(b[0] - a[0], b[1] - a[1])
   const lines = [[a, start], [b, end]].map(([p, q]) => segment(move(p as Pixel, sign * 3), move(q as Pixel, sign * 4), ink3, 0.7)).join('')
   const middle: Pixel = [(start[0] + end[0]) / 2, (start[1] + end[1]) / 2]
-  return lines + dimensionLine(canvas, start, end, along, length) + dimensionText(canvas, middle, along, shape.text)
+  return lines + dimensionLine(canvas, start, end, along, length) + dimensionText(canvas, middle, along, shape)
 }
 
 function dimensionLine(canvas: Canvas, start: Pixel, end: Pixel, along: Pixel, length: number): string {
@@ -72,14 +72,14 @@ function dimensionLine(canvas: Canvas, start: Pixel, end: Pixel, along: Pixel, l
   return segment(before, start, ink3, 0.7) + segment(after, end, ink3, 0.7) + arrowhead(start, before, ink3) + arrowhead(end, after, ink3)
 }
 
-function dimensionText(canvas: Canvas, middle: Pixel, along: Pixel, value: string): string {
+function dimensionText(canvas: Canvas, middle: Pixel, along: Pixel, { text: value, symbol, sub }: Of<'dimension'>): string {
   let angle = Math.atan2(along[1], along[0]) * 180 / Math.PI
   if (angle > 90) angle -= 180
   if (angle <= -90) angle += 180
   if (Math.abs(angle - 90) < 1e-6) angle = -90
   const up = (angle - 90) * Math.PI / 180
   const place: Pixel = [middle[0] + Math.cos(up) * 4 * canvas.mark, middle[1] + Math.sin(up) * 4 * canvas.mark]
-  return text(canvas, place, value, { anchor: 'middle', ground: true, rotate: Math.abs(angle) < 1e-6 ? 0 : angle })
+  return text(canvas, place, value, { anchor: 'middle', ground: true, ...(symbol ? { italic: true, size: 13.5 } : {}), ...(sub ? { sub } : {}), rotate: Math.abs(angle) < 1e-6 ? 0 : angle })
 }
 
 function drawCentroid(canvas: Canvas, shape: Spot): string {

@@ -86,7 +86,7 @@ function readReach(end: WallEndInput, path: string, read: TypedReader): Reach | 
   if (end.by === 'length') {
     const length = read.positive(end.length, `${path}.length`, { label: 'the length', dimension: 'length', typical: 'wall length' })
     if (!length || !direction) return null
-    return { end: null, step: along(direction.value, length.value), lengthTyped: shownAsTyped(length) }
+    return { end: null, step: stepAlong(direction.value, length.value), lengthTyped: shownAsTyped(length) }
   }
   const radius = read.positive(end.radius, `${path}.radius`, { label: 'the radius', dimension: 'length', typical: 'wall length' })
   const sweep = read.number(end.sweep, `${path}.sweep`, { label: 'the swept angle', dimension: 'angle' })
@@ -100,7 +100,8 @@ function readReach(end: WallEndInput, path: string, read: TypedReader): Reach | 
 
 const shownAsTyped = (q: { typed: string, unit: string }) => q.typed.includes(q.unit) ? q.typed.replace(q.unit, '').trim() : q.typed
 
-const along = (direction: number, length: number): Point => ({ x: length * exact(Math.cos(direction)), y: length * exact(Math.sin(direction)) })
+/** A step in a direction, mm and rad. */
+export const stepAlong = (direction: number, length: number): Point => ({ x: length * exact(Math.cos(direction)), y: length * exact(Math.sin(direction)) })
 
 /** Right angles typed in degrees stay right angles: cos(90°) is zero, not 6e-17. */
 function exact(value: number): number {
@@ -109,11 +110,11 @@ function exact(value: number): number {
 }
 
 /** From the start along an arc whose tangent at the start has the given direction. */
-function arcStep(radius: number, sweep: number, direction: number): Point {
+export function arcStep(radius: number, sweep: number, direction: number): Point {
   const side = Math.sign(sweep)
   const normal = direction + side * Math.PI / 2
-  const centre = along(normal, radius)
-  const out = along(normal + Math.PI + sweep, radius)
+  const centre = stepAlong(normal, radius)
+  const out = stepAlong(normal + Math.PI + sweep, radius)
   return { x: centre.x + out.x, y: centre.y + out.y }
 }
 

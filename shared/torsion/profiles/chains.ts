@@ -49,7 +49,7 @@ export function lippedChannelWalls(p: Of<'lipped channel'>, moduli: Moduli): Con
   const walls = [of('lower lip', 0, p.tLip), of('lower flange', 1, p.tFlange), of('web', 2, p.tWeb), of('upper flange', 1, p.tFlange), of('upper lip', 0, p.tLip)]
   const none = nothingLeft(lines)
   if (none) return none
-  if (2 * value(lines[0]) >= value(lines[2])) return refusal(`The two lips, ${Number(value(lines[0]).toPrecision(4))} mm each on the mid-line, close the section of ${Number(value(lines[2]).toPrecision(4))} mm. Shorten the lips, or use a closed section.`)
+  if (2 * value(lines[0]) >= value(lines[2])) return refusal(`The two lips, ${Number(value(lines[0]).toPrecision(4))} mm each on the mid-line, close the section of ${Number(value(lines[2]).toPrecision(4))} mm. Shorten the lips, or use a closed section.`, 'c')
   return { lines, drawn: chainOfWalls(walls, -quarter, [-quarter, -quarter, -quarter, -quarter], 2, p, moduli) }
 }
 
@@ -65,7 +65,7 @@ function reachTerm(own: { symbol: string, t: number }, web: number, turn: number
 
 /** Brims on the base line, crown above; the origin at the foot of the left web. Widths go to the crossing of faces. */
 export function hatWalls(p: Of<'hat'>, moduli: Moduli): Converted {
-  if (!(p.lean >= 0 && p.lean < mostLean)) return refusal('The webs of a hat lean outwards by 0° to less than 75° from the upright. Use the wall table for other shapes.')
+  if (!(p.lean >= 0 && p.lean < mostLean)) return refusal('The webs of a hat lean outwards by 0° to less than 75° from the upright. Use the wall table for other shapes.', '\\delta')
   const [brim, crown, theta] = [{ symbol: 't_b', t: p.tBrim }, { symbol: 't_c', t: p.tCrown }, quarter - p.lean]
   const upright = p.lean === 0
   const width = (of: string, symbol: string, given: number, own: { symbol: string, t: number }, count: number): ConversionLine => upright

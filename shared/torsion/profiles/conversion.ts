@@ -12,6 +12,12 @@ export const conversion = (of: string, symbol: string, terms: readonly Conversio
 
 export const sumOf = (terms: readonly ConversionTerm[]): number => terms.reduce((total, { factor, value }) => total + factor * value, 0)
 
+/** `h` becomes `h_m`, `b_l` becomes `b_{l,m}`. */
+export function onMidLine(symbol: string): string {
+  const [letter, index] = symbol.split('_')
+  return index === undefined ? `${letter}_m` : `${letter}_{${index},m}`
+}
+
 /** Half of every adjoining thickness off an outside length, onto an inside one; equal symbols are counted together. */
 export function midLength(of: string, given: { readonly symbol: string, readonly value: number }, measured: MeasuredOn, adjoining: readonly Adjoining[]): ConversionLine {
   const symbols = [...new Set(adjoining.map(({ symbol }) => symbol))]
@@ -19,7 +25,7 @@ export function midLength(of: string, given: { readonly symbol: string, readonly
     const same = adjoining.filter(one => one.symbol === symbol)
     return signs[measured] === 0 ? [] : [{ symbol, factor: signs[measured] * same.length / 2, value: same[0]?.t ?? 0 }]
   })
-  return conversion(of, `${given.symbol}_m`, [{ symbol: given.symbol, factor: 1, value: given.value }, ...halves])
+  return conversion(of, onMidLine(given.symbol), [{ symbol: given.symbol, factor: 1, value: given.value }, ...halves])
 }
 
 /** Half the thickness off an outside radius, onto an inside one. */

@@ -61,7 +61,7 @@ export function radiiFit(section: OpenSection, names: Readonly<Record<string, st
     const length = distance(a, b)
     if (need > length * (1 + 1e-9)) {
       const radius = (corners.get(wall.from) ?? corners.get(wall.to))?.radius ?? 0
-      return refusal(`An inside radius of ${mm(radius)} is too large for the ${names[wall.id] ?? wall.id}: its corners take ${mm(need)} and it is ${mm(length)} long on the mid-line. Lessen the radius or lengthen the wall.`)
+      return refusal(`An inside radius of ${mm(radius)} is too large for the ${names[wall.id] ?? wall.id}: its corners take ${mm(need)} and it is ${mm(length)} long on the mid-line. Lessen the radius or lengthen the wall.`, 'r')
     }
   }
   return null

@@ -8,7 +8,7 @@ import { mm } from '#shared/torsion/profiles/walls-of-profile'
 
 function ring(line: ConversionLine, name: string, t: number, start: number, sweep: number, moduli: Moduli): Converted {
   const R = line.value
-  if (!(R > t / 2)) return refusal(`A mid-line radius of ${mm(R)} leaves no inner face beside a thickness of ${mm(t)}. Give a greater radius, or a solid bar.`)
+  if (!(R > t / 2)) return refusal(`A mid-line radius of ${mm(R)} leaves no inner face beside a thickness of ${mm(t)}. Give a greater radius, or a solid bar.`, line.terms[0]?.symbol)
   const at = (angle: number): Point => ({ x: R * Math.cos(angle), y: R * Math.sin(angle) })
   const [from, to] = [at(start), sweep === 2 * Math.PI ? at(start) : at(start + sweep)]
   return {
@@ -25,7 +25,7 @@ function ring(line: ConversionLine, name: string, t: number, start: number, swee
 
 /** Symmetric about the x-axis, open to the left. */
 export function arcWall(p: Of<'arc'>, moduli: Moduli): Converted {
-  if (!(p.angle < 2 * Math.PI)) return refusal('An arc sweeps less than a full circle. Use the slit tube for a full circle with an open seam.')
+  if (!(p.angle < 2 * Math.PI)) return refusal('An arc sweeps less than a full circle. Use the slit tube for a full circle with an open seam.', '\\alpha')
   return ring(midRadius({ symbol: 'R', factor: 1, value: p.radius }, p.measured, p.t), 'arc', p.t, -p.angle / 2, p.angle, moduli)
 }
 

@@ -80,8 +80,10 @@ function developedLine({ section }: Pick<ProfileSection, 'section'>): Conversion
  * to be bent from one sheet, or the walls meet where they should not.
  */
 export function sectionOfProfile(profile: Profile, moduli: Moduli): ProfileSection | Refusal {
-  const fault = numbersFault(profile) ?? bentFault(profile)
+  const fault = numbersFault(profile)
   if (fault) return refusal(fault)
+  const bent = bentFault(profile)
+  if (bent) return refusal(bent, 'make')
   const converted = convert(profile, moduli)
   if ('ok' in converted) return converted
   const { section, names } = converted.drawn

@@ -57,5 +57,5 @@ export function nothingLeft(lines: readonly ConversionLine[]): Refusal | null {
   const gone = lines.find(({ value }) => !(value > 0))
   if (!gone) return null
   const [given] = gone.terms
-  return refusal(`The ${gone.of} of ${mm(given?.value ?? 0)} is no longer than the walls beside it are thick, so that ${mm(gone.value)} is left on its mid-line. Give a greater length, or say how it is measured.`)
+  return refusal(`The ${gone.of} of ${mm(given?.value ?? 0)} is no longer than the walls beside it are thick, so that ${mm(gone.value)} is left on its mid-line. Give a greater length, or say how it is measured.`, given?.symbol)
 }

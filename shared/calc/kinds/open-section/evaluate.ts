@@ -1,5 +1,5 @@
 import { noLinks, type Links } from '#shared/calc/links'
-import type { CalcResult, Evaluation } from '#shared/calc/types'
+import type { CalcResult, Evaluation, Fault } from '#shared/calc/types'
 import { openSectionGuards } from '#shared/calc/kinds/open-section/guards'
 import { METHOD_REVISION } from '#shared/calc/method'
 import { openSectionOutputs } from '#shared/calc/kinds/open-section/outputs'
@@ -15,9 +15,12 @@ export function evaluateOpenSection(inputs: unknown, links: Links = noLinks): Ev
   const parsed = parseOpenSection(inputs, links)
   if (!parsed.ok) return { ok: false, faults: parsed.faults }
   const solved = solveOpenSection(parsed.model)
-  if (!solved.ok) return { ok: false, faults: solved.faults }
+  if (!solved.ok) return { ok: false, faults: parsed.model.profile ? atProfile(solved.faults) : solved.faults }
   return { ok: true, result: present(solved.solution) }
 }
+
+/** The walls of a profile have no fields of their own. */
+const atProfile = (faults: Fault[]): Fault[] => faults.map(fault => /^(walls|junctions)\b/.test(fault.path) ? { ...fault, path: 'profile' } : fault)
 
 /** Neutral data that the page and the PDF both show. */
 function present(s: Solution): CalcResult {

@@ -1,5 +1,6 @@
 /** The section as numbers: N, mm, MPa, rad, °C. Made by `parse`, read by everything after it. */
 import type { CaseModel, FactorModel, MaterialModel, Measured, Refused, Unusual } from '#shared/calc/parts/model'
+import type { ProfileModel } from '#shared/calc/parts/parse-profile'
 import type { ModelJunction, ModelNode, ModelWall, Seam } from '#shared/calc/parts/wall-model'
 
 export interface OpenSectionModel {
@@ -8,6 +9,8 @@ export interface OpenSectionModel {
   walls: ModelWall[]
   junctions: ModelJunction[]
   seams: Seam[]
+  /** What the walls were made of, where they follow from a profile. */
+  profile: ProfileModel | null
   materials: MaterialModel[]
   by: 'torque' | 'rate'
   cases: CaseModel[]

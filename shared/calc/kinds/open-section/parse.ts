@@ -2,6 +2,7 @@
 import { noLinks, type Links } from '#shared/calc/links'
 import type { Fault } from '#shared/calc/types'
 import type { OpenSectionModel } from '#shared/calc/kinds/open-section/model'
+import { parseProfile } from '#shared/calc/parts/parse-profile'
 import { parseWalls } from '#shared/calc/parts/parse-walls'
 import { parseCases, parseFactors } from '#shared/calc/parts/parse-loading'
 import { parseMaterial } from '#shared/calc/parts/parse-material'
@@ -26,12 +27,12 @@ function parseChecked(inputs: OpenSectionInputs, links: Links): Parsed {
   const length = read.optionalPositive(inputs.length, 'length', { label: 'the length of the bar', dimension: 'length', typical: 'bar length' })
   const twistAllowed = read.optionalPositive(inputs.twistAllowed, 'twistAllowed', { label: 'the twist allowed', dimension: 'angle', typical: 'twist' })
   const taper = read.optional(inputs.declarations.taper, 'declarations.taper', { label: 'the half-angle of taper', dimension: 'angle' })
-  const geometry = parseWalls(inputs, materials, read)
+  const geometry = inputs.profile ? parseProfile(inputs.profile, inputs, materials, read) : parseWalls(inputs, materials, read)
   if (!geometry || !factors || read.faults.length > 0) return { ok: false, faults: read.faults }
   return {
     ok: true,
     model: {
-      units: inputs.units, ...geometry, materials, by: inputs.loading.by === 'rate' ? 'rate' : 'torque', cases,
+      units: inputs.units, profile: null, ...geometry, materials, by: inputs.loading.by === 'rate' ? 'rate' : 'torque', cases,
       length, twistAllowed, twistOrigin: inputs.twistOrigin.trim(), factors, ends: inputs.ends,
       declarations: { ...inputs.declarations, taper: taper?.value ?? null },
       refused: read.refused, unusual: read.unusual,

@@ -7,6 +7,7 @@ import { declarationFields } from '#shared/calc/parts/declaration-fields'
 import { choice, declared, optionalQuantity, source, unitSystem } from '#shared/calc/parts/fields'
 import { factors, loading } from '#shared/calc/parts/loading-fields'
 import { materials } from '#shared/calc/parts/material-fields'
+import { profile } from '#shared/calc/parts/profile-fields'
 import { junctions, start, taperingWalls } from '#shared/calc/parts/wall-fields'
 
 const declarations = z.strictObject({
@@ -19,6 +20,8 @@ export const openSectionSchema = z.strictObject({
   start,
   walls: taperingWalls,
   junctions,
+  /** Given, the walls follow from it, and the wall table rests as it was. */
+  profile: profile.optional(),
   materials,
   loading,
   length: optionalQuantity('Length of the bar', 'length', { symbol: 'L' }),

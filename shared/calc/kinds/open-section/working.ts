@@ -6,11 +6,12 @@ import { sub, line, num, qty, res, sym } from '#shared/calc/parts/tex'
 import type { Solution } from '#shared/calc/kinds/open-section/solution'
 import { caseSteps, decisiveCases } from '#shared/calc/kinds/open-section/working-cases'
 import { marginSteps } from '#shared/calc/kinds/open-section/working-margins'
+import { profileSteps } from '#shared/calc/kinds/open-section/working-profile'
 import { sectionSteps } from '#shared/calc/kinds/open-section/working-section'
 import { engineUnit, type Dimension } from '#shared/units/units'
 
 export function openSectionWorking(s: Solution): WorkingStep[] {
-  return [...conversions(s), ...sectionSteps(s), ...sectorial(s), ...caseSteps(s), ...marginSteps(s)].filter(step => step.lines.length > 0)
+  return [...conversions(s), ...profileSteps(s.model.profile), ...sectionSteps(s), ...sectorial(s), ...caseSteps(s), ...marginSteps(s)].filter(step => step.lines.length > 0)
 }
 
 /** What was typed in other units, as the working uses it. */
@@ -32,8 +33,9 @@ function conversions(s: Solution): WorkingStep[] {
   return [{
     heading: 'Typed values in N, mm, MPa and rad', method: '§10',
     lines: [
-      ...model.walls.flatMap(w => [...from(sym('t', w.tEnd ? `1,${w.id}` : w.id), w.t, 'length'), ...from(sym('t', `2,${w.id}`), w.tEnd, 'length')]),
-      ...model.junctions.flatMap(j => from(sym('r', j.node), j.radius, 'length')),
+      ...(model.profile?.dimensions ?? []).flatMap(({ symbol, measured, angle }) => from(symbol, measured, angle ? 'angle' : 'length')),
+      ...(model.profile ? [] : model.walls).flatMap(w => [...from(sym('t', w.tEnd ? `1,${w.id}` : w.id), w.t, 'length'), ...from(sym('t', `2,${w.id}`), w.tEnd, 'length')]),
+      ...(model.profile ? [] : model.junctions).flatMap(j => from(sym('r', j.node), j.radius, 'length')),
       ...from('L', model.length, 'length'), ...from('\\varphi_a', model.twistAllowed, 'angle'), ...materials, ...cases,
     ],
   }]

@@ -61,7 +61,7 @@ export function parseRestrainedWarping(value: unknown, links: Links = noLinks): 
     model: {
       units: inputs.units, length, supports, cases, twistAllowed, factors, declarations: { ...declared, heldAlong },
       section: {
-        units: inputs.units, ...geometry, materials, by: 'torque', cases: [], length, twistAllowed: null, twistOrigin: '', factors, ends: 'free',
+        units: inputs.units, profile: null, ...geometry, materials, by: 'torque', cases: [], length, twistAllowed: null, twistOrigin: '', factors, ends: 'free',
         declarations: { ...declared, taper: taper?.value ?? null }, refused: read.refused, unusual: read.unusual,
       },
     },
