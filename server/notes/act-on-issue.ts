@@ -5,13 +5,13 @@ import { confirmPassword } from '#server/access/confirm-password'
 import { recordRefusal, runCommand, type ActName, type CommandContext } from '#server/utils/command-context'
 import { DomainError } from '#server/utils/domain-error'
 import { requireAbility } from './facts'
-import { findIssue, lockIssue } from './find-issue'
+import { findIssueLine, lockIssue } from './find-issue'
 import type { Standing } from './standing'
 
 type Work<T> = (inside: CommandContext, issue: Issue, name: ActName, standing: Standing) => Promise<T>
 
 async function nameOf(context: CommandContext, issueId: string, act: string): Promise<ActName> {
-  const { note, letter } = await findIssue(context.em.fork(), issueId)
+  const { note, letter } = await findIssueLine(context.em.fork(), issueId)
   return { chain: noteChain(note.id), act, subject: { type: 'issue', id: issueId, label: `${note.number} ${letter}` } }
 }
 

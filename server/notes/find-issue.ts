@@ -12,7 +12,14 @@ export async function findIssue(em: EntityManager, id: string): Promise<Issue> {
   return issue
 }
 
-/** The same, with its row locked for the rest of the transaction: acts on one issue wait for each other. */
+/** Its number and letter, without its long texts. @throws DomainError not-found */
+export async function findIssueLine(em: EntityManager, id: string): Promise<Pick<Issue, 'note' | 'letter'>> {
+  const issue = await em.findOne(IssueSchema, { id }, { populate: ['note'], exclude: ['document', 'results'] })
+  if (!issue) throw new DomainError('not-found', 'There is no such issue.')
+  return issue
+}
+
+/** An issue as `findIssue` gives it, with its row locked for the rest of the transaction: acts on one issue wait for each other. */
 export async function lockIssue(em: EntityManager, id: string): Promise<Issue> {
   const locked = await em.findOne(IssueSchema, { id }, { lockMode: LockMode.PESSIMISTIC_WRITE, refresh: true })
   if (!locked) throw new DomainError('not-found', 'There is no such issue.')

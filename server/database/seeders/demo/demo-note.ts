@@ -26,7 +26,8 @@ export type DemoAct
     | { act: 'submit', by: PersonKey, at: string, checker: PersonKey, approver: PersonKey }
     | { act: 'remark', remark: DemoRemark }
     | { act: 'check', by: PersonKey, at: string, items: DemoCheckItem[] }
-    | { act: 'tick', by: PersonKey, at: string, calcs: string[] }
+    /** Ticks every calculation of the note. */
+    | { act: 'tick', by: PersonKey, at: string }
     | { act: 'judge', by: PersonKey, at: string, note: string }
     | { act: 'return', by: PersonKey, at: string, reason: string }
     | { act: 'pass', by: PersonKey, at: string }
@@ -47,3 +48,6 @@ export interface DemoNote {
   /** Opens of further issues happen at the first act of each. */
   issues: { letter: string, openedBy: PersonKey, openedAt: string, acts: DemoAct[] }[]
 }
+
+/** Several quantities of one section that stay untied for the same reason. */
+export const looseRows = (section: string, reason: string, ...texts: string[]): LooseReason[] => texts.map(text => ({ section, text, reason }))

@@ -8,8 +8,9 @@ import { tickCalculation } from '#server/commands/tick-calculation'
 import { GuardAnswerSchema } from '#server/database/entities/guard-answer'
 import { RemarkSchema } from '#server/database/entities/remark'
 import { sheetFactsOf } from '#server/notes/sheet-facts'
+import { calculationsOf } from '#shared/note/calculations'
+import { readDocument } from '#shared/note/schema'
 import { checkItems } from '#shared/review/check-sheet'
-import { calcId } from './build-document'
 import type { DemoAct, DemoNote, DemoRemark } from './demo-note'
 import { findPlace } from './find-place'
 import type { PersonKey } from './people'
@@ -42,8 +43,8 @@ export async function playClosing(stage: Stage, note: DemoNote, remark: DemoRema
 }
 
 export async function playTicks(stage: Stage, note: DemoNote, act: ActOf<'tick'>): Promise<void> {
-  const { id } = await issueOf(stage, note.number)
-  for (const name of act.calcs) await tickCalculation(contextOf(stage, act.by, act.at), id, { calcId: calcId(note.number, name), ticked: true })
+  const { id, document } = await issueOf(stage, note.number)
+  for (const one of calculationsOf(readDocument(JSON.parse(document)))) await tickCalculation(contextOf(stage, act.by, act.at), id, { calcId: one.id, ticked: true })
 }
 
 /** Accepts every answer and deviation that is not judged yet. */

@@ -1,5 +1,4 @@
 /** What the analysts of the story do: save, change the title block, answer guards, explain loose numbers. */
-import { calcKind } from '#shared/calc/registry'
 import type { Evaluation } from '#shared/calc/types'
 import { calculationsOf } from '#shared/note/calculations'
 import { readDocument } from '#shared/note/schema'
@@ -21,7 +20,7 @@ type ActOf<Name extends DemoAct['act']> = Extract<DemoAct, { act: Name }>
 
 export async function playSave(stage: Stage, note: DemoNote, act: ActOf<'save'>): Promise<void> {
   const issue = await issueOf(stage, note.number)
-  const after = buildDocument(note.number, act.sections, calcKind('open-section').version)
+  const after = buildDocument(note.number, act.sections)
   const { steps, docHash } = changeBetween(JSON.parse(issue.document), after)
   if (steps.length === 0) return
   const context = contextOf(stage, act.by, act.at)
@@ -39,11 +38,11 @@ export async function playMetadata(stage: Stage, note: DemoNote, act: ActOf<'met
 export async function playAnswers(stage: Stage, note: DemoNote, act: ActOf<'answer'>): Promise<void> {
   const issue = await issueOf(stage, note.number)
   const results = JSON.parse(issue.results) as Record<string, Evaluation>
-  for (const { id, label } of calculationsOf(readDocument(JSON.parse(issue.document)))) {
+  for (const { id } of calculationsOf(readDocument(JSON.parse(issue.document)))) {
     const evaluation = results[id]
     const guards = evaluation?.ok === true ? evaluation.result.guards.filter(guard => guard.severity !== 'information') : []
     for (const guard of guards) {
-      const text = answerFor([act], label, guard)
+      const text = answerFor([act], { note: note.number, id }, guard)
       if (text !== null) await answerGuard(contextOf(stage, act.by, act.at), issue.id, { calcId: id, guardKey: guard.key, text })
     }
   }

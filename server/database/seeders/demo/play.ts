@@ -33,12 +33,20 @@ function playMoment(stage: Stage, moment: Moment): Promise<void> {
   }
 }
 
-/** Plays the notes from the first moment to the last. Says at which moment it stopped, if it stops. */
-export async function play(stage: Stage, notes: DemoNote[]): Promise<void> {
-  for (const moment of timelineOf(notes)) {
+async function playNote(stage: Stage, note: DemoNote): Promise<void> {
+  for (const moment of timelineOf([note])) {
     await playMoment(stage, moment).catch((cause: unknown) => {
       const what = moment.what === 'act' ? moment.act.act : moment.what
       throw new Error(`${moment.note.number}, ${moment.at}, ${moment.by}, ${what}: ${cause instanceof Error ? cause.message : String(cause)}`, { cause })
     })
   }
+}
+
+/**
+ * Plays every note from its first moment to its last. Notes share nothing but people, and each has a trail
+ * of its own, so they are played side by side: while one waits for the database, another computes.
+ * Says at which moment it stopped, if it stops.
+ */
+export async function play(stage: Stage, notes: DemoNote[]): Promise<void> {
+  await Promise.all(notes.map(note => playNote(stage, note)))
 }

@@ -11,7 +11,7 @@ export const MAX_COLUMNS = 20
 const cell = z.string().max(40)
 
 /** What a load may be. */
-export const loadDimension = choice('Quantity', ['torque', 'force', 'distributedTorque', 'shearFlow', 'rateOfTwist', 'angle', 'stress', 'length', 'bimoment', 'number'])
+export const loadDimension = choice('Quantity', ['torque', 'force', 'distributedTorque', 'shearFlow', 'rateOfTwist', 'angle', 'stress', 'length', 'bimoment', 'rateGradient', 'number'])
 
 const column = z.strictObject({ key: identifier, title: name, dimension: loadDimension, unit: unitId })
 const row = z.strictObject({ id: identifier, title: name, source, level, temperature: cell, cells: z.array(cell).max(MAX_COLUMNS) })

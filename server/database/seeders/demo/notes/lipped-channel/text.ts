@@ -1,0 +1,52 @@
+/** QSN-19-0071: a seal carrier that is strong enough and not stiff enough. A draft. */
+import { calc, notApplicable, ol, p, section, type DemoSection } from '../../build-document'
+import { QM_107 } from '../../materials'
+import { betweenClips, carrier, heldWarping, outline, seal, trial } from './calculations'
+
+export const lippedChannel = (): DemoSection[] => [
+  section('scope',
+    p('Seal carrier QW19-5240-11 on the cargo door sill. Not covered: clips and rivets (QSN-19-0072), handler stepping on the sill cover.')),
+  section('references', ol(
+    'Drawing QW19-5240-11 issue A.',
+    'QW19-LDS-041 issue 1, Cargo door loads, table 5 (in lbf·in).',
+    'QM-MD-107 issue 1.',
+    'QW19-SYS-044 issue 2, Door seal, compression and alignment.',
+    'Torsion methods reference, revision A, paragraphs 1.9, 1.10, 3.4, 7.8.')),
+  section('description',
+    p('The carrier is a channel with inward lips, pressed from sheet, holding the door seal between two clips 410 mm apart. The seal drags on the door and turns the carrier about its own axis. Axes: x from the web to the lips, y up, z along the sill.')),
+  section('assumptions', ol(
+    'Linear elastic.',
+    'Each clip holds rotation and lets the section warp. Reason: two rivets in the web only. This is far on the safe side for twist; see section 18. *Reason to be confirmed with design before submission.*',
+    'The torque enters at one clip and leaves at the other. Safe side for twist against a distributed drag.',
+    'Nominal thickness.')),
+  section('geometry',
+    p('Web 80 mm, flanges 40 mm, lips 16 mm, mid-line to the intersections; 2.5 mm sheet; inside radius 5.0 mm. Lip slenderness ⟦carrier slenderness:a⟧.')),
+  section('materials',
+    p('QM-107 issue 1, 6061-T6 sheet, A basis: F_su ⟦QM-107 Fsu⟧, F_ty ⟦QM-107 Fty⟧, G ⟦QM-107 G⟧; F_sy = F_ty/√3. Demonstration data.'),
+    calc('QM-107', 'material', '6061-T6 sheet', QM_107)),
+  section('loads',
+    p('Six cases at limit level, given per carrier in lbf·in. L04, seal iced and door opened by power: ⟦SILL T@L04⟧, that is ⟦clips T:a@L04|N·mm⟧.'),
+    calc('SILL', 'load-cases', 'Seal drag per carrier, L01 to L06', seal)),
+  section('section-analysis',
+    calc('carrier', 'open-section', 'Lipped channel, 2.5 mm sheet', carrier),
+    p('J = ⟦carrier J⟧ (plain ⟦carrier J_plain⟧), bend factor ⟦carrier Kc:2⟧, shear centre x = ⟦carrier x_S⟧, Γ = ⟦carrier Gamma⟧.'),
+    calc('outline', 'general-outline', 'Cross-check of the section', outline),
+    p('The two-dimensional solution gives J = ⟦outline J⟧ at 2.5 mm.')),
+  section('span-analysis',
+    calc('clips', 'torque-along-bar', 'Twist of the carrier between its clips, six cases', betweenClips),
+    p('L04: rate of twist ⟦carrier theta@L04⟧; over 410 mm ⟦clips twist_max@L04|rad⟧ = ⟦clips twist_max@L04⟧. L02 gives ⟦clips twist_max@L02⟧ and also fails, by a hair: ⟦clips MS:twist@L02⟧. L05 passes with ⟦clips MS:twist@L05⟧.')),
+  section('stresses',
+    p('L04: ⟦clips tau:a@L04⟧ at the bends, of no concern.')),
+  notApplicable('stability', 'The stress is very low.'),
+  section('deflections',
+    p('The seal tolerates ⟦clips twist_allowed⟧ between clips (reference 4, para 5). L04 twists the carrier by ⟦clips twist_max@L04⟧: the margin is ⟦clips MS:twist⟧ and the carrier is **not adequate as drawn**. With the mid-line held, zero margin needs a sheet of about 2.62 mm. Sheet of 2.8 mm would do but is not stocked; 3.0 mm, ⟦#next-sheet⟧, gives ⟦next-sheet MS:twist@L04⟧. The Wagner ratio is ⟦carrier wagner@L04⟧.'),
+    calc('next-sheet', 'open-section', 'Lipped channel, next stocked sheet', trial('3.0')),
+    p('Its torsion constant is ⟦next-sheet J⟧.')),
+  section('sensitivity',
+    calc('held-both', 'restrained-warping', 'Trial: warping held at both clips', heldWarping('held')),
+    calc('held-one', 'restrained-warping', 'Trial: warping held at one clip', heldWarping('free')),
+    p('kL is only ⟦held-both kL⟧. If the clips held the warping at both ends the twist of L04 would fall to ⟦held-both twist_max@L04⟧, at one end to ⟦held-one twist_max@L04⟧. Clips that take in the flanges may therefore be a lighter cure than thicker sheet. To be discussed with design.')),
+  section('open-points',
+    p('Thickness or clips: Noémie Castagnoux with design, by 2026-10-23.')),
+  section('conclusion', calc('margins', 'margin-table', 'All margins of the note', { rows: 'least of each mode' })),
+]
