@@ -10,7 +10,9 @@ import { QM_101, QM_102 } from '../../materials'
 const criteria = factorsOf('QW19-SC-002 issue 2: 1.5 on limit loads; no special factor pertains to the walls.')
 
 type Place = [node: string, x: string, y: string]
-const [A, B, C, D, E, F, P, Q]: Place[] = [['A', '0', '-75'], ['B', '0', '75'], ['C', '190', '-70'], ['D', '190', '70'], ['E', '430', '-46'], ['F', '430', '46'], ['P', '462', '-43'], ['Q', '462', '43']]
+const at = (node: string, x: string, y: string): Place => [node, x, y]
+const [A, B, C, D] = [at('A', '0', '-75'), at('B', '0', '75'), at('C', '190', '-70'), at('D', '190', '70')] as const
+const [E, F, P, Q] = [at('E', '430', '-46'), at('F', '430', '46'), at('P', '462', '-43'), at('Q', '462', '43')] as const
 
 const wall = (id: string, [from]: Place, [to, x, y]: Place, name: string, t: string, material = 'QM-102'): WallInput =>
   ({ id, name, from, to, end: { by: 'point', x: typed(x, 'mm'), y: typed(y, 'mm') }, t: typed(t, 'mm'), material })
