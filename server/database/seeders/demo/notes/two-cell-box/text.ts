@@ -48,7 +48,7 @@ export const twoCellBox = (): DemoSection[] => [
   section('deflections',
     p('The carriages tolerate ⟦cells twist_allowed⟧ between the ends (reference 5). Case B21 gives ⟦cells twist@B21⟧, ⟦cells twist_deg@B21⟧; margin ⟦cells MS:twist⟧.')),
   section('sensitivity',
-    p('The stiffness goes with the thickness of the covers: a cover 0.1 mm under size twists the box by about three per cent more. The shared web could be left out without a visible change of the twist, since the flows of the two cells nearly cancel in it.')),
+    p('The stiffness goes with the thickness of the covers: covers of cell 2 that are 0.1 mm under size twist the box by less than two per cent more. The shared web adds little over two per cent, since the flows of the two cells nearly cancel in it.')),
   section('open-points',
     p('None.')),
   section('conclusion',
