@@ -78,7 +78,7 @@ export function ensureBuild() {
   try {
     run('npx', ['nuxi', 'build'], { env: { ...process.env, NODE_ENV: 'production', NUXT_TELEMETRY_DISABLED: '1', TORQUILL_OUTPUT_DIR: part, TORQUILL_WORK_DIR: work, NODE_OPTIONS: '--max-old-space-size=4096' } })
     // The worker, the threads and the terminal's commands are bundles of their own; packages stay where npm put them.
-    for (const entry of ['worker', 'cli/command', 'cli/mail-catcher', 'validation/validation-thread', 'outline/outline-thread']) bundle(entry, part)
+    for (const entry of ['worker', 'cli/command', 'cli/mail-catcher', 'validation/validation-thread', 'outline/outline-thread', 'jobs/release-thread']) bundle(entry, part)
     writeFileSync(join(part, 'complete'), '')
     renameSync(part, target)
   } finally {

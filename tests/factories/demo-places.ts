@@ -2,13 +2,17 @@
  * Where each expected figure of the demonstration stands in Torquill's notes: `calculation output`, by
  * note, calculation and name of the scenario. `within` widens the comparison, with the reason beside it.
  */
-export interface DemoPlace { at: string, within?: number, why?: string, magnitude?: true, shown?: string }
+export interface DemoPlace { at: string, within?: number, why?: string, magnitude?: true, shown?: string, times?: number }
 
 const at = (place: string): DemoPlace => ({ at: place })
 /** The scenario gives magnitudes where the sign is that of its direction. */
 const size = (place: string): DemoPlace => ({ at: place, magnitude: true })
 const near = (place: string, within: number, why: string): DemoPlace => ({ at: place, within, why })
 
+/** The kind refers the stiffness to the largest modulus of the cells, the scenario to that of the covers. */
+const G_RATIO = 27600 / 26900
+/** Flow per newton millimetre, from the torque of B16. */
+const PER_TORQUE = 1 / 9.91e6
 const ENDS = 'J here is less the end correction of the two free edges, which the scenario leaves out in this note: 14 201 against 14 473 mm⁴'
 const MESH = 'another numerical solution of the same outline'
 /** 20.917 here and by boundary elements (factor 1.48911), 20.920 by finite elements: K07 at 0.03986 or 0.04000 stands on the edge of its last digit. */
@@ -43,6 +47,12 @@ export const DEMO_PLACES: Record<string, Record<string, DemoPlace>> = {
     MS_seg1_ult: at('inboard MS:shear-ultimate'), MS_seg2_ult: at('outboard MS:shear-ultimate'), MS_seg2_yield: at('outboard MS:shear-yield'), MS_twist: at('drive MS:twist'),
   },
   'QSN-19-0044 C5': { governing: at('margins MS') },
+  'QSN-19-0052 C1': {
+    J: { at: 'cells J', times: G_RATIO }, q1_per_T: { at: 'cells q:cell-1@B16', times: PER_TORQUE }, q2_per_T: { at: 'cells q:cell-2@B16', times: PER_TORQUE }, q_shared_per_T: { at: 'cells q:g@B16', times: PER_TORQUE },
+    share_1: at('cells share:1'), share_2: at('cells share:2'), area_1: at('cells A:1'), area_2: at('cells A:2'), chi_covers: at('cells chi_max'),
+  },
+  'QSN-19-0052 C3': { tau_B15_rear: at('rear-web tau@B15'), MS_ult: at('rear-web MS:interaction-ultimate'), MS_yield: at('rear-web MS:equivalent-yield') },
+  'QSN-19-0052 C5': { twist_B21: at('cells twist@B21'), twist_B21_deg: at('cells twist_deg@B21'), MS_twist: at('cells MS:twist') },
   'QSN-19-0067 C1': {
     J: at('section J'), x_max: near('section x_peak', 1e-3, MESH), x_shear_centre: at('section x_S'), y_shear_centre: at('section y_S'), A: at('section A'),
     x_centroid: at('section x_C'), y_centroid: at('section y_C'), Ixx: at('section Ixx'), Iyy: at('section Iyy'), Ixy: at('section Ixy'),
@@ -106,6 +116,12 @@ export const DEMO_NOT_GIVEN: Record<string, Record<string, string>> = {
   'QSN-19-0044 C1': { sum_of_shares: 'the shares are multiplied out in the table of cases' },
   'QSN-19-0044 C3': { tau_cr: 'a circular tube of this wall is not a case of wall stability' },
   'QSN-19-0044 C4': { T_allow: INVERSE },
+  'QSN-19-0052 C1': { J_cells: 'given with the fins', J_fins: 'given with the cells', share_fins: 'the rest of the two shares', x_shear_centre: 'torque is given about it; a closed section has no output of it', chi_shared: 'the variation is judged where the stress is at least half of the peak; the shared web carries a third' },
+  'QSN-19-0052 C2': { x_shear_centre_flexural: 'torque is given about it; a closed section has no output of it', Ixx: 'no output of a closed section' },
+  'QSN-19-0052 C3': { q_B16_cover: 'only the rear web is combined', tau_B16_cover: 'only the rear web is combined', rear_flow_B16: 'torsion alone loads the joint here', rivet_ult: 'torsion alone loads the joint here' },
+  'QSN-19-0052 C4': Object.fromEntries(['ks_cover2', 'ks_cover2_fit', 'ks_cover2_table_linear', 'tau_cr_cover2', 'tau_cr_cover1', 'tau_cr_front', 'tau_cr_shared', 'tau_cr_rear', 'MS_buckling', 'MS_buckling_fit', 'MS_buckling_table'].map(name => [name, 'the panels are shown in the note of the covers'])),
+  'QSN-19-0052 C6': Object.fromEntries(['J', 'x_shear_centre', 'J_thin_same_G', 'dJ'].map(name => [name, 'the outline of the box is not in the note'])),
+  'QSN-19-0052 C7': { governing: 'the least margin of the scenario is that of the panels' },
   'QSN-19-0067 C1': { tau_per_T: RATIO, Kc: RATIO },
   'QSN-19-0067 C2': { share: RATIO, Kc_table: 'the table is read linearly, as the row below this one has it', L_over_t_through: 'slenderness is judged between mid-line intersections: 7.5', L_over_t_abutting: 'slenderness is judged between mid-line intersections: 5.7' },
   'QSN-19-0067 C4': { tau_direct_K05: 'typed into the calculation; its sum with torsion is compared', MS_r16: TRIAL, MS_r13: TRIAL, MS_t24: TRIAL },
@@ -125,6 +141,7 @@ export const DEMO_NOT_GIVEN: Record<string, Record<string, string>> = {
 /** Guards that the scenario expects of a note and Torquill does not raise, and those it raises beyond: each with the reason. */
 export const DEMO_GUARD_DIFFERENCES: Record<string, { not: Record<string, string>, also: Record<string, string> }> = {
   'QSN-19-0044': { not: { 'G-20': 'a circular tube of constant wall does not warp, so a bar of tubes is not asked about its clamp' }, also: {} },
+  'QSN-19-0052': { not: { 'G-04': 'judged where the stress is at least half of the peak; the shared web, where the flows of two cells nearly cancel, carries a third' }, also: { 'G-10': 'corners without a radius: lapped and riveted, answered as a deviation' } },
   'QSN-19-0067': {
     not: { 'G-16': 'belongs to the held root, which walls that meet in one point cannot be asked for; its bound is worked by hand' },
     also: { 'G-28': 'the rotation at ultimate passes its first threshold; the scenario judges it at limit', 'G-39': 'the arm of 2.40 in is shorter than the section is wide; the scenario does not judge length' },

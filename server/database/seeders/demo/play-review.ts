@@ -1,6 +1,6 @@
 /** What checkers and approvers of the story do. */
 import { addRemark } from '#server/commands/add-remark'
-import { fillCheckItem } from '#server/commands/fill-check-item'
+import { fillCheckItems } from '#server/commands/fill-check-item'
 import { judgeAnswer } from '#server/commands/judge-answer'
 import { replyToRemark } from '#server/commands/reply-to-remark'
 import { setRemarkState } from '#server/commands/set-remark-state'
@@ -59,7 +59,5 @@ export async function playJudgement(stage: Stage, note: DemoNote, act: ActOf<'ju
 export async function playCheckSheet(stage: Stage, note: DemoNote, act: ActOf<'check'>): Promise<void> {
   const issue = await issueOf(stage, note.number)
   const onSheet = new Set(checkItems(sheetFactsOf(issue)).map(({ item }) => item))
-  for (const item of act.items) {
-    if (onSheet.has(item.item)) await fillCheckItem(contextOf(stage, act.by, act.at), issue.id, item)
-  }
+  await fillCheckItems(contextOf(stage, act.by, act.at), issue.id, act.items.filter(({ item }) => onSheet.has(item)))
 }

@@ -5,6 +5,7 @@ import { passCheck } from '#server/commands/pass-check'
 import { requestRelease } from '#server/commands/request-release'
 import { returnNote } from '#server/commands/return-note'
 import { submitNote } from '#server/commands/submit-note'
+import { GuardAnswerSchema } from '#server/database/entities/guard-answer'
 import { SignatureSchema } from '#server/database/entities/signature'
 import type { DemoAct, DemoNote } from './demo-note'
 import type { PersonKey } from './people'
@@ -40,11 +41,12 @@ export async function playPass(stage: Stage, note: DemoNote, act: ActOf<'pass'>)
   await passCheck(contextOf(stage, act.by, act.at), issue.id, { expect: expectOf(issue), password: stage.password })
 }
 
-/** Signs, then makes the PDF as the worker does; the job that waits in the queue finds it made. */
+/** Accepts what deviates, signs, then makes the PDF as the worker does; the job that waits in the queue finds it made. */
 export async function playRelease(stage: Stage, note: DemoNote, act: ActOf<'release'>): Promise<void> {
   const issue = await issueOf(stage, note.number)
   const context = contextOf(stage, act.by, act.at)
-  await requestRelease(context, issue.id, { expect: expectOf(issue), password: stage.password, acceptedDeviations: [] })
+  const deviations = await stage.em.fork().find(GuardAnswerSchema, { issue: issue.id, kind: 'deviation' })
+  await requestRelease(context, issue.id, { expect: expectOf(issue), password: stage.password, acceptedDeviations: deviations.map(one => one.id) })
   const signature = await stage.em.fork().findOneOrFail(SignatureSchema, { issue: issue.id, meaning: 'released', voidedAt: null })
   await stage.makeRelease({ issueId: issue.id, signatureId: signature.id }, context.clock)
   const { state, releaseFailure } = await issueOf(stage, note.number)

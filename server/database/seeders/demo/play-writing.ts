@@ -4,7 +4,7 @@ import { calculationsOf } from '#shared/note/calculations'
 import { readDocument } from '#shared/note/schema'
 import { answerGuard } from '#server/commands/answer-guard'
 import { changeMetadata } from '#server/commands/change-metadata'
-import { explainLooseNumber } from '#server/commands/explain-loose-number'
+import { explainLooseNumbers } from '#server/commands/explain-loose-number'
 import { labelSave } from '#server/commands/label-save'
 import { saveNote } from '#server/commands/save-note'
 import { LooseDecisionSchema } from '#server/database/entities/loose-decision'
@@ -53,9 +53,10 @@ export async function playReasons(stage: Stage, note: DemoNote, act: ActOf<'expl
   const issue = await issueOf(stage, note.number)
   const document = readDocument(JSON.parse(issue.document))
   const explained = await stage.em.fork().find(LooseDecisionSchema, { issue: issue.id })
-  for (const { blockId, text, ordinal } of looseNumbersOf(issue)) {
+  const open = looseNumbersOf(issue).flatMap(({ blockId, text, ordinal }) => {
     const reason = reasonFor(document, act.reasons, { blockId, text })
     const known = explained.some(one => one.blockId === blockId && one.text === text && one.ordinal === ordinal)
-    if (reason !== null && !known) await explainLooseNumber(contextOf(stage, act.by, act.at), issue.id, { blockId, text, ordinal, reason })
-  }
+    return reason === null || known ? [] : [{ blockId, text, ordinal, reason }]
+  })
+  await explainLooseNumbers(contextOf(stage, act.by, act.at), issue.id, open)
 }

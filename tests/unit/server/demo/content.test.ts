@@ -89,9 +89,9 @@ describe.each(ISSUES.filter(({ issue }) => submitted(issue)))('$name', ({ note, 
 })
 
 describe.each(ISSUES.filter(({ issue }) => released(issue)))('$name', ({ note, issue }) => {
-  it('is released without a deviation and with a margin that holds', () => {
+  it('is released with no stop that cannot be met, and with margins that hold', () => {
     for (const result of lastOf(note, issue).results.values()) {
-      expect(result.guards.filter(guard => guard.severity === 'stop')).toEqual([])
+      expect(result.guards.filter(guard => guard.severity === 'stop' && !guard.deviable)).toEqual([])
       expect(result.margins.filter(row => row.ms !== null && row.ms < 0)).toEqual([])
     }
   })

@@ -57,7 +57,7 @@ describe('the figures of the demonstration', () => {
   it.each(placed)('$name is $value $unit ($by)', ({ note, value, unit, place }) => {
     const output = FOUND.get(note)?.outputs.get(place.at)
     if (output === undefined) throw new Error(`${place.at} is no output`)
-    const ours = isUnit(unit) ? fromEngine(output.value, unit) : output.value
+    const ours = (isUnit(unit) ? fromEngine(output.value, unit) : output.value) * (place.times ?? 1)
     const given = place.magnitude ? Math.abs(ours) : ours
     const asked = place.magnitude ? Math.abs(value) : value
     expect(Math.abs(given - asked), `${given} against ${asked}`).toBeLessThanOrEqual((place.within ?? SIX_FIGURES) * Math.abs(asked))

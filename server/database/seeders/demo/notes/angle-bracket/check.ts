@@ -13,7 +13,7 @@ export const CHECK: DemoCheckItem[] = [
   { item: 9, verdict: 'ok', evidence: 'middle of the fillet' },
   { item: 10, verdict: 'ok', evidence: 'fillet modelled; outer corner convex' },
   { item: 11, verdict: 'ok', evidence: 'own boundary-element value, within 0.0001 in' },
-  { item: 12, verdict: 'ok', evidence: 'toes relieved, view D; held root bounded in C7' },
+  { item: 12, verdict: 'ok', evidence: 'toes relieved, view D; held root bounded in section 18' },
   { item: 13, verdict: 'not applicable', evidence: 'no bimoment' },
   { item: 14, verdict: 'ok', evidence: 'constant torque' },
   { item: 15, verdict: 'ok', evidence: 'axes figure' },
