@@ -67,6 +67,23 @@ it('a solid bar takes its torque from the section before it, and its margin foll
   await expect.poll(() => bar.locator('.gov').first().innerText()).toMatch(/65\.50\sMPa of 390/)
   await saved(page)
   await page.screenshot({ path: 'tests/browser/screens/kind-solid-bar.png', fullPage: true })
+
+  // Ten times the torque is too much; the radius that serves is asked for, taken, and passes.
+  await field(page, 'Torque', '4000')
+  await expect.poll(() => bar.locator('.gov').first().innerText()).toMatch(/negative/)
+  await bar.getByRole('button', { name: 'Ask' }).click()
+  await bar.getByLabel('Zero margin by').selectOption({ label: await bar.getByRole('option', { name: /^Radius,/ }).first().innerText() })
+  await bar.getByRole('button', { name: 'Find' }).click()
+  // By hand: r = ½∛(16 · 4 000 000 N·mm · 1.5/(π · 390 MPa)) = 21.396 mm, rounded up.
+  const proposal = bar.getByRole('button', { name: /^Take 21\.4\smm$/ })
+  await proposal.waitFor()
+  expect(await axe(page)).toEqual([])
+  await bar.getByRole('button', { name: 'Compare' }).click()
+  await bar.getByRole('cell', { name: 'Radius', exact: true }).waitFor()
+  await page.screenshot({ path: 'tests/browser/screens/take-solid-bar.png', fullPage: true })
+  await proposal.click()
+  await expect.poll(() => bar.locator('.gov').first().innerText()).toContain('+0.00')
+  await saved(page)
   await seat.context.close()
 })
 
