@@ -84,10 +84,10 @@ const cells: ReferenceRow[] = [
 
 const warping = (section: WallSection) => (e: Engine) => given(e.cellWarping(section, torsion(e, section))).largest
 const uniformBox: WallSection = { nodes: singleBox.nodes, walls: singleBox.walls.map(one => ({ ...one, t: 2 })) }
-const planeBox: WallSection = { nodes: singleBox.nodes, walls: singleBox.walls.map((one, i) => ({ ...one, t: i % 2 ? 4 : 2 })) }
+const planeBox: WallSection = { nodes: singleBox.nodes, walls: singleBox.walls.map((one, i) => ({ ...one, t: i % 2 ? 2 : 4 })) }
 const warped: ReferenceRow[] = [
   row('§3.8', 'warping at the corners of a box of one thickness, per rate of twist', '120×60, t 2 mm', 120 * 60 * 60 / (4 * 180), 'mm²', rel(1e-10), 'ab(a − b)/4(a + b), from dw/ds = q/(Gtθ′) − p', warping(uniformBox)),
-  row('§3.8', 'warping where p·t is the same in every wall', '120×60, t 2 and 4 mm', 0, 'mm²', abs(1e-9), 'it keeps plane', warping(planeBox)),
+  row('§3.8', 'warping where p·t is the same in every wall', '120×60, long walls 4, short walls 2 mm', 0, 'mm²', abs(1e-9), 'it keeps plane', warping(planeBox)),
 ]
 
 const K = (radius: number, make: 'machined' | 'bent') => (e: Engine) => given(e.cellCornerFactor(radius, 1, make)).K
