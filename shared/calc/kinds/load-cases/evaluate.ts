@@ -4,7 +4,7 @@ import { METHOD_REVISION } from '#shared/calc/method'
 import { output } from '#shared/calc/parts/output'
 import { schemaFaults } from '#shared/calc/parts/schema-faults'
 import { typedReader, type TypedReader } from '#shared/calc/parts/typed-reader'
-import type { CalcResult, Evaluation, Output } from '#shared/calc/types'
+import type { CalcResult, Evaluation, Output, ResultTable } from '#shared/calc/types'
 import { envelope } from '#shared/torsion/margins'
 import { unitFits } from '#shared/units/units'
 
@@ -23,7 +23,7 @@ export function evaluateLoadCases(inputs: unknown, links: Links = noLinks): Eval
   if (table.rows.length === 0) read.fault('rows', 'Add at least one load case.')
   if (read.faults.length > 0) return { ok: false, faults: read.faults }
   const outputs = table.columns.flatMap((column, c) => columnOutputs(column, table, values[c] ?? []))
-  return { ok: true, result: { kind: 'load-cases', methodRevision: METHOD_REVISION, outputs, heads, walls: [], cases: [], margins: [], governing: null, guards: [], working: [], drawing: null } }
+  return { ok: true, result: { kind: 'load-cases', methodRevision: METHOD_REVISION, outputs, heads, tables: [rowsTable(table, heads, values)], walls: [], cases: [], margins: [], governing: null, guards: [], working: [], drawing: null } }
 }
 
 function checkNames(table: LoadCasesInputs, read: TypedReader) {
@@ -51,6 +51,20 @@ function readHeads(table: LoadCasesInputs, read: TypedReader): Heads {
 /** An empty cell is no load of that kind in that case: it has no value, and is never taken for zero. */
 function cellValue(column: Column, text: string, id: string, path: string, read: TypedReader): number | null {
   return read.optional({ text, unit: column.unit }, path, { label: `${column.title || column.key} of case ${id}`, dimension: column.dimension })?.value ?? null
+}
+
+/** Every case with its values, as a checker compares them with the loads document. */
+function rowsTable(table: LoadCasesInputs, heads: Heads, values: readonly (number | null)[][]): ResultTable {
+  const words = (key: string, label: string) => ({ key, label, dimension: null, unit: '' as const })
+  const hot = heads.some(({ temperature }) => temperature !== null)
+  return {
+    key: 'cases', title: 'Cases of the table',
+    columns: [
+      words('id', 'Case'), words('title', 'Title'), words('level', 'Level'), ...(hot ? [{ key: 'temperature', label: 'Temperature', dimension: 'temperature' as const, unit: table.temperatureUnit }] : []),
+      ...table.columns.map(({ key, title, dimension, unit }) => ({ key, label: title || key, dimension, unit })),
+    ],
+    rows: heads.map(({ id, title, level, temperature }, r) => ({ id, cells: [id, title, level, ...(hot ? [temperature] : []), ...values.map(column => column[r] ?? null)] })),
+  }
 }
 
 function columnOutputs(column: Column, table: LoadCasesInputs, values: (number | null)[]): Output[] {
