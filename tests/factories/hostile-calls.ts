@@ -102,6 +102,8 @@ export const hostileCalls: readonly HostileCall[] = [
   { name: 'characteristicLength', give: () => [71_000, 1e9, 1e8] },
   ...solids.map((solid): HostileCall => ({ name: 'torsionOfSolid', what: solid.shape, give: () => [solid] })),
   ...profiles.map((profile): HostileCall => ({ name: 'sectionOfProfile', what: profile.shape, give: () => [profile, { G: 26_900, E: 71_000 }] })),
+  ...[machinedAngle, bentAngle, openArc].map((section, i): HostileCall => ({ name: 'outlineOfWalls', what: `section ${i + 1}`, give: () => [section] })),
+  { name: 'outlineOfWalls', what: 'cells', give: () => [box] },
   { name: 'checkOutline', give: () => [rectangle(2, 1)] },
   { name: 'outlineTorsion', give: () => [rectangle(2, 1)], slow: true },
 ]

@@ -34,9 +34,10 @@ export async function loadEngine() {
   const outlineCheck = await import('#shared/torsion/outline/outline-check')
   const outlineConvergence = await import('#shared/torsion/outline/convergence')
   const outlineAgreement = await import('#shared/torsion/outline/agreement')
+  const outlineWalls = await import('#shared/torsion/outline/from-walls/outline-of-walls')
   const outlineVertices = await import('#shared/torsion/outline/reentrant')
   const outlineLimits = await import('#shared/torsion/outline/published')
-  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...profiles, ...solids, ...cells, ...cellCorner, ...cellWarping, ...shear, ...warpingBar, ...sectorialRun, ...stressPeaks, ...compression, ...cutBar, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineVertices, ...outlineLimits }
+  return { ...units, ...display, ...open, ...response, ...wall, ...sectorial, ...corner, ...bend, ...junction, ...wagner, ...margins, ...factors, ...allowables, ...warping, ...profiles, ...solids, ...cells, ...cellCorner, ...cellWarping, ...shear, ...warpingBar, ...sectorialRun, ...stressPeaks, ...compression, ...cutBar, ...span, ...combined, ...imposed, ...stability, ...outlineSolver, ...outlineCheck, ...outlineConvergence, ...outlineAgreement, ...outlineWalls, ...outlineVertices, ...outlineLimits }
 }
 
 export type Engine = Awaited<ReturnType<typeof loadEngine>>

@@ -11,6 +11,7 @@ import { spanRows } from './span-rows'
 import { stabilityRows } from './stability-rows'
 import { torsionRows } from './torsion-rows'
 import { unitRows } from './unit-rows'
+import { wallsOutlineRows } from './walls-outline-rows'
 import { warpingRows } from './warping-rows'
 
-export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...profileRows, ...solidRows, ...cellRows, ...warpingRows, ...spanRows, ...stabilityRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows)]
+export const referenceRows: readonly ReferenceRow[] = [...torsionRows, ...profileRows, ...solidRows, ...cellRows, ...warpingRows, ...spanRows, ...stabilityRows, ...sectorialRows, ...programRows, ...unitRows, ...provenBy('4.1', outlineRows), ...provenBy('4.1', wallsOutlineRows)]
